@@ -1,0 +1,12 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.rate;
+
+import tariff.rate.clause.Written;
+
+/** placeholder until windows land. */
+public record WindowClause(String words) {
+    static WindowClause read(Written in) {
+        in.keys().forEach(in::has);
+        return new WindowClause("");
+    }
+}

@@ -1,0 +1,81 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.rate.clause;
+
+import java.math.BigDecimal;
+import java.util.Comparator;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import tariff.meter.Triangle;
+import tariff.meter.Unit;
+
+/**
+ * The same quantity inside each hour, half-hour, quarter-hour or day, then added up or the highest taken: {@code { "each": "hour", "take":
+ * "sum", "of": … }}. Registers and power factors inside are the hour's own. {@code "take": "meanOfHighest", "count": 3} averages the three
+ * highest. Needs interval data.
+ *
+ * @param count how many of the highest are averaged; 1 for the highest itself, 0 for the sum
+ */
+record Each(Span span, int count, Quantity of) implements Quantity {
+
+    static Quantity read(Written in) {
+        Map<String, Span> spans = new LinkedHashMap<>();
+        for (Span span : Span.values()) {
+            spans.put(span.key(), span);
+        }
+        Map<String, Integer> takes = new LinkedHashMap<>();
+        takes.put("sum", 0);
+        takes.put("highest", 1);
+        takes.put("meanOfHighest", 2);
+        Span span = in.requiredWord("each", spans, Span.HOUR);
+        int take = in.requiredWord("take", takes, 0);
+        int count = take == 2 ? in.wholeNumber("count", 2, 100) : take;
+        return new Each(span, count, in.quantity("of"));
+    }
+
+    @Override
+    public Optional<Unit> unit(Scope scope) {
+        return of.unit(scope.at("of"));
+    }
+
+    @Override
+    public Figure value(Facts facts) {
+        List<Figure> figures = facts.each(span).stream().map(of::value).toList();
+        if (figures.isEmpty()) {
+            return Figure.given(BigDecimal.ZERO, Unit.NUMBER, "no " + span.words());
+        }
+        BigDecimal value;
+        if (count == 0) {
+            value = figures.stream().map(Figure::value).reduce(BigDecimal.ZERO, BigDecimal::add);
+        } else {
+            int taken = Math.min(count, figures.size());
+            value = figures.stream()
+                    .map(Figure::value)
+                    .sorted(Comparator.reverseOrder())
+                    .limit(taken)
+                    .reduce(BigDecimal.ZERO, BigDecimal::add)
+                    .divide(BigDecimal.valueOf(taken), Triangle.PRECISION);
+        }
+        return Figure.given(
+                value, figures.get(0).unit(), takeWords() + " over " + figures.size() + " " + span.words() + "s");
+    }
+
+    @Override
+    public String words() {
+        return takeWords() + ", over each " + span.words() + ", of " + of.words();
+    }
+
+    @Override
+    public List<Clause> parts() {
+        return List.of(of);
+    }
+
+    private String takeWords() {
+        return switch (count) {
+            case 0 -> "the sum";
+            case 1 -> "the highest";
+            default -> "the mean of the " + count + " highest";
+        };
+    }
+}

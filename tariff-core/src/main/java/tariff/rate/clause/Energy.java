@@ -1,0 +1,43 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.rate.clause;
+
+import java.util.Map;
+import java.util.Optional;
+import java.util.TreeMap;
+import tariff.meter.Register;
+import tariff.meter.Unit;
+
+/**
+ * What a register counted over the period: {@code { "energy": "lagging kvarh", "in": "day" }}.
+ *
+ * @param register a counting register
+ * @param window the window it is counted in, the whole period if empty
+ */
+record Energy(Register register, Optional<String> window) implements Quantity {
+    private static final Map<String, Register> WORDS = new TreeMap<>(Map.of(
+            "kWh", Register.ENERGY_KWH,
+            "lagging kvarh", Register.LAGGING_KVARH,
+            "leading kvarh", Register.LEADING_KVARH,
+            "kVAh", Register.APPARENT_KVAH,
+            "exported kWh", Register.EXPORTED_KWH));
+
+    static Quantity read(Written in) {
+        return new Energy(in.requiredWord("energy", WORDS, Register.ENERGY_KWH), in.optionalText("in"));
+    }
+
+    @Override
+    public Optional<Unit> unit(Scope scope) {
+        scope.checkWindow(window);
+        return Optional.of(register.unit());
+    }
+
+    @Override
+    public Figure value(Facts facts) {
+        return facts.register(register, window);
+    }
+
+    @Override
+    public String words() {
+        return "the " + register.words() + window.map(name -> " in " + name).orElse("");
+    }
+}

@@ -1,0 +1,144 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.rate.clause;
+
+import java.math.BigDecimal;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.Optional;
+import tariff.meter.Register;
+import tariff.meter.Triangle;
+import tariff.meter.Unit;
+
+/**
+ * A power factor as a clause defines it: {@code { "from": "energies", "leading": "ignored", "round": { "to": 0.01 } }}. A month without
+ * energy has none, and what depends on it does not apply.
+ *
+ * @param from the registers it is worked out from
+ * @param window the window whose registers are used, the whole period if empty
+ * @param leading what leading kvarh do to it, where it comes from energies
+ * @param round how the rate rounds it before use
+ */
+public record PowerFactorRule(From from, Optional<String> window, Leading leading, Optional<Rounding> round) {
+
+    /** The registers a power factor is worked out from. */
+    public enum From {
+        /** kWh ÷ √(kWh² + kvarh²) of the period. */
+        ENERGIES("energies", "from the period's kWh and kvarh"),
+        /** kWh ÷ kVAh; never above the one from energies. */
+        APPARENT("kVAh", "kWh ÷ kVAh"),
+        /** Highest kW ÷ highest kVA. */
+        PEAK("peak", "highest kW ÷ highest kVA"),
+        /** As printed on the bill. */
+        PRINTED("printed", "as printed on the bill");
+
+        private final String key;
+        private final String words;
+
+        From(String key, String words) {
+            this.key = key;
+            this.words = words;
+        }
+    }
+
+    /** What leading kvarh do to a power factor from energies. */
+    public enum Leading {
+        IGNORED("ignored", "leading kvarh ignored"),
+        ADDED("added", "leading kvarh added to lagging"),
+        NETTED("netted", "leading kvarh taken from lagging"),
+        LARGER("larger", "the larger of lagging and leading kvarh");
+
+        private final String key;
+        private final String words;
+
+        Leading(String key, String words) {
+            this.key = key;
+            this.words = words;
+        }
+    }
+
+    private static final Map<String, From> FROM = new LinkedHashMap<>();
+    private static final Map<String, Leading> LEADING = new LinkedHashMap<>();
+
+    static {
+        for (From from : From.values()) {
+            FROM.put(from.key, from);
+        }
+        for (Leading leading : Leading.values()) {
+            LEADING.put(leading.key, leading);
+        }
+    }
+
+    public static PowerFactorRule read(Written in) {
+        PowerFactorRule rule = new PowerFactorRule(
+                in.requiredWord("from", FROM, From.ENERGIES),
+                in.optionalText("in"),
+                in.word("leading", LEADING, Leading.IGNORED),
+                Rounding.readOptional(in, "round"));
+        in.refuseOtherKeys();
+        return rule;
+    }
+
+    public void check(Scope scope) {
+        scope.checkWindow(window);
+        if (from != From.ENERGIES && leading != Leading.IGNORED) {
+            scope.at("leading")
+                    .error("leading", "says what leading kvarh do, but the power factor does not come from energies");
+        }
+    }
+
+    /** The month's power factor, empty without energy. */
+    public Optional<Figure> value(Facts facts) {
+        return switch (from) {
+            case ENERGIES -> fromEnergies(facts);
+            case APPARENT -> ratio(facts, Register.ENERGY_KWH, Register.APPARENT_KVAH);
+            case PEAK -> ratio(facts, Register.PEAK_KW, Register.PEAK_KVA);
+            case PRINTED -> Optional.of(facts.register(Register.POWER_FACTOR, window));
+        };
+    }
+
+    /** The power factor of a month that gives only the printed one is that one: working it out again could move its last digit. */
+    private Optional<Figure> fromEnergies(Facts facts) {
+        Figure active = facts.register(Register.ENERGY_KWH, window);
+        Figure reactive = reactive(facts);
+        BigDecimal apparent = Triangle.apparent(active.value(), reactive.value());
+        if (active.value().signum() == 0) {
+            return Optional.empty();
+        }
+        BigDecimal pf = Triangle.powerFactor(active.value(), apparent);
+        return Optional.of(rounded(Figure.of(pf, Unit.NUMBER, "{} ÷ √({}² + {}²)", active, active, reactive)));
+    }
+
+    private Figure reactive(Facts facts) {
+        Figure lagging = facts.register(Register.LAGGING_KVARH, window);
+        if (leading == Leading.IGNORED) {
+            return lagging;
+        }
+        Figure sent = facts.register(Register.LEADING_KVARH, window);
+        return switch (leading) {
+            case ADDED -> Figure.of(lagging.value().add(sent.value()), Unit.KVARH, "{} + {}", lagging, sent);
+            case NETTED -> Figure.of(lagging.value().subtract(sent.value()), Unit.KVARH, "{} − {}", lagging, sent);
+            default -> lagging.value().compareTo(sent.value()) >= 0 ? lagging : sent;
+        };
+    }
+
+    private Optional<Figure> ratio(Facts facts, Register active, Register apparent) {
+        Figure top = facts.register(active, window);
+        Figure bottom = facts.register(apparent, window);
+        if (top.value().signum() == 0 || bottom.value().signum() == 0) {
+            return Optional.empty();
+        }
+        BigDecimal pf = Triangle.powerFactor(top.value(), bottom.value());
+        return Optional.of(rounded(Figure.of(pf, Unit.NUMBER, "{} ÷ {}", top, bottom)));
+    }
+
+    private Figure rounded(Figure powerFactor) {
+        return round.map(rounding -> rounding.apply(powerFactor)).orElse(powerFactor);
+    }
+
+    public String words() {
+        return from.words
+                + window.map(name -> " in " + name).orElse("")
+                + (from == From.ENERGIES ? ", " + leading.words : "")
+                + round.map(rounding -> ", " + rounding.words()).orElse(", not rounded");
+    }
+}
