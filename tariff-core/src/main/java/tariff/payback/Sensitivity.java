@@ -17,6 +17,8 @@ import java.util.List;
 public record Sensitivity(Driver driver, Outcome low, Outcome high) {
 
     /**
+     * The verdict at one end of the range.
+     *
      * @param netPresentValue of yearly flows
      * @param simplePaybackYears as in {@link SimplePayback}
      */
