@@ -51,10 +51,10 @@ class RecoveryTest {
 
     @Test
     void twelfthsThatDoNotEndCostNoMonth() {
-        // 200/12 - 100/12 a month against 1200: 144 months to the day
+        // 100/12 a month, cut off below the true twelfth, against 1200: 144 months to the day
         Venture venture = new Venture(
-                Investment.plain(money("1200"), money("100"), 20),
-                Savings.level(money("200").divide(money("12"), MathContext.DECIMAL128)),
+                Investment.plain(money("1200"), money("0"), 20),
+                Savings.level(money("100").divide(money("12"), MathContext.DECIMAL128)),
                 Outlook.level(money("0")));
         assertThat(known(Recovery.ofMonths(CashFlow.of(venture).monthly()).lasting()))
                 .isEqualTo(144);
