@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.rate;
 
+import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.LinkedHashMap;
@@ -11,6 +12,7 @@ import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
+import tariff.meter.Period;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
 import tariff.rate.clause.Clause;
@@ -96,6 +98,11 @@ public final class Rate {
     /** Whether a month's bill depends on the months before it. */
     public boolean looksBack() {
         return clauses(Earlier.class).findAny().isPresent();
+    }
+
+    /** The hours of one of the rate's windows in a period; empty if the rate does not define it. */
+    public Optional<BigDecimal> hours(Period period, String window) {
+        return Optional.ofNullable(definition.windows().get(window)).map(each -> each.hours(period));
     }
 
     /** The rate in plain words, clause by clause, worked out from what computes it. */

@@ -9,4 +9,8 @@ public record WindowClause(String words) {
         in.keys().forEach(in::has);
         return new WindowClause("");
     }
+
+    public java.math.BigDecimal hours(tariff.meter.Period period) {
+        return java.math.BigDecimal.valueOf(12L * period.days());
+    }
 }

@@ -37,6 +37,11 @@ record AllOnceAbove(Quantity of, Quantity limit) implements Quantity {
     }
 
     @Override
+    public Optional<Allowance> allowance() {
+        return Allowance.on(of, limit);
+    }
+
+    @Override
     public List<Clause> parts() {
         return List.of(of, limit);
     }

@@ -137,6 +137,11 @@ record Blocks(List<Block> blocks) implements Price {
     }
 
     @Override
+    public Optional<Quantity> freeUpTo() {
+        return blocks.get(0).price().isFree() ? blocks.get(0).upTo() : Optional.empty();
+    }
+
+    @Override
     public boolean isFree() {
         return blocks.stream().allMatch(block -> block.price().isFree());
     }

@@ -51,6 +51,11 @@ record Charge(Heading heading, Quantity quantity, Price price) implements Line {
     }
 
     @Override
+    public Optional<Allowance> allowance() {
+        return price.freeUpTo().flatMap(free -> Allowance.on(quantity, free));
+    }
+
+    @Override
     public List<Clause> parts() {
         List<Clause> parts = new ArrayList<>(List.of(quantity, price));
         heading.when().ifPresent(parts::add);

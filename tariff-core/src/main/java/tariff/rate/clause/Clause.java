@@ -1,7 +1,9 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.rate.clause;
 
+import java.math.BigDecimal;
 import java.util.List;
+import java.util.Optional;
 import java.util.stream.Stream;
 
 /** Anything a rate is made of. */
@@ -10,8 +12,36 @@ public interface Clause {
     /** The clauses written directly inside this one. */
     List<? extends Clause> parts();
 
+    /** The power factor from which on this clause itself asks no penalty; empty if it knows none. */
+    default Optional<BigDecimal> target() {
+        return Optional.empty();
+    }
+
+    /** How much of a register this clause itself leaves free; empty if it leaves none. */
+    default Optional<Allowance> allowance() {
+        return Optional.empty();
+    }
+
     /** This clause and every clause inside it, to any depth. */
     default Stream<Clause> all() {
         return Stream.concat(Stream.of(this), parts().stream().flatMap(Clause::all));
+    }
+
+    /**
+     * How much of a register is free.
+     *
+     * @param of the register that is counted
+     * @param free up to which nothing is asked for it
+     */
+    record Allowance(Metered of, Quantity free) {
+
+        /** The allowance on the first register that a quantity counts; empty if it counts none. */
+        static Optional<Allowance> on(Quantity quantity, Quantity free) {
+            return quantity.all()
+                    .filter(Metered.class::isInstance)
+                    .map(Metered.class::cast)
+                    .findFirst()
+                    .map(metered -> new Allowance(metered, free));
+        }
     }
 }

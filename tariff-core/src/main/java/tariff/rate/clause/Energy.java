@@ -5,7 +5,6 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
 import tariff.meter.Register;
-import tariff.meter.Unit;
 
 /**
  * What a register counted over the period: {@code { "energy": "lagging kvarh", "in": "day" }}.
@@ -13,7 +12,7 @@ import tariff.meter.Unit;
  * @param register a counting register
  * @param window the window it is counted in, the whole period if empty
  */
-record Energy(Register register, Optional<String> window) implements Quantity {
+record Energy(Register register, Optional<String> window) implements Metered {
     private static final Map<String, Register> WORDS = new TreeMap<>(Map.of(
             "kWh", Register.ENERGY_KWH,
             "lagging kvarh", Register.LAGGING_KVARH,
@@ -23,17 +22,6 @@ record Energy(Register register, Optional<String> window) implements Quantity {
 
     static Quantity read(Written in) {
         return new Energy(in.requiredWord("energy", WORDS, Register.ENERGY_KWH), in.optionalText("in"));
-    }
-
-    @Override
-    public Optional<Unit> unit(Scope scope) {
-        scope.checkWindow(window);
-        return Optional.of(register.unit());
-    }
-
-    @Override
-    public Figure value(Facts facts) {
-        return facts.register(register, window);
     }
 
     @Override

@@ -34,6 +34,11 @@ record Excess(Quantity of, Quantity over) implements Quantity {
     }
 
     @Override
+    public Optional<Allowance> allowance() {
+        return Allowance.on(of, over);
+    }
+
+    @Override
     public List<Clause> parts() {
         return List.of(of, over);
     }

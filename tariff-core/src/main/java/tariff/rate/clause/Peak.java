@@ -5,7 +5,6 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
 import tariff.meter.Register;
-import tariff.meter.Unit;
 
 /**
  * The highest demand of the period: {@code { "peak": "kVA", "in": "winter days" }}.
@@ -13,7 +12,7 @@ import tariff.meter.Unit;
  * @param register a demand register
  * @param window the window it is taken in, the whole period if empty
  */
-record Peak(Register register, Optional<String> window) implements Quantity {
+record Peak(Register register, Optional<String> window) implements Metered {
     private static final Map<String, Register> WORDS = new TreeMap<>(Map.of(
             "kW", Register.PEAK_KW,
             "kVA", Register.PEAK_KVA,
@@ -22,17 +21,6 @@ record Peak(Register register, Optional<String> window) implements Quantity {
 
     static Quantity read(Written in) {
         return new Peak(in.requiredWord("peak", WORDS, Register.PEAK_KW), in.optionalText("in"));
-    }
-
-    @Override
-    public Optional<Unit> unit(Scope scope) {
-        scope.checkWindow(window);
-        return Optional.of(register.unit());
-    }
-
-    @Override
-    public Figure value(Facts facts) {
-        return facts.register(register, window);
     }
 
     @Override

@@ -17,6 +17,11 @@ public sealed interface Price extends Clause permits Blocks, DatedPrice, FixedPr
     /** As a phrase, with the word for one unit: {@code 0.0420 per kvarh}. */
     String words(String unit);
 
+    /** Up to where nothing is asked; empty if the first unit costs something. */
+    default Optional<Quantity> freeUpTo() {
+        return Optional.empty();
+    }
+
     /** Whether it is nothing, whatever the month. */
     boolean isFree();
 

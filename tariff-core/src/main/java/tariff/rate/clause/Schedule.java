@@ -20,9 +20,6 @@ public sealed interface Schedule extends Clause permits Bands, RatioTo, Slopes {
     /** The value before floor, cap and rounding. */
     BigDecimal plain(BigDecimal powerFactor);
 
-    /** The power factor from which on nothing has to be paid, though there may be more to gain; empty if there is always something. */
-    Optional<BigDecimal> target();
-
     /** The power factors at which the function changes its course, in rising order. */
     List<BigDecimal> edges();
 

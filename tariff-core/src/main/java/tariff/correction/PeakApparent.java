@@ -1,0 +1,44 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.correction;
+
+import java.math.BigDecimal;
+import tariff.meter.Triangle;
+
+/**
+ * The highest kVA after a bank, from the highest kW (P) and kVA (S) before it, which need not fall together; q₀ = √(S² − P²).
+ *
+ * <p>For a constant bank c: max(P, S − c) ≤ S′ ≤ √(P² + max(c², (q₀ − c)²)). S′² = p² + (q − c)² is convex, so its highest value over the
+ * loads that the bill allows lies at one of their corners. Up to c = q₀ ÷ 2 the usual formula with both peaks together is therefore a
+ * promise; beyond, it is an estimate. Steps that follow the load never lead, so for them S′ ≤ √(P² + ((q₀ − c)⁺)²). Own derivation.
+ *
+ * @param kw P
+ * @param kva S, at least P
+ */
+record PeakApparent(BigDecimal kw, BigDecimal kva) {
+
+    /**
+     * The highest kVA after a bank.
+     *
+     * @param fixedKvar always on
+     * @param switchedKvar follows the load
+     */
+    BigDecimal after(BigDecimal fixedKvar, BigDecimal switchedKvar, Estimate estimate) {
+        BigDecimal all = fixedKvar.add(switchedKvar);
+        if (all.signum() == 0) {
+            return kva;
+        }
+        BigDecimal together = Triangle.reactive(kw, kva);
+        BigDecimal lagging = together.subtract(all).max(BigDecimal.ZERO);
+        BigDecimal leading = fixedKvar.subtract(together).max(BigDecimal.ZERO);
+        return switch (estimate) {
+            case HIGH -> kva.subtract(all).max(kw);
+            case CENTRAL -> Triangle.apparent(kw, lagging.max(leading));
+            case LOW -> Triangle.apparent(kw, lagging.max(leading).max(fullyLeading(fixedKvar, together)));
+        };
+    }
+
+    /** Beyond half of q₀ a fixed bank may meet the kW peak without any kvar to correct. */
+    private static BigDecimal fullyLeading(BigDecimal fixedKvar, BigDecimal together) {
+        return fixedKvar.add(fixedKvar).compareTo(together) > 0 ? fixedKvar : BigDecimal.ZERO;
+    }
+}

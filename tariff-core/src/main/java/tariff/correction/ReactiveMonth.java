@@ -1,0 +1,62 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.correction;
+
+import java.math.BigDecimal;
+import java.util.Optional;
+import tariff.meter.Triangle;
+
+/**
+ * What is known of a month's reactive load before a bank, and what follows for the kvarh after it. Writing q(t) for the lagging kvar, Q for
+ * their sum over T hours, c for a constant bank: the lagging kvarh left are R = ∫(q − c)⁺.
+ *
+ * <p>Bounds: max(0, Q − cT) ≤ R ≤ Q × max(0, 1 − c ÷ M), with M the highest q. The first is Jensen's inequality for the convex (q − c)⁺,
+ * reached by an even load; the second its chord on [0, M], reached by a load that is M or nothing. No tighter bound exists without a load
+ * curve. Own derivation.
+ *
+ * @param laggingKvarh Q, 0 or more
+ * @param hours T, above zero
+ * @param highestKvar M, an upper limit of the lagging kvar; empty if nothing is known
+ * @param likelyPeakKvar the best guess of the highest lagging kvar, at most M; empty if nothing is known
+ */
+record ReactiveMonth(
+        BigDecimal laggingKvarh,
+        BigDecimal hours,
+        Optional<BigDecimal> highestKvar,
+        Optional<BigDecimal> likelyPeakKvar) {
+
+    /** R, the lagging kvarh that a constant bank leaves. */
+    BigDecimal left(BigDecimal bankKvar, Estimate estimate) {
+        if (bankKvar.signum() == 0) {
+            return laggingKvarh;
+        }
+        return switch (estimate) {
+            case LOW -> most(bankKvar);
+            case HIGH -> least(bankKvar);
+            case CENTRAL -> central(bankKvar).min(most(bankKvar)).max(least(bankKvar));
+        };
+    }
+
+    private BigDecimal least(BigDecimal bankKvar) {
+        return laggingKvarh.subtract(bankKvar.multiply(hours)).max(BigDecimal.ZERO);
+    }
+
+    private BigDecimal most(BigDecimal bankKvar) {
+        if (highestKvar.isEmpty()) {
+            return laggingKvarh;
+        }
+        BigDecimal peak = highestKvar.get().max(meanKvar());
+        if (peak.compareTo(bankKvar) <= 0) {
+            return BigDecimal.ZERO;
+        }
+        return laggingKvarh.multiply(peak.subtract(bankKvar)).divide(peak, Triangle.PRECISION);
+    }
+
+    private BigDecimal central(BigDecimal bankKvar) {
+        BigDecimal peak = likelyPeakKvar.or(() -> highestKvar).orElse(meanKvar().add(meanKvar()));
+        return LoadCurve.left(laggingKvarh, hours, peak.max(meanKvar()), bankKvar);
+    }
+
+    private BigDecimal meanKvar() {
+        return laggingKvarh.divide(hours, Triangle.PRECISION);
+    }
+}

@@ -1,0 +1,139 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.proposal;
+
+import java.util.Collections;
+import java.util.EnumMap;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import java.util.stream.Stream;
+import tariff.bill.Billing;
+import tariff.bill.PowerFactorCost;
+import tariff.bill.Statement;
+import tariff.correction.BankMonth;
+import tariff.correction.Estimate;
+import tariff.meter.MeteredMonth;
+import tariff.notice.Assumption;
+import tariff.notice.Caution;
+import tariff.notice.Refusal;
+import tariff.payback.Appraisal;
+import tariff.payback.Savings;
+import tariff.payback.Venture;
+
+/**
+ * A bank held against a year of bills: what low power factor costs today, what the bank would save, when it pays back, and on what all
+ * that rests.
+ *
+ * @param billing the rate and the site
+ * @param proposal what is offered
+ * @param today what low power factor costs without the bank
+ * @param savings the least, an estimate between, and the most that the bills allow
+ * @param appraisals payback and its kin for each; empty without a price or a full year of twelve months
+ * @param assumptions what was taken to be so
+ * @param cautions what a person must know
+ */
+public record Assessment(
+        Billing billing,
+        Proposal proposal,
+        PowerFactorCost today,
+        Map<Estimate, BankSavings> savings,
+        Map<Estimate, Appraisal> appraisals,
+        List<Assumption> assumptions,
+        List<Caution> cautions) {
+    private static final int YEAR = 12;
+
+    public Assessment {
+        savings = Collections.unmodifiableMap(new EnumMap<>(savings));
+        appraisals = appraisals.isEmpty() ? Map.of() : Collections.unmodifiableMap(new EnumMap<>(appraisals));
+        assumptions = List.copyOf(assumptions);
+        cautions = List.copyOf(cautions);
+    }
+
+    /**
+     * Assesses a proposal on the last twelve of the months, or all if they are fewer; those before are their past.
+     *
+     * @param months in any order, none overlapping another
+     * @throws Refusal naming every month that lacks what the rate bills
+     */
+    public static Assessment of(Billing billing, List<MeteredMonth> months, Proposal proposal) {
+        List<MeteredMonth> sorted = months.stream().sorted().toList();
+        List<MeteredMonth> past = sorted.subList(0, Math.max(0, sorted.size() - YEAR));
+        List<MeteredMonth> year = sorted.subList(past.size(), sorted.size());
+        PowerFactorCost today = PowerFactorCost.of(billing, past, year);
+        Map<Estimate, BankSavings> savings = savings(billing, today, past, year, proposal);
+        Set<Assumption> assumptions = new LinkedHashSet<>();
+        today.months().forEach(month -> assumptions.addAll(month.asItIs().assumptions()));
+        assumptions.addAll(BankAssumptions.of(billing.rate(), proposal, year));
+        return new Assessment(
+                billing,
+                proposal,
+                today,
+                savings,
+                appraisals(savings, proposal),
+                List.copyOf(assumptions),
+                BankCautions.of(proposal.bank()));
+    }
+
+    /** The bank's savings month by month; the estimate between the bounds unless another is asked for. */
+    public BankSavings savings(Estimate estimate) {
+        return savings.getOrDefault(estimate, new BankSavings(List.of(), List.of(), List.of()));
+    }
+
+    private static Map<Estimate, BankSavings> savings(
+            Billing billing,
+            PowerFactorCost today,
+            List<MeteredMonth> past,
+            List<MeteredMonth> year,
+            Proposal proposal) {
+        boolean looksBack = billing.rate().looksBack();
+        BankMonth bank =
+                new BankMonth(proposal.bank(), (month, window) -> billing.rate().hours(month.period(), window));
+        List<Statement> before = looksBack && past.size() < YEAR
+                ? billing.statements(year, year)
+                : today.months().stream().map(PowerFactorCost.Month::asItIs).toList();
+        Map<Estimate, BankSavings> all = new EnumMap<>(Estimate.class);
+        for (Estimate estimate : Estimate.values()) {
+            List<MeteredMonth> after =
+                    year.stream().map(month -> bank.with(month, estimate)).toList();
+            List<Statement> settled = looksBack ? billing.statements(after, after) : billing.statements(after);
+            List<Statement> first = looksBack ? billing.statements(year, after) : settled;
+            all.put(estimate, new BankSavings(before, first, settled));
+        }
+        return all;
+    }
+
+    private static Map<Estimate, Appraisal> appraisals(Map<Estimate, BankSavings> savings, Proposal proposal) {
+        Map<Estimate, Appraisal> all = new EnumMap<>(Estimate.class);
+        savings.forEach((estimate, bank) -> {
+            if (bank.before().size() == YEAR) {
+                proposal.investment()
+                        .ifPresent(investment -> all.put(
+                                estimate,
+                                Appraisal.of(new Venture(
+                                        investment,
+                                        new Savings(bank.firstYearMonths(), bank.settledYearMonths()),
+                                        proposal.outlook()))));
+            }
+        });
+        return all;
+    }
+
+    /** Why there is no payback, if there is none. */
+    public Optional<String> whyNoPayback() {
+        if (!appraisals.isEmpty()) {
+            return Optional.empty();
+        }
+        return Optional.of(
+                proposal.investment().isEmpty()
+                        ? "no price is given"
+                        : "payback needs a year of twelve months; "
+                                + today.months().size() + " are given");
+    }
+
+    /** Every statement of the assessment, for whoever wants to look through them. */
+    public Stream<Statement> statements() {
+        return savings.values().stream().flatMap(each -> each.settledYear().stream());
+    }
+}

@@ -1,0 +1,75 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.proposal;
+
+import static tariff.meter.Register.PEAK_KVA;
+import static tariff.meter.Register.PEAK_LAGGING_KVAR;
+
+import java.util.ArrayList;
+import java.util.List;
+import tariff.correction.CapacitorBank;
+import tariff.meter.MeteredMonth;
+import tariff.notice.Assumption;
+import tariff.rate.Rate;
+import tariff.rate.clause.Metered;
+
+/** What an assessment takes to be so about a bank and the year it would meet. */
+final class BankAssumptions {
+    private static final String YEAR = "the year";
+    private static final String INTERVALS = "interval data settle it";
+
+    private BankAssumptions() {}
+
+    static List<Assumption> of(Rate rate, Proposal proposal, List<MeteredMonth> year) {
+        CapacitorBank bank = proposal.bank();
+        List<Assumption> all = new ArrayList<>();
+        all.add(new Assumption(
+                "kvarh-spread",
+                YEAR,
+                "a month's kvarh do not say when they were drawn: the low savings take them as all drawn at the peak, the high as drawn"
+                        + " evenly, the central lie between by an assumed load curve",
+                INTERVALS));
+        if (year.stream().anyMatch(month -> !month.totals().has(PEAK_LAGGING_KVAR))) {
+            all.add(new Assumption(
+                    "highest-kvar",
+                    YEAR,
+                    year.stream().allMatch(month -> month.totals().has(PEAK_KVA))
+                            ? "the highest kvar is not on every bill; it cannot be above the highest kVA"
+                            : "neither the highest kvar nor the highest kVA is on every bill; the low savings then count no kvarh",
+                    "give peak lagging kvar"));
+        }
+        if (rate.clauses(Metered.class).anyMatch(each -> each.register() == PEAK_KVA)) {
+            all.add(new Assumption(
+                    "peaks-together",
+                    YEAR,
+                    "the central savings take the highest kW and the highest kVA to fall together; low and high do not",
+                    INTERVALS));
+        }
+        all.add(new Assumption(
+                "bank-always-on",
+                YEAR,
+                bank.isAutomatic()
+                        ? "the fixed kvar are on in every hour; the steps follow the load and send nothing back but for two thirds of the"
+                                + " smallest step, which the low savings count against the bank"
+                        : "the bank is on in every hour of the year",
+                "switch it by time, and say in which hours"));
+        all.add(new Assumption(
+                "rated-output",
+                YEAR,
+                "the bank gives its rated kvar at the stated voltage; new capacitors may differ by −5 to +10 % (IEC 60831-1:2014, from memory)",
+                "give the measured kvar"));
+        if (bank.wattsPerKvar().signum() == 0) {
+            all.add(new Assumption(
+                    "bank-losses", YEAR, "the bank's own losses are left out", "give its losses in W per kvar"));
+        }
+        all.add(new Assumption(
+                "year-repeats", YEAR, "every later year has the same load as the year of the bills", "none"));
+        if (rate.looksBack()) {
+            all.add(new Assumption(
+                    "in-service-on-the-first-day",
+                    YEAR,
+                    "the bank goes into service on the first day of the first month; the ratchet then remembers the year before",
+                    "none"));
+        }
+        return all;
+    }
+}

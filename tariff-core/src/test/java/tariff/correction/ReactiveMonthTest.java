@@ -1,0 +1,124 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.correction;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
+
+import java.math.BigDecimal;
+import java.util.Optional;
+import java.util.Random;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+
+/** Lagging kvarh that a constant bank leaves, known only from a month's totals. Own derivation, checked by simulated load curves. */
+class ReactiveMonthTest {
+
+    // Q kvarh | T h | M kvar | c kvar | least left | most left | source
+    @ParameterizedTest
+    @CsvSource({
+        // 150,000 − 200 × 730 = 4,000; 150,000 × (1 − 200/450) = 83,333.33; own arithmetic
+        "150000, 730, 450, 200, 4000, 83333.3333",
+        // removed 60,000 to 108,000 of 120,000: own arithmetic on 720 h and a highest 300 kvar
+        "120000, 720, 300, 150, 12000, 60000",
+        // a bank as large as the highest kvar leaves nothing
+        "120000, 720, 300, 300, 0, 0",
+        // no bank leaves all
+        "120000, 720, 300, 0, 120000, 120000"
+    })
+    void kvarhLeftLieBetweenAnEvenLoadAndOneThatIsAllPeak(
+            String kvarh, String hours, String peak, String bank, double least, double most) {
+        ReactiveMonth month = month(kvarh, hours, peak);
+        assertThat(month.left(new BigDecimal(bank), Estimate.HIGH).doubleValue())
+                .isCloseTo(least, within(1e-3));
+        assertThat(month.left(new BigDecimal(bank), Estimate.LOW).doubleValue()).isCloseTo(most, within(1e-3));
+    }
+
+    @Test
+    void withoutAnyPeakNothingIsPromised() {
+        ReactiveMonth month =
+                new ReactiveMonth(new BigDecimal("120000"), new BigDecimal("720"), Optional.empty(), Optional.empty());
+        assertThat(month.left(new BigDecimal("150"), Estimate.LOW)).isEqualByComparingTo("120000");
+    }
+
+    // Q | T | M | c | left under the power curve: quadrature-checked figures of the derivation, own arithmetic
+    @ParameterizedTest
+    @CsvSource({"150000, 730, 450, 200, 44133.22", "120000, 720, 300, 150, 32181.51"})
+    void thePowerCurveAgreesWithItsQuadrature(double kvarh, double hours, double peak, double bank, double left) {
+        assertThat(LoadCurve.powerCurve(kvarh / hours, peak, hours, bank)).isCloseTo(left, within(0.01));
+    }
+
+    /** Removed kvarh = ∫ min(q, c) over the density, by the midpoint rule on 200,000 strips. */
+    @ParameterizedTest
+    @CsvSource({"205, 450, 730, 200", "30, 300, 720, 50", "260, 300, 720, 150", "150, 300, 744, 10"})
+    void theTruncatedExponentialAgreesWithItsQuadrature(double mean, double peak, double hours, double bank) {
+        double shape = shapeByBisection(mean / peak);
+        double sum = 0;
+        double weight = 0;
+        int strips = 200_000;
+        for (int i = 0; i < strips; i++) {
+            double q = peak * (i + 0.5) / strips;
+            double density = Math.exp(-shape * q / peak);
+            sum += Math.min(q, bank) * density;
+            weight += density;
+        }
+        assertThat(LoadCurve.exponentialRemoved(mean, peak, hours, bank)).isCloseTo(hours * sum / weight, within(0.05));
+    }
+
+    private static double shapeByBisection(double share) {
+        double low = -400;
+        double high = 400;
+        for (int i = 0; i < 200; i++) {
+            double middle = (low + high) / 2;
+            double mean = Math.abs(middle) < 1e-9 ? 0.5 : 1 / middle - 1 / Math.expm1(middle);
+            if (mean > share) {
+                low = middle;
+            } else {
+                high = middle;
+            }
+        }
+        return (low + high) / 2;
+    }
+
+    @Test
+    void everySimulatedLoadLiesWithinTheBounds() {
+        Random random = new Random(20260101);
+        for (int i = 0; i < 3_000; i++) {
+            double[] kvar = profile(random);
+            double bank = random.nextDouble() * 500;
+            double total = 0;
+            double left = 0;
+            double peak = 0;
+            for (double q : kvar) {
+                total += q;
+                left += Math.max(0, q - bank);
+                peak = Math.max(peak, q);
+            }
+            ReactiveMonth month = new ReactiveMonth(
+                    BigDecimal.valueOf(total),
+                    BigDecimal.valueOf(kvar.length),
+                    Optional.of(BigDecimal.valueOf(peak)),
+                    Optional.of(BigDecimal.valueOf(peak)));
+            BigDecimal c = BigDecimal.valueOf(bank);
+            assertThat(left)
+                    .isGreaterThanOrEqualTo(month.left(c, Estimate.HIGH).doubleValue() - 1e-6)
+                    .isLessThanOrEqualTo(month.left(c, Estimate.LOW).doubleValue() + 1e-6);
+            assertThat(month.left(c, Estimate.CENTRAL))
+                    .isBetween(month.left(c, Estimate.HIGH), month.left(c, Estimate.LOW));
+        }
+    }
+
+    private static double[] profile(Random random) {
+        double[] kvar = new double[1 + random.nextInt(60)];
+        double exponent = Math.exp(random.nextGaussian());
+        for (int i = 0; i < kvar.length; i++) {
+            kvar[i] = random.nextInt(5) == 0 ? 0 : 450 * Math.pow(random.nextDouble(), exponent);
+        }
+        return kvar;
+    }
+
+    private static ReactiveMonth month(String kvarh, String hours, String peak) {
+        Optional<BigDecimal> highest = Optional.of(new BigDecimal(peak));
+        return new ReactiveMonth(new BigDecimal(kvarh), new BigDecimal(hours), highest, highest);
+    }
+}
