@@ -110,6 +110,11 @@ public final class IntervalSeries {
         return absent.get(interval);
     }
 
+    /** Whether any interval of a range was recorded. */
+    boolean recordedIn(IntervalRange range) {
+        return absent.nextClearBit(range.from()) < range.to();
+    }
+
     public boolean hasExport() {
         return exportedKwh != null;
     }
@@ -145,7 +150,11 @@ public final class IntervalSeries {
 
     /** The first interval that starts at the moment or later, kept inside 0 … size. */
     public int firstFrom(Instant moment) {
-        long seconds = moment.getEpochSecond() - start.getEpochSecond();
+        return firstFrom(moment.getEpochSecond());
+    }
+
+    int firstFrom(long epochSecond) {
+        long seconds = epochSecond - start.getEpochSecond();
         long index = -Math.floorDiv(-seconds, 60L * stepMinutes);
         return (int) Math.max(0, Math.min(size(), index));
     }

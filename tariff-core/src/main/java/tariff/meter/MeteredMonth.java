@@ -34,6 +34,11 @@ public record MeteredMonth(
     /** What is inside a period. */
     @FunctionalInterface
     public interface Detail {
+        /** The energies of each part in whole numbers, if they are at hand. */
+        default Optional<CutEnergies> energies(Cut cut) {
+            return Optional.empty();
+        }
+
         /** The period cut into hours, days …, each with registers of its own, in order. */
         List<MeteredMonth> each(Cut cut);
     }
