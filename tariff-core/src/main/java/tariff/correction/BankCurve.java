@@ -53,7 +53,11 @@ public final class BankCurve {
         this(series, range, interval -> true);
     }
 
-    /** @throws IllegalArgumentException if the bank is outside 0 to 1,000,000 kvar or finer than the series */
+    /**
+     * The registers after a bank of this size.
+     *
+     * @throws IllegalArgumentException if the bank is outside 0 to 1,000,000 kvar or finer than the series
+     */
     public Point after(BigDecimal kvar) {
         long bank = BankWalk.scaled(series, kvar);
         int lower = atMost(bank);

@@ -72,10 +72,8 @@ final class Combinations {
         for (int[] each : counts) {
             int operations = operations(from, each);
             long miss = Math.abs(wanted - output(each));
-            boolean better = miss < bestMiss
-                    || miss == bestMiss
-                            && (operations < bestOperations
-                                    || operations == bestOperations && output(each) < output(best));
+            boolean less = operations == bestOperations && output(each) < output(best);
+            boolean better = miss < bestMiss || (miss == bestMiss && (operations < bestOperations || less));
             if (operations <= allowed && better) {
                 best = each;
                 bestMiss = miss;

@@ -37,6 +37,9 @@ final class Regulator {
     void regulate(int interval, boolean off) {
         int slot = interval % lastHour.length;
         lastHour[slot] = 0;
+        if (series.isAbsent(interval)) {
+            return;
+        }
         if (off) {
             change(combinations.none(), slot);
             wanting = 0;

@@ -32,7 +32,7 @@ public record SteppedBank(
         if (stepsKvar.isEmpty() || stepsKvar.size() > 24 || stepsKvar.stream().anyMatch(step -> step.signum() <= 0)) {
             throw new IllegalArgumentException("steps of " + stepsKvar + " kvar; allowed: 1 to 24 steps, each above 0");
         }
-        if (delayIntervals < 0 || operationsPerHour.isPresent() && operationsPerHour.get() < 1) {
+        if (delayIntervals < 0 || operationsPerHour.filter(most -> most < 1).isPresent()) {
             throw new IllegalArgumentException("a delay below 0 or fewer than one operation an hour");
         }
     }

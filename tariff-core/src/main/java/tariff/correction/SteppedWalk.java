@@ -2,6 +2,7 @@
 package tariff.correction;
 
 import java.math.BigDecimal;
+import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
@@ -42,17 +43,15 @@ public record SteppedWalk(
         }
         int full = 0;
         for (int i = range.from(); i < range.to(); i++) {
-            if (!series.isAbsent(i)) {
-                regulator.regulate(i, calendar.mask(i) != 0);
-                wear.follow(regulator.on(), regulator.sizes());
-                full += regulator.isFull() ? 1 : 0;
-            }
+            regulator.regulate(i, calendar.mask(i) != 0);
+            wear.follow(regulator.on(), regulator.sizes());
+            full += regulator.isFull() ? 1 : 0;
             long output = regulator.output();
             tally.add(i, output);
             correction.set(i, Math.floorDiv(2 * output + series.perHour(), 2 * series.perHour()));
         }
         BigDecimal hours = BigDecimal.valueOf((long) full * series.stepMinutes())
-                .divide(BigDecimal.valueOf(60), 2, java.math.RoundingMode.HALF_UP);
+                .divide(BigDecimal.valueOf(60), 2, RoundingMode.HALF_UP);
         return new SteppedWalk(tally.outcome(), wear.operations(), hours, correction.series());
     }
 
