@@ -10,7 +10,7 @@ import java.util.OptionalDouble;
  *
  * @param stepsKvar each step at {@code ratedVolts} [kvar], 1 to 24 of them, each above 0
  * @param ratedVolts of the capacitors, between lines [V], above 0
- * @param reactorP series reactor's reactance over the capacitor's, in [0, 1); 0 for a plain bank
+ * @param reactorP series reactor's reactance over the capacitor's, in [0, 0.25]; 0 for a plain bank
  * @param switching whether a controller switches the steps
  * @param lossWattsPerKvar of the whole bank [W/kvar], 0 or more
  * @param operationsPerDay of the busiest step, 0 or more, if known
@@ -41,7 +41,7 @@ public record BankData(
         }
         stepsKvar.forEach(step -> Given.positive("stepsKvar", step, "kvar"));
         Given.positive("ratedVolts", ratedVolts, "V");
-        Given.reactorP(reactorP);
+        Given.value("reactorP", reactorP, reactorP >= 0 && reactorP <= 0.25, "0 (plain) to 0.25, so 0.07 for 7 %");
         Given.notNegative("lossWattsPerKvar", lossWattsPerKvar, "W/kvar");
         operationsPerDay.ifPresent(number -> Given.notNegative("operationsPerDay", number, "a day"));
         conductorAmps.ifPresent(amps -> Given.positive("conductorAmps", amps, "A"));

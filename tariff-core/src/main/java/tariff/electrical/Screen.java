@@ -21,14 +21,21 @@ interface Screen {
     /** Asks; data that are missing give {@link Verdict#NOT_SCREENED} and say what is needed. */
     Screening ask(SiteData site, BankData bank);
 
-    /** An answer with this screen's own limit and source. */
+    /** What the value of an answer counts, such as {@code kVA}. */
+    String unit();
+
+    /** An answer with its figure. */
     default Screening answer(Verdict verdict, double value, String found) {
-        return new Screening(name(), verdict, found, OptionalDouble.of(value), limit(), source(), settledBy());
+        return answer(verdict, OptionalDouble.of(value), found);
     }
 
     /** An answer that only says what is needed. */
     default Screening notScreened(Needs needs) {
-        return new Screening(
-                name(), Verdict.NOT_SCREENED, needs.toString(), OptionalDouble.empty(), limit(), source(), settledBy());
+        return answer(Verdict.NOT_SCREENED, OptionalDouble.empty(), needs.toString());
+    }
+
+    /** An answer with this screen's own name, unit, limit and source. */
+    default Screening answer(Verdict verdict, OptionalDouble value, String found) {
+        return new Screening(name(), verdict, found, value, unit(), limit(), source(), settledBy());
     }
 }

@@ -10,6 +10,7 @@ import java.util.OptionalDouble;
  * @param verdict what it makes of the bank
  * @param found the figure found, with its unit, in a sentence; {@code needs …} where data are missing
  * @param value the same figure as a number, absent where there is none
+ * @param unit of the value, such as {@code kVA} or {@code %}
  * @param limit what the figure is held against, with its unit
  * @param source where the limit is written down, with the edition, or {@code common practice, no source}
  * @param settledBy what would settle the question
@@ -19,13 +20,14 @@ public record Screening(
         Verdict verdict,
         String found,
         OptionalDouble value,
+        String unit,
         String limit,
         String source,
         String settledBy) {
 
     /** Refuses a blank text, and a value that is not a number, with an {@link IllegalArgumentException}. */
     public Screening {
-        for (String text : new String[] {name, found, limit, source, settledBy}) {
+        for (String text : new String[] {name, found, unit, limit, source, settledBy}) {
             if (text.isBlank()) {
                 throw new IllegalArgumentException("a screening needs every text; given: " + found);
             }

@@ -96,6 +96,11 @@ public record SiteData(
                         : ShortCircuit.behindTransformerKva(kva, percent));
     }
 
+    /** What {@link #shortCircuitKva} leaves out, for the end of a sentence. */
+    String networkWords() {
+        return networkKva.isPresent() ? "" : "; the network before the transformer is taken as infinitely strong";
+    }
+
     /** Non-linear load over the transformer's rating, absent unless both are known. */
     public OptionalDouble nonLinearShare() {
         return nonLinearKva.isPresent() && transformerKva.isPresent()
