@@ -15,7 +15,8 @@ final class ConductorScreen implements Screen {
 
     @Override
     public String limit() {
-        return "135 % of the bank's current by the NEC, stop below; 143 % by IEC with capacitance at +10 %, look closer below";
+        return "135 % of the bank's current by the NEC, stop below; 143 % by IEC with capacitance at +10 %, "
+                + "look closer below";
     }
 
     @Override

@@ -15,12 +15,15 @@ final class DetuningScreen implements Screen {
 
     @Override
     public String limit() {
-        return "non-linear load over the transformer's rating: plain up to 15 %, stronger capacitors up to 25 %, reactors up to 60 %, filters above; plain up to 3 % voltage distortion; tuning below order 4.5; capacitors rated for the voltage behind the reactor";
+        return "non-linear load over the transformer's rating: plain up to 15 %, stronger capacitors up to 25 "
+                + "%, reactors up to 60 %, filters above; plain up to 3 % voltage distortion; tuning below order "
+                + "4.5; capacitors rated for the voltage behind the reactor";
     }
 
     @Override
     public String source() {
-        return "Electrical Installation Guide 2008, ch. L, simplified rule up to 2 MVA (from memory); distortion and tuning common practice, no source";
+        return "Electrical Installation Guide 2008, ch. L, simplified rule up to 2 MVA (from memory); "
+                + "distortion and tuning common practice, no source";
     }
 
     @Override
@@ -36,13 +39,7 @@ final class DetuningScreen implements Screen {
         if (needs.any()) {
             return notScreened(needs);
         }
-        return bank.isDetuned() ? detuned(share, volts, bank) : plain(share, distortion(site));
-    }
-
-    private static double distortion(SiteData site) {
-        return Math.sqrt(site.harmonicVoltages().values().stream()
-                .mapToDouble(share -> share * share)
-                .sum());
+        return bank.isDetuned() ? detuned(share, volts, bank) : plain(share, site.voltageDistortion());
     }
 
     private Screening plain(double share, double distortion) {

@@ -19,7 +19,8 @@ final class HarmonicDutyScreen implements Screen {
 
     @Override
     public String limit() {
-        return "voltage 110 %, crest 120 %, current 135 %, kvar 135 % of rating; current 130 %; look closer from 90 % of a limit";
+        return "voltage 110 %, crest 120 %, current 135 %, kvar 135 % of rating; current 130 %; look closer "
+                + "from 90 % of a limit";
     }
 
     @Override
@@ -29,7 +30,8 @@ final class HarmonicDutyScreen implements Screen {
 
     @Override
     public String settledBy() {
-        return "spectra measured with the bank on, in every combination of steps: resonance can multiply what was measured without it";
+        return "spectra measured with the bank on, in every combination of steps: resonance can multiply what "
+                + "was measured without it";
     }
 
     @Override

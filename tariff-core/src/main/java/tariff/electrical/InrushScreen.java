@@ -25,7 +25,8 @@ final class InrushScreen implements Screen {
 
     @Override
     public String settledBy() {
-        return "the inductance between the steps, contactors with damping resistors, and a discharge before every reconnection";
+        return "the inductance between the steps, contactors with damping resistors, and a discharge before "
+                + "every reconnection";
     }
 
     @Override

@@ -15,12 +15,14 @@ final class LifeScreen implements Screen {
 
     @Override
     public String limit() {
-        return "the day's mean of the temperature class and the rated voltage; stop beyond 10 K or 110 %, or below half the rated life";
+        return "the day's mean of the temperature class and the rated voltage; stop beyond 10 K or 110 %, or "
+                + "below half the rated life";
     }
 
     @Override
     public String source() {
-        return "IEC 60831-1 classes (means from memory); 10 K rule and ninth power from a note quoting a maker; the verdict common practice, no source";
+        return "IEC 60831-1 classes (means from memory); 10 K rule and ninth power from a note quoting a maker; "
+                + "the verdict common practice, no source";
     }
 
     @Override

@@ -15,12 +15,14 @@ final class LightLoadScreen implements Screen {
 
     @Override
     public String limit() {
-        return "a fixed bank no larger than the smallest reactive load; a larger one also above 15 % of the transformer's rating is stopped";
+        return "a fixed bank no larger than the smallest reactive load; a larger one also above 15 % of the "
+                + "transformer's rating is stopped";
     }
 
     @Override
     public String source() {
-        return "IEEE Std 1036-2010 for the smallest load, Electrical Installation Guide 2008, ch. L for 15 % (both from memory)";
+        return "IEEE Std 1036-2010 for the smallest load, Electrical Installation Guide 2008, ch. L for 15 % "
+                + "(both from memory)";
     }
 
     @Override

@@ -1,7 +1,11 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.electrical;
 
-/** Whether the bank saves more in the transformer than it burns itself. A fixed bank exactly; for an automatic one, a bank fixed at the mean reactive load (or at its whole size, if that is less) saves no more and burns no less as long as the load itself never leads, so the balance is at least about this. */
+/**
+ * Whether the bank saves more in the transformer than it burns itself. A fixed bank exactly; for an automatic one, a bank
+ * fixed at the mean reactive load (or at its whole size, if that is less) saves no more and burns no less as long as the
+ * load itself never leads, so the balance is at least about this.
+ */
 final class LossScreen implements Screen {
     /** A twelfth of a year [h]. */
     private static final double HOURS = 730;

@@ -18,12 +18,14 @@ final class MotorScreen implements Screen {
 
     @Override
     public String limit() {
-        return "90 % of the motor's no-load kvar; none behind a drive or soft starter, none on motors that plug, inch or reverse";
+        return "90 % of the motor's no-load kvar; none behind a drive or soft starter, none on motors that "
+                + "plug, inch or reverse";
     }
 
     @Override
     public String source() {
-        return "90 % rule, IEC 60831-1 guide (from memory); duties from the Electrical Installation Guide 2008, ch. L";
+        return "90 % rule, IEC 60831-1 guide (from memory); duties from the Electrical Installation Guide 2008, "
+                + "ch. L";
     }
 
     @Override

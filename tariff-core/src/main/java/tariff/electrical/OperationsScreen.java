@@ -15,7 +15,8 @@ final class OperationsScreen implements Screen {
 
     @Override
     public String limit() {
-        return "5000 switchings a year; a contactor of 100 000 operations should last the 10 years that a bank is planned for";
+        return "5000 switchings a year; a contactor of 100 000 operations should last the 10 years that a bank "
+                + "is planned for";
     }
 
     @Override

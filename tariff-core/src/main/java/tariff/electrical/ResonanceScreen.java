@@ -3,14 +3,20 @@ package tariff.electrical;
 
 import java.util.Comparator;
 import java.util.List;
-import java.util.OptionalDouble;
 import java.util.Set;
 import java.util.TreeSet;
 
-/** Whether any combination of steps meets the network at a harmonic. Danger stops a bank only where non-linear load is known to be 15 % of the transformer or more; where it is not known, it is still looked at closer, and any order that was measured counts beside the 5th, 7th, 11th and 13th. */
+/**
+ * Whether any combination of steps meets the network at a harmonic. Danger stops a bank only where harmonics are known to
+ * be real, by non-linear load of 15 % of the transformer or a measured distortion above 3 %; where neither is known it is
+ * still looked at closer, and any order that was measured counts beside the 5th, 7th, 11th and 13th.
+ */
 final class ResonanceScreen implements Screen {
     /** A share of the transformer's rating from which harmonic sources count. Common practice 15 to 20 %. */
     private static final double REAL_SHARE = 0.15;
+
+    /** A measured voltage distortion from which they count too. Common practice 3 to 5 %. */
+    private static final double REAL_DISTORTION = 0.03;
 
     @Override
     public String name() {
@@ -24,7 +30,8 @@ final class ResonanceScreen implements Screen {
 
     @Override
     public String limit() {
-        return "danger where a harmonic current is lifted 5 times or more, caution from 3 times, with the capacitance anywhere in its tolerance";
+        return "danger where a harmonic current is lifted 5 times or more, caution from 3 times, with the "
+                + "capacitance anywhere in its tolerance";
     }
 
     @Override
@@ -34,7 +41,8 @@ final class ResonanceScreen implements Screen {
 
     @Override
     public String settledBy() {
-        return "a harmonic study: measured spectra, every supply configuration, damping; this estimate has none of them";
+        return "a harmonic study: measured spectra, every supply configuration, damping; this estimate has none "
+                + "of them";
     }
 
     @Override
@@ -52,17 +60,15 @@ final class ResonanceScreen implements Screen {
         ResonancePoint worst = points.stream()
                 .max(Comparator.comparingDouble(ResonancePoint::amplification))
                 .orElseThrow();
-        return answer(
-                verdict(worst.band(), site.nonLinearShare()),
-                worst.order(),
-                words(points, worst) + site.networkWords());
+        return answer(verdict(worst.band(), site), worst.order(), words(points, worst) + site.networkWords());
     }
 
-    private static Verdict verdict(ResonanceBand band, OptionalDouble nonLinearShare) {
+    private static Verdict verdict(ResonanceBand band, SiteData site) {
         if (band == ResonanceBand.LOW) {
             return Verdict.FINE;
         }
-        boolean harmonicsAreReal = nonLinearShare.orElse(0) >= REAL_SHARE;
+        boolean harmonicsAreReal =
+                site.nonLinearShare().orElse(0) >= REAL_SHARE || site.voltageDistortion() > REAL_DISTORTION;
         return band == ResonanceBand.DANGER && harmonicsAreReal ? Verdict.STOP : Verdict.LOOK_CLOSER;
     }
 

@@ -108,6 +108,13 @@ public record SiteData(
                 : OptionalDouble.empty();
     }
 
+    /** Measured voltage distortion, root of the sum of squares, a fraction of the fundamental; 0 if nobody measured. */
+    public double voltageDistortion() {
+        return Math.sqrt(harmonicVoltages.values().stream()
+                .mapToDouble(share -> share * share)
+                .sum());
+    }
+
     /** The load at its peak, absent unless demand and power factor are known. */
     public Optional<PowerTriangle> peak() {
         return peakKw.isPresent() && displacementPf.isPresent()

@@ -25,7 +25,8 @@ final class StepSizeScreen implements Screen {
 
     @Override
     public String settledBy() {
-        return "the network operator's rule on voltage changes, and interval data for the steps that the load asks for";
+        return "the network operator's rule on voltage changes, and interval data for the steps that the load "
+                + "asks for";
     }
 
     @Override

@@ -26,7 +26,8 @@ final class StoredEnergyScreen implements Screen {
 
     @Override
     public String source() {
-        return "NEC (NFPA 70) 460.6 as quoted in EC&M; IEC 60831-1:2014 (from memory); Oregon OAR 437-002-2322(1) for waiting, shorting and grounding";
+        return "NEC (NFPA 70) 460.6 as quoted in EC&M; IEC 60831-1:2014 (from memory); Oregon OAR "
+                + "437-002-2322(1) for waiting, shorting and grounding";
     }
 
     @Override

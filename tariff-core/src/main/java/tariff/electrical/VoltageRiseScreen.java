@@ -15,12 +15,14 @@ final class VoltageRiseScreen implements Screen {
 
     @Override
     public String limit() {
-        return "bus: look closer above 105 %, stop above 110 % of nominal; capacitors: 100 % continuously, 110 % for 8 h in 24 h";
+        return "bus: look closer above 105 %, stop above 110 % of nominal; capacitors: 100 % continuously, 110 "
+                + "% for 8 h in 24 h";
     }
 
     @Override
     public String source() {
-        return "IEC 60831-1:2014 and IEEE Std 18-2002 for capacitors; ANSI C84.1 and EN 50160 for the bus (from memory)";
+        return "IEC 60831-1:2014 and IEEE Std 18-2002 for capacitors; ANSI C84.1 and EN 50160 for the bus (from "
+                + "memory)";
     }
 
     @Override

@@ -163,7 +163,7 @@ class ResonanceTest {
         assertThatThrownBy(() -> Resonance.order(0, 100)).hasMessage("shortCircuitKva was 0.0; allowed: above 0 kVA");
         assertThatThrownBy(() -> Resonance.order(1000, -1)).hasMessage("capacitorKvar was -1.0; allowed: above 0 kvar");
         assertThatThrownBy(() -> Resonance.kvarTunedTo(1, 1000))
-                .hasMessage("order was 1.0; allowed: a whole number from 2");
+                .hasMessage("order was 1; allowed: a whole number from 2");
         assertThatThrownBy(() -> ShortCircuit.behindTransformerKva(1000, 0))
                 .hasMessage("impedancePercent was 0.0; allowed: above 0, up to 100 %");
     }

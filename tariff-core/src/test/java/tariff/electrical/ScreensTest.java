@@ -80,6 +80,15 @@ class ScreensTest {
                 .isEqualTo(verdict);
     }
 
+    @ParameterizedTest(name = "U5 {0}: {1}")
+    @CsvSource({"0.03, LOOK_CLOSER", "0.031, STOP"})
+    void measuredHarmonicsMakeAResonanceReal(double fifth, Verdict verdict) {
+        // common practice, no source: 3 % distortion
+        SiteData.Builder site = site().harmonicVoltages(Map.of(5, fifth));
+        assertThat(ask("parallel resonance", site, bank("340", 400, 0, FIXED)).verdict())
+                .isEqualTo(verdict);
+    }
+
     @Test
     void resonanceSaysWhichCombinationIsWorst() {
         assertThat(ask("parallel resonance", site(), bank("140 60", 400, 0, AUTOMATIC))
@@ -389,6 +398,23 @@ class ScreensTest {
                 .hasMessage("reactorP was 7.0; allowed: 0 (plain) to 0.25, so 0.07 for 7 %");
         assertThatThrownBy(() -> new Motor("pump", 0, OptionalDouble.empty(), 0))
                 .hasMessage("volts was 0.0; allowed: above 0 V");
+    }
+
+    @Test
+    void anAnswerWithoutWordsOrWithoutANumberIsRefused() {
+        assertThatThrownBy(() -> new Screening(
+                        "life", Verdict.FINE, "much", OptionalDouble.empty(), "times", " ", "own arithmetic", "time"))
+                .hasMessage("a screening needs every text; given: much");
+        assertThatThrownBy(() -> new Screening(
+                        "life",
+                        Verdict.FINE,
+                        "much",
+                        OptionalDouble.of(Double.NaN),
+                        "times",
+                        "1",
+                        "own arithmetic",
+                        "time"))
+                .hasMessage("life: value was NaN; allowed: a number, or none");
     }
 
     private static SiteData.Builder site() {
