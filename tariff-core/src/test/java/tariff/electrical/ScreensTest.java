@@ -24,6 +24,7 @@ class ScreensTest {
     private static final BankData PLAIN = BankData.of(List.of(25.0, 25.0, 50.0), 440, 0, AUTOMATIC, 0.5);
     private static final JavaClasses CLASSES = new ClassFileImporter()
             .withImportOption(new ImportOption.DoNotIncludeTests())
+            .withImportOption(new ImportOption.DoNotIncludeJars())
             .importPackages("tariff.electrical");
 
     @Test
