@@ -55,7 +55,7 @@ record Body(List<BilledLine> months, List<Integer> totals, List<String> skipped,
             skip(sheet, line, "it repeats the names");
         } else if (TotalsWords.begin(first)
                 || TotalsWords.begin(written)
-                || !periods.hasYear() && TotalsWords.isBareYear(written)) {
+                || (!periods.hasYear() && TotalsWords.isBareYear(written))) {
             totals.add(line);
             skip(sheet, line, "it is a total or an average (" + first + ")");
         } else if (!figures) {

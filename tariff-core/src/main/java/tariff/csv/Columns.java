@@ -75,7 +75,7 @@ record Columns(Header header, List<Finding> findings) {
         boolean month = date(header, Meaning.When.MONTH).isPresent();
         boolean from = date(header, Meaning.When.FROM).isPresent();
         boolean to = date(header, Meaning.When.TO).isPresent();
-        return month || from && to
+        return month || (from && to)
                 ? List.of()
                 : List.of(Finding.error(
                                 "no-period",

@@ -120,7 +120,7 @@ final class HeadingReader {
                     "it says energy, yet " + unit.unit().symbol() + " is a unit of demand; write "
                             + unit.unit().symbol() + "h if energy is meant");
         }
-        if (parsed.window().isEmpty() && (parsed.says(Word.PART_OF_DAY) || energy && parsed.says(Word.PEAK))) {
+        if (parsed.window().isEmpty() && (parsed.says(Word.PART_OF_DAY) || (energy && parsed.says(Word.PEAK)))) {
             return Heading.doubtful(name, "it names a part of the day that is no window of the rate");
         }
         if (parsed.window().isPresent()
@@ -144,7 +144,7 @@ final class HeadingReader {
     private static Optional<Register> register(Unit unit, Parsed parsed) {
         boolean leading = parsed.says(Word.LEADING);
         boolean export = parsed.says(Word.EXPORT);
-        if (leading && parsed.says(Word.LAGGING) || export && unit != Unit.KWH) {
+        if ((leading && parsed.says(Word.LAGGING)) || (export && unit != Unit.KWH)) {
             return Optional.empty();
         }
         return Optional.of(
@@ -168,8 +168,7 @@ final class HeadingReader {
                             "is read as " + register.words() + "; nothing is made of \""
                                     + String.join(" ", parsed.rest()) + "\" in its name");
         }
-        if (register.isPeak() && parsed.says(Word.BILLED) && !parsed.says(Word.DEMAND) && !parsed.says(Word.PEAK)
-                || register.isPeak() && parsed.says(Word.BILLED) && !saysHighest(name)) {
+        if (register.isPeak() && parsed.says(Word.BILLED) && !saysHighest(name)) {
             return heading.rank(1)
                     .remark(
                             "billed-demand",

@@ -5,7 +5,6 @@ import java.math.BigDecimal;
 import java.time.LocalDate;
 import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
@@ -105,10 +104,7 @@ record MonthReader(Header header, DateOrder order, NumberReading numbers, List<F
     }
 
     private boolean estimated(Cell cell) {
-        String word = NumberCell.isAbsent(cell.text())
-                        && !cell.text().toLowerCase(Locale.ROOT).equals("x")
-                ? ""
-                : Words.plain(cell.text());
+        String word = NumberCell.isAbsent(cell.text()) ? "" : Words.plain(cell.text());
         if (!YES.contains(word) && !NO.contains(word)) {
             findings.add(cell.error("not-yes-or-no", "does not say whether a reading was estimated")
                     .allowed("yes or no"));

@@ -31,14 +31,14 @@ final class NamedDate {
         int at = tokens.indexOf(names.get(0));
         String first = numbers.get(0);
         if (numbers.size() == 1) {
-            boolean isYear = first.length() == 4 || first.length() == 2 && at == 0;
+            boolean isYear = first.length() == 4 || (first.length() == 2 && at == 0);
             return isYear ? DateCell.of(YearMonth.of(DateCell.year(first), month)) : DateCell.NOTHING;
         }
         String last = numbers.get(1);
         if (first.length() == 4 && at == 1 && last.length() <= 2) {
             return DateCell.day(LocalDate.of(DateCell.year(first), month, Integer.parseInt(last)));
         }
-        boolean dayThenYear = first.length() <= 2 && (last.length() == 4 || last.length() == 2 && at == 1) && at <= 1;
+        boolean dayThenYear = first.length() <= 2 && (last.length() == 4 || (last.length() == 2 && at == 1)) && at <= 1;
         return dayThenYear
                 ? DateCell.day(LocalDate.of(DateCell.year(last), month, Integer.parseInt(first)))
                 : DateCell.NOTHING;

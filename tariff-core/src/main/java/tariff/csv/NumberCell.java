@@ -21,9 +21,9 @@ record NumberCell(Optional<BigDecimal> point, Optional<BigDecimal> comma, Option
     private static final int LARGEST_EXPONENT = 12;
     private static final Set<String> ABSENT = Set.of(
             "", "-", "–", "—", "--", "---", "n/a", "na", "n.a.", "n.a", "n/d", "nd", "n.d.", "k.a.", "s/d", "#n/a",
-            "#nv", "null", "none", "nil", "?", ".", "x");
+            "#nv", "null", "none", "nil", "?");
     private static final Pattern SHAPE =
-            Pattern.compile("(?<open>\\()?(?<sign>[-+−])?\\s*(?<before>[\\p{Sc}\\p{L}.]*)\\s*"
+            Pattern.compile("(?<open>\\()?(?<sign>[-+−])?\\s*(?<before>(?:\\p{L}+\\.?)?\\p{Sc}?)\\s*"
                     + "(?<sign2>[-+−])?\\s*(?<digits>[.,]?[0-9](?:[0-9.,' ]*[0-9])?)(?<exponent>[eE][+-]?[0-9]{1,3})?"
                     + "\\s*(?<after>%|[\\p{Sc}\\p{L}]*)(?<sign3>[-−])?(?<close>\\))?");
 

@@ -9,19 +9,19 @@ final class UnitlessHeading {
 
     static Heading of(String name, Parsed parsed) {
         if (parsed.says(Word.DEMAND)
-                || parsed.says(Word.PEAK) && parsed.window().isEmpty()) {
+                || (parsed.says(Word.PEAK) && parsed.window().isEmpty())) {
             return parsed.rest().isEmpty()
                     ? Heading.doubtful(name, "it does not say whether kW, kVA or kvar; write the unit into the name")
                     : Heading.ignored(name, "not known");
         }
         boolean reactive = parsed.says(Word.REACTIVE) || parsed.says(Word.LAGGING) || parsed.says(Word.LEADING);
-        if (!parsed.rest().isEmpty() || !reactive && !parsed.says(Word.ENERGY)) {
+        if (!parsed.rest().isEmpty() || (!reactive && !parsed.says(Word.ENERGY))) {
             return Heading.ignored(name, "not known");
         }
         if (parsed.says(Word.PART_OF_DAY)) {
             return Heading.doubtful(name, "it names a part of the day that is no window of the rate");
         }
-        if (parsed.says(Word.EXPORT) || parsed.says(Word.LAGGING) && parsed.says(Word.LEADING)) {
+        if (parsed.says(Word.EXPORT) || (parsed.says(Word.LAGGING) && parsed.says(Word.LEADING))) {
             return Heading.doubtful(name, "it does not say which way the energy flows; write the unit into the name");
         }
         Register register = !reactive

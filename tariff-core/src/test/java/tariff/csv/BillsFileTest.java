@@ -24,22 +24,30 @@ class BillsFileTest {
                 Jan 2026,120000,80000,410.5,0.83,cold
                 Feb 2026,110000,70000,400,0.84,
                 """);
-        assertThat(read.months()).containsExactly(
-                MeteredMonth.of("2026-01").with(Register.ENERGY_KWH, 120000).with(Register.LAGGING_KVARH, 80000)
-                        .with(Register.PEAK_KW, "410.5").with(Register.POWER_FACTOR, "0.83"),
-                MeteredMonth.of("2026-02").with(Register.ENERGY_KWH, 110000).with(Register.LAGGING_KVARH, 70000)
-                        .with(Register.PEAK_KW, 400).with(Register.POWER_FACTOR, "0.84"));
-        assertThat(read.understood()).containsExactly(
-                "Encoding: UTF-8",
-                "Separator: comma",
-                "Decimal mark: point, shown by 410.5 in row 2, column D (Peak kW)",
-                "Names: in row 1, one month a row",
-                "Column A (Month): the month billed",
-                "Column B (Energy (kWh)): kWh",
-                "Column C (Reactive kvarh): lagging kvarh",
-                "Column D (Peak kW): kW",
-                "Column E (Power factor): power factor",
-                "Column F (Remarks): ignored, not known");
+        assertThat(read.months())
+                .containsExactly(
+                        MeteredMonth.of("2026-01")
+                                .with(Register.ENERGY_KWH, 120000)
+                                .with(Register.LAGGING_KVARH, 80000)
+                                .with(Register.PEAK_KW, "410.5")
+                                .with(Register.POWER_FACTOR, "0.83"),
+                        MeteredMonth.of("2026-02")
+                                .with(Register.ENERGY_KWH, 110000)
+                                .with(Register.LAGGING_KVARH, 70000)
+                                .with(Register.PEAK_KW, 400)
+                                .with(Register.POWER_FACTOR, "0.84"));
+        assertThat(read.understood())
+                .containsExactly(
+                        "Encoding: UTF-8",
+                        "Separator: comma",
+                        "Decimal mark: point, shown by 410.5 in row 2, column D (Peak kW)",
+                        "Names: in row 1, one month a row",
+                        "Column A (Month): the month billed",
+                        "Column B (Energy (kWh)): kWh",
+                        "Column C (Reactive kvarh): lagging kvarh",
+                        "Column D (Peak kW): kW",
+                        "Column E (Power factor): power factor",
+                        "Column F (Remarks): ignored, not known");
         assertThat(read.warnings()).isEmpty();
     }
 
@@ -60,13 +68,14 @@ class BillsFileTest {
         assertThat(march.totals().get(Register.LAGGING_KVARH)).contains(new BigDecimal("800000"));
         assertThat(march.totals().get(Register.PEAK_KW)).contains(new BigDecimal("2100.5"));
         assertThat(march.charged().total()).contains(new BigDecimal("123456.78"));
-        assertThat(read.understood()).contains(
-                "Separator: semicolon",
-                "Decimal mark: comma, shown by 1.234,5 in row 5, column B (Wirkarbeit (MWh))",
-                "Names: in row 3, units below them, one month a row",
-                "Column B (Wirkarbeit (MWh)): kWh, × 1000",
-                "Row 1: left out, it stands above the names",
-                "Row 7: left out, it is a total or an average (Summe)");
+        assertThat(read.understood())
+                .contains(
+                        "Separator: semicolon",
+                        "Decimal mark: comma, shown by 1.234,5 in row 5, column B (Wirkarbeit (MWh))",
+                        "Names: in row 3, units below them, one month a row",
+                        "Column B (Wirkarbeit (MWh)): kWh, × 1000",
+                        "Row 1: left out, it stands above the names",
+                        "Row 7: left out, it is a total or an average (Summe)");
     }
 
     @Test
@@ -79,12 +88,13 @@ class BillsFileTest {
         assertThat(read.months()).hasSize(3);
         assertThat(read.months().get(2).totals().get(Register.ENERGY_KWH)).contains(new BigDecimal("3000.5"));
         assertThat(read.months().get(2).totals().has(Register.LAGGING_KVARH)).isFalse();
-        assertThat(read.understood()).contains(
-                "Separator: tab",
-                "Names: in column A, one month a column",
-                "Row 1 (Site A): the month billed",
-                "Row 2 (kWh): kWh",
-                "Column E: left out, it is a total or an average (Total)");
+        assertThat(read.understood())
+                .contains(
+                        "Separator: tab",
+                        "Names: in column A, one month a column",
+                        "Row 1 (Site A): the month billed",
+                        "Row 2 (kWh): kWh",
+                        "Column E: left out, it is a total or an average (Total)");
     }
 
     @Test
@@ -97,23 +107,27 @@ class BillsFileTest {
     @Test
     void readingDaysGivenAsEndOfOnePeriodAndStartOfTheNext() {
         BillsRead read = read("From,To,kWh\n2026-01-05,2026-02-04,1\n2026-02-04,2026-03-05,2\n");
-        assertThat(read.months()).extracting(month -> month.period().toString())
+        assertThat(read.months())
+                .extracting(month -> month.period().toString())
                 .containsExactly("2026-01-05 to 2026-02-03", "2026-02-04 to 2026-03-04");
-        assertThat(read.understood()).contains(
-                "Periods: each ends on the day the next begins, so the end is a day of meter reading and the last day billed is"
-                        + " the day before");
+        assertThat(read.understood())
+                .contains(
+                        "Periods: each ends on the day the next begins, so the end is a day of meter reading and the last day billed is"
+                                + " the day before");
     }
 
     @Test
     void periodsInOneCell() {
-        assertThat(read("Billing period;kWh\n01.01.2026 - 31.01.2026;5\n01.02.2026 – 28.02.2026;6\n").months())
+        assertThat(read("Billing period;kWh\n01.01.2026 - 31.01.2026;5\n01.02.2026 – 28.02.2026;6\n")
+                        .months())
                 .extracting(month -> month.period().toString())
                 .containsExactly("2026-01", "2026-02");
     }
 
     @Test
     void yearAndMonthInColumnsOfTheirOwn() {
-        assertThat(read("Year,Month,kWh\n2025,12,5\n2026,1,6\n2026,Feb,7\nTotal,,18\n").months())
+        assertThat(read("Year,Month,kWh\n2025,12,5\n2026,1,6\n2026,Feb,7\nTotal,,18\n")
+                        .months())
                 .extracting(month -> month.period().toString())
                 .containsExactly("2025-12", "2026-01", "2026-02");
     }
@@ -137,14 +151,17 @@ class BillsFileTest {
     void aWindowThatTheRateDoesNotNameIsNotReadAsTheWholeMonth() {
         BillsRead read = read("Month,kWh,kWh night\n2026-01,100,30\n");
         assertThat(read.months()).containsExactly(MeteredMonth.of("2026-01").with(Register.ENERGY_KWH, 100));
-        assertThat(read.warnings()).extracting(Object::toString).containsExactly(
-                "column C (kWh night): is not used: it names a part of the day that is no window of the rate");
+        assertThat(read.warnings())
+                .extracting(Object::toString)
+                .containsExactly(
+                        "column C (kWh night): is not used: it names a part of the day that is no window of the rate");
     }
 
     @Test
     void peakKwBesideAWindowCalledPeakIsAsked() {
         assertThatThrownBy(() -> BillsFile.read(
-                        bytes("Month,kWh,Peak kW\n2026-01,100,30\n"), ReadingChoices.none().windows("peak", "off-peak")))
+                        bytes("Month,kWh,Peak kW\n2026-01,100,30\n"),
+                        ReadingChoices.none().windows("peak", "off-peak")))
                 .isInstanceOf(Refusal.class)
                 .hasMessage("column C (Peak kW): may be the month's highest kW or the one in the window \"peak\"; "
                         + "write \"Max kW\" or \"Max kW peak\"");
@@ -154,8 +171,10 @@ class BillsFileTest {
     void energyInTwoUnitsIsReadFromTheFiner() {
         BillsRead read = read("Month,MWh,kWh\n2026-01,0.1,100\n");
         assertThat(read.months()).containsExactly(MeteredMonth.of("2026-01").with(Register.ENERGY_KWH, 100));
-        assertThat(read.warnings()).extracting(Object::toString).containsExactly(
-                "column B (MWh): is not used: column C (kWh) gives the same; the two were not compared");
+        assertThat(read.warnings())
+                .extracting(Object::toString)
+                .containsExactly(
+                        "column B (MWh): is not used: column C (kWh) gives the same; the two were not compared");
     }
 
     @Test
@@ -164,7 +183,10 @@ class BillsFileTest {
         assertThat(read.months())
                 .extracting(month -> month.totals().get(Register.POWER_FACTOR).orElseThrow())
                 .containsExactly(
-                        new BigDecimal("0.87"), new BigDecimal("0.87"), new BigDecimal("0.87"), new BigDecimal("1.000"));
+                        new BigDecimal("0.87"),
+                        new BigDecimal("0.87"),
+                        new BigDecimal("0.87"),
+                        new BigDecimal("1.000"));
     }
 
     @Test
@@ -180,17 +202,20 @@ class BillsFileTest {
                 Checked by the boiler house,
                 """);
         assertThat(read.months()).hasSize(1);
-        assertThat(read.understood()).containsSequence(
-                "Row 1: left out, it stands above the names",
-                "Row 5: left out, it is a comment",
-                "Row 6: left out, it has no figures",
-                "Row 7: left out, it is a total or an average (2026)",
-                "Row 8: left out, it has no figures");
+        assertThat(read.understood())
+                .containsSequence(
+                        "Row 1: left out, it stands above the names",
+                        "Row 5: left out, it is a comment",
+                        "Row 6: left out, it has no figures",
+                        "Row 7: left out, it is a total or an average (2026)",
+                        "Row 8: left out, it has no figures");
     }
 
     @Test
     void estimatesAndStatementDates() {
-        MeteredMonth month = read("Month,kWh,Estimated,Statement date\n2026-01,5,yes,2026-02-03\n").months().get(0);
+        MeteredMonth month = read("Month,kWh,Estimated,Statement date\n2026-01,5,yes,2026-02-03\n")
+                .months()
+                .get(0);
         assertThat(month.estimated()).isTrue();
         assertThat(month.statementDate()).contains(java.time.LocalDate.of(2026, 2, 3));
     }
@@ -198,14 +223,16 @@ class BillsFileTest {
     @Test
     void namesWithLineBreaksAndTheCornerLeftEmpty() {
         BillsRead read = read(",\"Energy\n(kWh)\",\"Max demand\nkVA\"\nJan 2026,5,6\nFeb 2026,5,6\n");
-        assertThat(read.months().get(0)).isEqualTo(
-                MeteredMonth.of("2026-01").with(Register.ENERGY_KWH, 5).with(Register.PEAK_KVA, 6));
+        assertThat(read.months().get(0))
+                .isEqualTo(
+                        MeteredMonth.of("2026-01").with(Register.ENERGY_KWH, 5).with(Register.PEAK_KVA, 6));
     }
 
     @Test
     void everyEncodingGivesTheSameMonths() {
         String text = "Mois;Énergie active (kWh);Énergie réactive (kvarh)\njanvier 2026;1 234,5;12\nfévrier 2026;7;8\n";
-        List<MeteredMonth> expected = BillsFile.read(text.getBytes(StandardCharsets.UTF_8), ReadingChoices.none()).months();
+        List<MeteredMonth> expected = BillsFile.read(text.getBytes(StandardCharsets.UTF_8), ReadingChoices.none())
+                .months();
         assertThat(expected).hasSize(2);
         for (byte[] bytes : List.of(
                 ("\ufeff" + text).getBytes(StandardCharsets.UTF_8),
