@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.csv;
 
+import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -105,7 +106,7 @@ record Columns(Header header, List<Finding> findings) {
     private static String said(Heading heading) {
         Meaning meaning = heading.meaning();
         if (meaning instanceof Meaning.Reading reading) {
-            String factor = heading.factor().compareTo(java.math.BigDecimal.ONE) == 0
+            String factor = heading.factor().compareTo(BigDecimal.ONE) == 0
                     ? ""
                     : ", × " + heading.factor().toPlainString();
             return reading.register().words()

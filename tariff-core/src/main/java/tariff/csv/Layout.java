@@ -45,6 +45,12 @@ record Layout(String separator, Header header) {
                 }
             }
         }
+        if (best.isEmpty()
+                && SEPARATORS.stream().allMatch(each -> split(body, each.mark).isEmpty())) {
+            throw new Refusal(Finding.error(
+                            "quotes", "", "a quotation mark opens a cell and does not close it, or text follows it")
+                    .allowed("quotation marks around whole cells, doubled inside them"));
+        }
         return best.orElseThrow(() -> new Refusal(Finding.error(
                         "no-header",
                         "",

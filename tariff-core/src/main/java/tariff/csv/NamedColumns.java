@@ -4,6 +4,7 @@ package tariff.csv;
 import java.util.Collections;
 import java.util.HashMap;
 import java.util.Map;
+import java.util.Optional;
 import tariff.meter.Register;
 
 /** Headings known by the whole name: dates, the bill's amount, the mark of an estimate, and the registers' own names. */
@@ -64,7 +65,7 @@ final class NamedColumns {
                 0,
                 "total|total charged|total amount|total bill|bill total|total cost|total charges"
                         + "|total due|invoice total|total invoice|grand total|gesamt|gesamtbetrag|rechnungsbetrag|summe"
-                        + "|total facture|montant total|total ttc|importe total|total factura|valor total|total da fatura"
+                        + "|total facture|montant total|montant ttc|total ttc|importe total|total factura|valor total|total da fatura"
                         + "|total fatura|totale|importo totale|totale fattura|totale bolletta");
         put(
                 all,
@@ -74,7 +75,7 @@ final class NamedColumns {
                         + "|invoice|invoice amount|cost|net amount|total excl vat|total before tax|total ht|betrag|rechnung"
                         + "|kosten|montant|facture|montant facture|importe|factura|valor|fatura|importo|fattura|bolletta");
         for (Register register : Register.values()) {
-            put(all, new Meaning.Reading(register, java.util.Optional.empty()), 0, Words.plain(register.key()));
+            put(all, new Meaning.Reading(register, Optional.empty()), 0, Words.plain(register.key()));
         }
         return Collections.unmodifiableMap(all);
     }

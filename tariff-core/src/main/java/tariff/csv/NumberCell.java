@@ -7,6 +7,7 @@ import java.util.Optional;
 import java.util.Set;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import org.jspecify.annotations.Nullable;
 
 /**
  * What one cell can mean as a number: one value for each decimal mark, equal if the mark does not matter.
@@ -121,7 +122,7 @@ record NumberCell(Optional<BigDecimal> point, Optional<BigDecimal> comma, Option
         return minuses == 1 ? value.map(BigDecimal::negate) : value;
     }
 
-    private static boolean isMinus(@org.jspecify.annotations.Nullable String sign) {
+    private static boolean isMinus(@Nullable String sign) {
         return sign != null && !sign.equals("+");
     }
 

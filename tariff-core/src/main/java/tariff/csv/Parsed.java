@@ -2,6 +2,7 @@
 package tariff.csv;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.EnumSet;
 import java.util.List;
 import java.util.Map;
@@ -48,7 +49,7 @@ record Parsed(Set<Word> words, List<UnitWord> units, Optional<String> window, Li
     }
 
     private static boolean cut(List<String> tokens, List<String> phrase) {
-        int at = java.util.Collections.indexOfSubList(tokens, phrase);
+        int at = Collections.indexOfSubList(tokens, phrase);
         if (at < 0) {
             return false;
         }

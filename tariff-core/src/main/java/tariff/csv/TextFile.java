@@ -21,17 +21,26 @@ record TextFile(String text, String encoding) {
 
     static TextFile of(byte[] bytes) {
         if (bytes.length > MOST_BYTES) {
-            throw refuse("file-too-large", "is larger than a bills file can be")
-                    .apply(bytes.length + " bytes", "at most " + MOST_BYTES + " bytes");
+            throw refuse(
+                    "file-too-large",
+                    "is larger than a bills file can be",
+                    bytes.length + " bytes",
+                    "at most " + MOST_BYTES + " bytes");
         }
         if (starts(bytes, 'P', 'K', 3, 4) || starts(bytes, 0xD0, 0xCF, 0x11, 0xE0)) {
-            throw refuse("not-text", "is a workbook, not a text file")
-                    .apply("a workbook", "the sheet saved as CSV or tab-separated text");
+            throw refuse(
+                    "not-text",
+                    "is a workbook, not a text file",
+                    "a workbook",
+                    "the sheet saved as CSV or tab-separated text");
         }
         TextFile file = decode(bytes);
         if (file.text.indexOf('\0') >= 0) {
-            throw refuse("not-text", "is not a text file")
-                    .apply("zero characters", "the sheet saved as CSV or tab-separated text");
+            throw refuse(
+                    "not-text",
+                    "is not a text file",
+                    "zero characters",
+                    "the sheet saved as CSV or tab-separated text");
         }
         return file;
     }
@@ -54,8 +63,11 @@ record TextFile(String text, String encoding) {
 
     private static TextFile marked(byte[] bytes, int from, Charset charset, String name) {
         String text = strictly(Arrays.copyOfRange(bytes, from, bytes.length), charset)
-                .orElseThrow(() -> refuse("not-text", "begins like " + charset.name() + " but is not")
-                        .apply("bytes that are no text", "the sheet saved again as UTF-8"));
+                .orElseThrow(() -> refuse(
+                        "not-text",
+                        "begins like " + charset.name() + " but is not",
+                        "bytes that are no text",
+                        "the sheet saved again as UTF-8"));
         return new TextFile(text, name);
     }
 
@@ -80,8 +92,8 @@ record TextFile(String text, String encoding) {
         return true;
     }
 
-    private static java.util.function.BiFunction<String, String, Refusal> refuse(String code, String message) {
-        return (found, allowed) -> new Refusal(
+    private static Refusal refuse(String code, String message, String found, String allowed) {
+        return new Refusal(
                 Finding.error(code, "", "the file " + message).found(found).allowed(allowed));
     }
 }

@@ -82,7 +82,7 @@ class HeadingsTest {
             Total charged                    | total
             Total €                          | total
             Rechnungsbetrag                  | total
-            Montant TTC                      | ignored
+            Montant TTC                      | total
             Contract demand kW               | ignored
             EUR/kWh                          | ignored
             Price per kWh                    | ignored

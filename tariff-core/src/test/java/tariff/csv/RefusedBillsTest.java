@@ -126,6 +126,23 @@ class RefusedBillsTest {
     }
 
     @Test
+    void aQuotationMarkThatIsNeverClosed() {
+        refused(
+                "\"Month\"x,kWh\n2026-01,5\n",
+                "a quotation mark opens a cell and does not close it, or text follows it; allowed: quotation marks around whole"
+                        + " cells, doubled inside them");
+    }
+
+    @Test
+    void bothDecimalMarksProvenLeavesTheUnclearCellsOpen() {
+        refused(
+                "Month;kWh;kW\n2026-01;1,234;10.5\n2026-02;7;10,5\n",
+                "row 3, column C (kW): is written with a decimal comma, while 10.5 in row 2, column C (kW) is written with a point\n"
+                        + "row 2, column B (kWh): may be 1234 or 1.234, and nothing in the file tells which; found 1,234; allowed:"
+                        + " decimal = comma | point");
+    }
+
+    @Test
     void namesWithoutMonths() {
         refused("Month,kWh\n", "row 1: names the columns, but no month with figures follows");
     }
@@ -133,9 +150,9 @@ class RefusedBillsTest {
     @Test
     void decimalCommasBetweenCommas() {
         refused(
-                "Month,kWh,PF\n2026-01,1234,5,0,95\n",
+                "Month,kWh,kW\n2026-01,1234,5,40,5\n",
                 "row 2, column D: stands beyond the last name; if figures have decimal commas, put them in quotes or separate the"
-                        + " columns by semicolons; found 0");
+                        + " columns by semicolons; found 40");
     }
 
     @Test
