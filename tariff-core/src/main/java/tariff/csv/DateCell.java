@@ -25,7 +25,7 @@ record DateCell(Optional<LocalDate> dayFirst, Optional<LocalDate> monthFirst, Op
     private static final Pattern MONTH_YEAR = Pattern.compile("(\\d{1,2})[-/.]((?:19|20)\\d\\d)");
 
     static DateCell of(String text) {
-        if (text.length() > LONGEST) {
+        if (text.length() > LONGEST || text.chars().noneMatch(Character::isDigit)) {
             return NOTHING;
         }
         String plain = TIME.matcher(Words.plain(text).strip()).replaceFirst("");

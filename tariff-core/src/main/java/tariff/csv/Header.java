@@ -14,12 +14,15 @@ import java.util.Optional;
  */
 record Header(Sheet sheet, int line, boolean unitsBelow, List<Heading> headings) {
     private static final int LINES_SEARCHED = 40;
+    private static final int MOST_NAMES = 500;
+    private static final int CORNERS_SEARCHED = 3;
 
     /** The line that names the most; the months may run down or across. Empty if no line names a date and a figure. */
     static Optional<Header> find(Sheet sheet, HeadingReader reader) {
         Optional<Header> best = Optional.empty();
         for (Sheet each : List.of(sheet, sheet.turned())) {
-            for (int line = 0; line < Math.min(LINES_SEARCHED, each.lines()); line++) {
+            int searched = each.columns() > MOST_NAMES ? 0 : Math.min(LINES_SEARCHED, each.lines());
+            for (int line = 0; line < searched; line++) {
                 Header header = read(each, line, reader);
                 if (header.isEnough()
                         && header.score() > best.map(Header::score).orElse(0)) {
@@ -49,9 +52,11 @@ record Header(Sheet sheet, int line, boolean unitsBelow, List<Heading> headings)
     }
 
     private boolean isEnough() {
-        boolean figure = headings.stream().anyMatch(heading -> heading.meaning() instanceof Meaning.Reading);
-        boolean date = headings.stream().anyMatch(heading -> heading.meaning() instanceof Meaning.Date);
-        return figure && date;
+        return names(Meaning.Reading.class) && names(Meaning.Date.class);
+    }
+
+    private boolean names(Class<? extends Meaning> kind) {
+        return headings.stream().anyMatch(heading -> kind.isInstance(heading.meaning()));
     }
 
     private static Header read(Sheet sheet, int line, HeadingReader reader) {
@@ -61,12 +66,14 @@ record Header(Sheet sheet, int line, boolean unitsBelow, List<Heading> headings)
             headings.add(reader.read(sheet.cell(line, column), units ? sheet.cell(line + 1, column) : ""));
         }
         Header header = new Header(sheet, line, units, headings);
-        return header.isEnough() ? header : header.withUnnamedMonths();
+        return header.names(Meaning.Reading.class) && !header.names(Meaning.Date.class)
+                ? header.withUnnamedMonths()
+                : header;
     }
 
     /** People leave the corner above their months empty. */
     private Header withUnnamedMonths() {
-        for (int column = 0; column < headings.size(); column++) {
+        for (int column = 0; column < Math.min(CORNERS_SEARCHED, headings.size()); column++) {
             if (!headings.get(column).meaning().isUsed() && holdsMonths(column)) {
                 List<Heading> named = new ArrayList<>(headings);
                 named.set(column, Heading.of(headings.get(column).name(), new Meaning.Date(Meaning.When.MONTH)));
@@ -79,7 +86,7 @@ record Header(Sheet sheet, int line, boolean unitsBelow, List<Heading> headings)
     private boolean holdsMonths(int column) {
         int months = 0;
         int others = 0;
-        for (int below = firstBodyLine(); below < sheet.lines(); below++) {
+        for (int below = firstBodyLine(); below < Math.min(sheet.lines(), firstBodyLine() + LINES_SEARCHED); below++) {
             String cell = sheet.cell(below, column);
             if (PeriodText.looksLikeOne(cell)) {
                 months++;

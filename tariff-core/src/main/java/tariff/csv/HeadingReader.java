@@ -1,19 +1,25 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.csv;
 
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.regex.Pattern;
 import tariff.meter.Register;
 import tariff.meter.Unit;
 
-/** What a heading means: by its whole name if that is known, else by its unit and the words beside it. */
+/**
+ * What a heading means: by its whole name if that is known, else by its unit and the words beside it. Names are remembered,
+ * since the search for the header meets the same ones often.
+ */
 final class HeadingReader {
     private static final int LONGEST_NAME = 120;
     private static final Pattern PER_UNIT = Pattern.compile(
             "(/|\\bper\\b|\\bpro\\b|\\bje\\b|\\bpor\\b|\\bpar\\b)\\s*([kmg]?(wh|varh|vah|w|var|va)|day|tag|jour|dia|giorno|hour)\\b");
     private static final Pattern IN_BRACKETS = Pattern.compile("[(\\[][^)\\]]*[)\\]]");
     private final ReadingChoices choices;
+    private final Map<String, Heading> known = new HashMap<>();
 
     HeadingReader(ReadingChoices choices) {
         this.choices = choices;
@@ -24,6 +30,10 @@ final class HeadingReader {
         String full = unitBelow.isEmpty() || Words.of(name).containsAll(Words.of(unitBelow))
                 ? name
                 : name + " (" + unitBelow + ")";
+        return known.computeIfAbsent(full, this::read);
+    }
+
+    private Heading read(String full) {
         String shown = full.replaceAll("\\s+", " ").strip();
         if (shown.isEmpty()) {
             return Heading.ignored("", "it has no name");

@@ -22,7 +22,7 @@ record PeriodText(List<DateCell> cells) {
     /** A cell that holds a month, one day, or two days with a dash or a word between. */
     static PeriodText of(String text) {
         DateCell whole = DateCell.of(text);
-        if (!whole.isNothing() || text.length() > 80) {
+        if (!whole.isNothing() || text.length() > 80 || text.chars().noneMatch(Character::isDigit)) {
             return new PeriodText(List.of(whole));
         }
         Matcher between = BETWEEN.matcher(text);
