@@ -4,6 +4,7 @@ package tariff.csv;
 import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import tariff.csv.PeriodReading.Billed;
 import tariff.meter.Period;
 import tariff.notice.Finding;
@@ -18,8 +19,8 @@ final class Sequence {
     /** @param sorted by date */
     static List<Finding> check(Sheet sheet, List<Billed> sorted) {
         List<Finding> findings = new ArrayList<>();
-        for (int i = 0; i < sorted.size(); i++) {
-            Billed each = sorted.get(i);
+        Optional<Billed> latest = Optional.empty();
+        for (Billed each : sorted) {
             int days = each.period().days();
             if (days < SHORTEST_DAYS || days > LONGEST_DAYS) {
                 findings.add(Finding.warning(
@@ -28,21 +29,13 @@ final class Sequence {
                                 "bills " + days + (days == 1 ? " day" : " days") + ", which is not a month")
                         .found(each.period().toString()));
             }
-            if (i > 0) {
-                compare(sheet, latest(sorted.subList(0, i)), each, findings);
-            }
+            latest.ifPresent(before -> compare(sheet, before, each, findings));
+            boolean endsLast = latest.filter(before ->
+                            before.period().last().isAfter(each.period().last()))
+                    .isEmpty();
+            latest = endsLast ? Optional.of(each) : latest;
         }
         return findings;
-    }
-
-    private static Billed latest(List<Billed> earlier) {
-        Billed latest = earlier.get(0);
-        for (Billed each : earlier) {
-            if (!each.period().last().isBefore(latest.period().last())) {
-                latest = each;
-            }
-        }
-        return latest;
     }
 
     private static void compare(Sheet sheet, Billed before, Billed next, List<Finding> findings) {

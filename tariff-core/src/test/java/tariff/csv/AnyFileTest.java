@@ -33,11 +33,11 @@ class AnyFileTest {
     @Test
     void damagedFilesAreReadOrRefusedNeverCrashed() {
         int refused = 0;
-        for (long seed = 0; seed < 1500; seed++) {
+        for (long seed = 0; seed < 500; seed++) {
             Random random = new Random(seed);
             refused += isRefused(WrittenYear.of(seed % 100).damaged(random)) ? 1 : 0;
         }
-        assertThat(refused).isBetween(100, 1499);
+        assertThat(refused).isBetween(50, 499);
     }
 
     @Test
@@ -86,7 +86,7 @@ class AnyFileTest {
                 "İ",
                 "\ud83d\ude00",
                 "=1+1");
-        for (long seed = 0; seed < 3000; seed++) {
+        for (long seed = 0; seed < 800; seed++) {
             Random random = new Random(seed);
             StringBuilder text = new StringBuilder("Month,kWh,From,To,PF\n".repeat(random.nextInt(2)));
             for (int i = random.nextInt(60); i > 0; i--) {
