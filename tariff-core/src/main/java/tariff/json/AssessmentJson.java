@@ -103,10 +103,9 @@ public final class AssessmentJson {
     }
 
     private static void measure(JsonObject json, String key, Answer<BigDecimal> answer, int decimals) {
-        json.with(
-                key,
-                answer.fold(
-                        value -> new JsonObject().with("value", value.setScale(decimals, RoundingMode.HALF_UP)),
-                        reason -> new JsonObject().with("reason", reason)));
+        JsonObject either = answer.<JsonObject>fold(
+                value -> new JsonObject().with("value", value.setScale(decimals, RoundingMode.HALF_UP)),
+                reason -> new JsonObject().with("reason", reason));
+        json.with(key, either);
     }
 }

@@ -28,10 +28,9 @@ record Assessments(Shelf shelf) implements Question {
         Optional<InvestmentTerms> investment = request.investment();
         OutlookTerms outlook = request.outlook();
         request.refuseIfWrong();
-        Proposal proposal = new Proposal(
-                bank.orElseThrow().bank(), investment.map(InvestmentTerms::investment), outlook.outlook());
+        Proposal proposal =
+                new Proposal(bank.orElseThrow().bank(), investment.map(InvestmentTerms::investment), outlook.outlook());
         Billing billing = new Billing(rate.orElseThrow(), bills.orElseThrow().site());
-        return AssessmentJson.write(
-                Assessment.of(billing, bills.orElseThrow().months(), proposal));
+        return AssessmentJson.write(Assessment.of(billing, bills.orElseThrow().months(), proposal));
     }
 }

@@ -16,8 +16,10 @@ final class Body {
 
     static @Nullable Object read(Context ctx) throws IOException {
         String type = ctx.req().getContentType();
-        if (type == null || !type.split(";", 2)[0].strip().toLowerCase(Locale.ROOT).equals(Exchange.JSON)) {
-            throw new Problem(415, "The body must be application/json" + (type == null ? "; the request says no type." : "."));
+        if (type == null
+                || !type.split(";", 2)[0].strip().toLowerCase(Locale.ROOT).equals(Exchange.JSON)) {
+            throw new Problem(
+                    415, "The body must be application/json" + (type == null ? "; the request says no type." : "."));
         }
         byte[] body = ctx.bodyInputStream().readNBytes(MOST_BYTES + 1);
         if (body.length > MOST_BYTES) {
@@ -26,7 +28,8 @@ final class Body {
         try {
             return JsonTree.read(body);
         } catch (Refusal refusal) {
-            throw new Problem(400, "The body is not a JSON document that can be read; see findings.", refusal.findings());
+            throw new Problem(
+                    400, "The body is not a JSON document that can be read; see findings.", refusal.findings());
         }
     }
 }

@@ -14,6 +14,8 @@ record Health(Shelf shelf) implements Handler {
         Accepts.require(ctx, Exchange.JSON);
         Exchange.write(
                 ctx,
-                new JsonObject().with("status", "up").with("rates", shelf.rates().size()));
+                new JsonObject()
+                        .with("status", "up")
+                        .with("rates", shelf.rates().size()));
     }
 }

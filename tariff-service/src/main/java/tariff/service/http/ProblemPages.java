@@ -17,7 +17,12 @@ final class ProblemPages extends ErrorHandler {
         response.getHeaders().put(HttpHeader.CONTENT_TYPE, Problems.TYPE);
         response.write(
                 true,
-                ByteBuffer.wrap(Problems.json(problem, request.getHttpURI().getPath() == null ? "" : request.getHttpURI().getPath()).bytes()),
+                ByteBuffer.wrap(Problems.json(
+                                problem,
+                                request.getHttpURI().getPath() == null
+                                        ? ""
+                                        : request.getHttpURI().getPath())
+                        .bytes()),
                 callback);
         return true;
     }

@@ -62,8 +62,6 @@ final class Problems {
             return json;
         }
         json.withAll("findings", findings.stream().limit(MOST_FINDINGS).toList(), NoticeJson::write);
-        return findings.size() > MOST_FINDINGS
-                ? json.with("findingsLeftOut", findings.size() - MOST_FINDINGS)
-                : json;
+        return findings.size() > MOST_FINDINGS ? json.with("findingsLeftOut", findings.size() - MOST_FINDINGS) : json;
     }
 }

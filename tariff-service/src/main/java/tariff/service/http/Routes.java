@@ -16,7 +16,8 @@ public final class Routes {
         return List.of(
                 new Route(GET, "/", Document.of("text/html", "/page/index.html")),
                 new Route(GET, "/openapi.json", Document.of("application/json", "/openapi/openapi.json")),
-                new Route(GET, "/schemas/rate.json", Document.of("application/schema+json", "/openapi/rate.schema.json")),
+                new Route(
+                        GET, "/schemas/rate.json", Document.of("application/schema+json", "/openapi/rate.schema.json")),
                 new Route(GET, "/health", new Health(shelf)),
                 new Route(GET, "/rates", rates::list),
                 new Route(GET, "/rates/{id}", rates::one),

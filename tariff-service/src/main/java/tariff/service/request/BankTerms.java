@@ -13,24 +13,29 @@ import tariff.rate.clause.Written;
 
 /** A bank as somebody offers it, with the ranges of {@link CapacitorBank} and bounds beyond any real one. */
 public record BankTerms(
-        @DecimalMin(value = "0", message = KVAR) @DecimalMax(value = MOST_KVAR, message = KVAR) BigDecimal fixedKvar,
+        @DecimalMin(value = "0", message = KVAR) @DecimalMax(value = MOST_KVAR, message = KVAR)
+        BigDecimal fixedKvar,
+
         @Size(max = 64, message = "at most 64 steps")
-                List<
-                                @DecimalMin(value = "0", inclusive = false, message = STEP)
-                                @DecimalMax(value = MOST_KVAR, message = STEP) BigDecimal>
-                        stepsKvar,
+        List<
+                        @DecimalMin(value = "0", inclusive = false, message = STEP)
+                        @DecimalMax(value = MOST_KVAR, message = STEP) BigDecimal>
+                stepsKvar,
+
         Optional<
-                        @DecimalMin(value = "0.5", message = "0.5 to 1")
-                        @DecimalMax(value = "1", message = "0.5 to 1") BigDecimal>
+                        @DecimalMin(value = "0.5", message = "0.5 to 1") @DecimalMax(value = "1", message = "0.5 to 1")
+                        BigDecimal>
                 targetPowerFactor,
         Optional<@DecimalMin(value = "50", message = VOLTS) @DecimalMax(value = MOST_VOLTS, message = VOLTS) BigDecimal>
                 ratedVolts,
         Optional<@DecimalMin(value = "50", message = VOLTS) @DecimalMax(value = MOST_VOLTS, message = VOLTS) BigDecimal>
                 serviceVolts,
+
         @DecimalMin(value = "0", message = "0 to 0.25") @DecimalMax(value = "0.25", message = "0 to 0.25")
-                BigDecimal reactorShare,
+        BigDecimal reactorShare,
+
         @DecimalMin(value = "0", message = "0 to 50") @DecimalMax(value = "50", message = "0 to 50")
-                BigDecimal wattsPerKvar) {
+        BigDecimal wattsPerKvar) {
     private static final String MOST_KVAR = "1000000";
     private static final String MOST_VOLTS = "1000000";
     private static final String KVAR = "0 to 1000000 kvar";

@@ -11,9 +11,10 @@ import java.util.List;
 import java.util.stream.Stream;
 import org.hibernate.validator.messageinterpolation.ParameterMessageInterpolator;
 import tariff.notice.Finding;
+import tariff.notice.Refusal;
 
 /** Findings from the ranges that a record declares on its components; a constraint's message says what is allowed. */
-final class Declared {
+public final class Declared {
     private static final Validator VALIDATOR = Validation.byDefaultProvider()
             .configure()
             .messageInterpolator(new ParameterMessageInterpolator())
@@ -21,6 +22,19 @@ final class Declared {
             .getValidator();
 
     private Declared() {}
+
+    /**
+     * The terms themselves.
+     *
+     * @throws Refusal with every range that they leave
+     */
+    public static <T> T require(T terms) {
+        List<Finding> findings = check(terms, "");
+        if (!findings.isEmpty()) {
+            throw new Refusal(findings);
+        }
+        return terms;
+    }
 
     static <T> List<Finding> check(T terms, String pointer) {
         return VALIDATOR.validate(terms).stream()
@@ -47,8 +61,9 @@ final class Declared {
     private static String place(ConstraintViolation<?> violation) {
         StringBuilder place = new StringBuilder();
         for (Path.Node node : violation.getPropertyPath()) {
-            Stream.of(node.getIndex()).filter(index -> index != null).forEach(index -> place.append('/')
-                    .append(index));
+            Stream.of(node.getIndex())
+                    .filter(index -> index != null)
+                    .forEach(index -> place.append('/').append(index));
             if (!String.valueOf(node.getName()).startsWith("<")) {
                 place.append('/').append(node.getName());
             }

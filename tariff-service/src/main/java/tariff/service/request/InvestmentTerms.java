@@ -15,14 +15,25 @@ import tariff.rate.clause.Written;
 
 /** What a bank costs, with the ranges of {@link Investment} and bounds beyond any real price. */
 public record InvestmentTerms(
-        @DecimalMin(value = "0", message = MONEY) @DecimalMax(value = MOST, message = MONEY) BigDecimal purchase,
-        @DecimalMin(value = "0", message = MONEY) @DecimalMax(value = MOST, message = MONEY) BigDecimal installation,
-        @DecimalMin(value = "0", message = MONEY) @DecimalMax(value = MOST, message = MONEY) BigDecimal incentives,
-        @DecimalMin(value = "0", message = MONEY) @DecimalMax(value = MOST, message = MONEY) BigDecimal yearlyUpkeep,
-        @Min(value = 1, message = YEARS) @Max(value = 60, message = YEARS) int lifeYears,
+        @DecimalMin(value = "0", message = MONEY) @DecimalMax(value = MOST, message = MONEY)
+        BigDecimal purchase,
+
+        @DecimalMin(value = "0", message = MONEY) @DecimalMax(value = MOST, message = MONEY)
+        BigDecimal installation,
+
+        @DecimalMin(value = "0", message = MONEY) @DecimalMax(value = MOST, message = MONEY)
+        BigDecimal incentives,
+
+        @DecimalMin(value = "0", message = MONEY) @DecimalMax(value = MOST, message = MONEY)
+        BigDecimal yearlyUpkeep,
+
+        @Min(value = 1, message = YEARS) @Max(value = 60, message = YEARS)
+        int lifeYears,
+
         List<@Valid ReplacementTerms> replacements,
+
         @DecimalMin(value = "-" + MOST, message = RESIDUAL) @DecimalMax(value = MOST, message = RESIDUAL)
-                BigDecimal residual) {
+        BigDecimal residual) {
     private static final String MOST = "1000000000000";
     private static final String MONEY = "0 to " + MOST;
     private static final String RESIDUAL = "-" + MOST + " to " + MOST;
@@ -32,7 +43,9 @@ public record InvestmentTerms(
     /** A later purchase at the end of a year. */
     public record ReplacementTerms(
             int year,
-            @DecimalMin(value = "0", message = MONEY) @DecimalMax(value = MOST, message = MONEY) BigDecimal cost) {}
+
+            @DecimalMin(value = "0", message = MONEY) @DecimalMax(value = MOST, message = MONEY)
+            BigDecimal cost) {}
 
     public InvestmentTerms {
         replacements = List.copyOf(replacements);

@@ -14,19 +14,25 @@ import tariff.rate.clause.Written;
 public record OutlookTerms(
         Optional<@DecimalMin(value = "0", message = SHARE) @DecimalMax(value = "1", message = SHARE) BigDecimal>
                 discountRate,
+
         @DecimalMin(value = "-0.9", message = RISE) @DecimalMax(value = "1", message = RISE)
-                BigDecimal savingsEscalation,
+        BigDecimal savingsEscalation,
+
         @DecimalMin(value = "-0.9", message = RISE) @DecimalMax(value = "1", message = RISE)
-                BigDecimal upkeepEscalation,
+        BigDecimal upkeepEscalation,
+
         @DecimalMin(value = "0", message = SHARE) @DecimalMax(value = "1", message = SHARE)
-                BigDecimal savingsDegradation,
+        BigDecimal savingsDegradation,
+
         Optional<@Valid TaxTerms> taxation) {
     private static final String SHARE = "0 to 1";
     private static final String RISE = "-0.9 to 1";
 
     /** Tax on what the bank earns. */
     public record TaxTerms(
-            @DecimalMin(value = "0", message = SHARE) @DecimalMax(value = "1", message = SHARE) BigDecimal rate,
+            @DecimalMin(value = "0", message = SHARE) @DecimalMax(value = "1", message = SHARE)
+            BigDecimal rate,
+
             int depreciationYears) {}
 
     /** Level prices, nothing discounted, no tax. */
@@ -35,8 +41,7 @@ public record OutlookTerms(
     }
 
     public static OutlookTerms level(Optional<BigDecimal> discountRate) {
-        return new OutlookTerms(
-                discountRate, BigDecimal.ZERO, BigDecimal.ZERO, BigDecimal.ZERO, Optional.empty());
+        return new OutlookTerms(discountRate, BigDecimal.ZERO, BigDecimal.ZERO, BigDecimal.ZERO, Optional.empty());
     }
 
     static OutlookTerms read(Written in) {

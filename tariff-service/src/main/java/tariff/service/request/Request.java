@@ -41,7 +41,8 @@ public final class Request {
         if (rate.isEmpty()) {
             in.wrong(
                     "unknown-rate",
-                    "is not the id of a rate" + Nearest.hint(in.text(), shelf.rates().keySet()),
+                    "is not the id of a rate"
+                            + Nearest.hint(in.text(), shelf.rates().keySet()),
                     Nearest.list(shelf.rates().keySet()));
         }
         return rate;

@@ -58,7 +58,9 @@ public final class Shelf {
 
     private static List<Path> files(Path directory) {
         try (Stream<Path> files = Files.list(directory)) {
-            return files.filter(file -> file.toString().endsWith(ENDING)).sorted().toList();
+            return files.filter(file -> file.toString().endsWith(ENDING))
+                    .sorted()
+                    .toList();
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
