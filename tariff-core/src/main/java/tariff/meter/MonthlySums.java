@@ -1,0 +1,128 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.meter;
+
+import java.time.Instant;
+import java.time.LocalDate;
+import java.time.YearMonth;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.TreeMap;
+import java.util.stream.Stream;
+
+/**
+ * An interval series as the bill will see it: registers of billing periods, of their windows, and of the hours or days inside.
+ *
+ * <p>Sums are exact. kVAh are Σ√(kWh² + kvarh²) interval by interval with kvarh = lagging − leading, each root rounded half up
+ * to the scale of the series. Peak kW, lagging kvar and leading kvar are the highest averages of their registers; peak kVA is
+ * the highest √(kW² + (lagging − leading)²) of one demand interval. Only energy taken enters kVAh and kVA, not export. A window
+ * that no interval of the period falls in has zeros; one whose intervals are all absent has no readings.
+ *
+ * @param series the meter
+ * @param calendar the rate's windows
+ * @param demand what a peak is averaged over
+ * @param apparentKvah whether kVAh are wanted: a root for each interval, which most rates do not need
+ */
+public record MonthlySums(IntervalSeries series, WindowCalendar calendar, DemandInterval demand, boolean apparentKvah) {
+    /** @throws IllegalArgumentException if the series cannot give such a demand */
+    public MonthlySums {
+        demand.stepsIn(series);
+    }
+
+    /** No windows; peaks over the step of the series. */
+    public static MonthlySums of(IntervalSeries series) {
+        return new MonthlySums(
+                series, new WindowCalendar(series, Map.of()), DemandInterval.block(series.stepMinutes()), true);
+    }
+
+    /** Calendar months; the first and the last only as far as the series has days. */
+    public List<MeteredMonth> calendarMonths() {
+        return months(calendarMonthsOf(series.days()));
+    }
+
+    public List<MeteredMonth> months(List<Period> periods) {
+        return periods.stream().map(this::month).toList();
+    }
+
+    /** The period's registers from the intervals that are present; see {@link IntervalSeries#coverage} for the others. */
+    public MeteredMonth month(Period period) {
+        return registers(period, series.range(period)).withDetail(new Inside(this, period));
+    }
+
+    /** The highest demands of the period. */
+    public Peaks peaks(Period period) {
+        return new Peaks(this, period);
+    }
+
+    /**
+     * The period cut into hours or days by the clock, in order, each with registers of its own. One without a recorded interval
+     * is left out.
+     *
+     * @throws IllegalArgumentException if an interval of the series is longer than the cut
+     */
+    public Stream<SubPeriod> each(Cut cut, Period period) {
+        if (series.stepMinutes() > cut.minutes()) {
+            throw new IllegalArgumentException(
+                    "a series of " + series.stepMinutes() + " minutes has no " + cut.words());
+        }
+        return Stream.iterate(period.first(), date -> !date.isAfter(period.last()), date -> date.plusDays(1))
+                .flatMap(date -> each(cut, date));
+    }
+
+    private Stream<SubPeriod> each(Cut cut, LocalDate date) {
+        List<SubPeriod> parts = new ArrayList<>();
+        cut(cut, date, (from, to, range) -> {
+            MeteredMonth registers = registers(new Period(date, date), range);
+            if (!registers.totals().values().isEmpty()) {
+                parts.add(new SubPeriod(Instant.ofEpochSecond(from), Instant.ofEpochSecond(to), registers));
+            }
+        });
+        return parts.stream();
+    }
+
+    /** What is done with a part of a day, from one second of the epoch to another. */
+    interface Part {
+        void visit(long from, long to, IntervalRange range);
+    }
+
+    /** Cuts a day by the clock; parts outside the series are passed over. */
+    void cut(Cut cut, LocalDate date, Part part) {
+        long midnight = date.atStartOfDay(series.zone()).toEpochSecond();
+        long end = date.plusDays(1).atStartOfDay(series.zone()).toEpochSecond();
+        long seconds = cut == Cut.DAYS ? end - midnight : 60L * cut.minutes();
+        int next = series.firstFrom(midnight);
+        for (long from = midnight; from < end; from += seconds) {
+            long to = Math.min(from + seconds, end);
+            int first = next;
+            next = series.firstFrom(to);
+            if (next > first) {
+                part.visit(from, to, new IntervalRange(first, next));
+            }
+        }
+    }
+
+    private MeteredMonth registers(Period period, IntervalRange range) {
+        MeteredMonth month =
+                new MeteredMonth(period, range.size() == 0 ? Readings.none() : Tally.readings(this, range, 0));
+        if (calendar.names().isEmpty() || month.totals().values().isEmpty()) {
+            return month;
+        }
+        Map<String, Readings> windows = new TreeMap<>();
+        for (String name : calendar.names()) {
+            windows.put(name, Tally.readings(this, range, calendar.bit(name)));
+        }
+        return month.withWindows(windows);
+    }
+
+    private static List<Period> calendarMonthsOf(Period days) {
+        List<Period> periods = new ArrayList<>();
+        YearMonth last = YearMonth.from(days.last());
+        for (YearMonth month = YearMonth.from(days.first()); !month.isAfter(last); month = month.plusMonths(1)) {
+            Period whole = Period.of(month);
+            periods.add(new Period(
+                    whole.first().isBefore(days.first()) ? days.first() : whole.first(),
+                    whole.last().isAfter(days.last()) ? days.last() : whole.last()));
+        }
+        return periods;
+    }
+}
