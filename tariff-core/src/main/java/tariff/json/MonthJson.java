@@ -29,7 +29,8 @@ final class MonthJson {
         Optional<LocalDate> statementDate = PeriodJson.day(in, "statementDate");
         boolean estimated = in.flag("estimated");
         in.refuseOtherKeys();
-        return period.map(days -> new MeteredMonth(days, totals, windows, charged, statementDate, estimated));
+        return period.map(
+                days -> new MeteredMonth(days, totals, windows, charged, statementDate, estimated, Optional.empty()));
     }
 
     private static Readings window(Written in) {

@@ -8,19 +8,24 @@ import java.util.Map;
 import java.util.Set;
 import tariff.notice.Assumption;
 
-/** Assumptions for people: each said once, with every place it was used in. */
+/** Assumptions for people: those that differ in a number alone are said once, in the words of the first, with every place. */
 final class Assumed {
     private static final int MOST_PLACES = 3;
 
     private Assumed() {}
 
     static List<String> text(List<Assumption> assumptions) {
+        Map<String, Assumption> first = new LinkedHashMap<>();
         Map<String, Set<String>> places = new LinkedHashMap<>();
-        assumptions.forEach(each -> places.computeIfAbsent(
-                        each.message() + " (to remove it: " + each.remedy() + ")", message -> new LinkedHashSet<>())
-                .add(each.where()));
-        return places.entrySet().stream()
-                .map(each -> places(List.copyOf(each.getValue())) + ": " + each.getKey())
+        for (Assumption each : assumptions) {
+            String kind = each.code() + each.message().replaceAll("\\d+", "#");
+            first.putIfAbsent(kind, each);
+            places.computeIfAbsent(kind, message -> new LinkedHashSet<>()).add(each.where());
+        }
+        return first.entrySet().stream()
+                .map(each -> places(List.copyOf(places.getOrDefault(each.getKey(), Set.of()))) + ": "
+                        + each.getValue().message() + " (to remove it: "
+                        + each.getValue().remedy() + ")")
                 .toList();
     }
 

@@ -11,13 +11,14 @@ final class Wrapped {
     /** One paragraph, ended by a line feed; breaks at spaces only. */
     static String text(String paragraph) {
         StringBuilder out = new StringBuilder();
-        StringBuilder line = new StringBuilder();
-        for (String word : paragraph.split(" ", -1)) {
+        String words = paragraph.stripLeading();
+        StringBuilder line = new StringBuilder(" ".repeat(paragraph.length() - words.length()));
+        for (String word : words.split(" ", -1)) {
             if (line.length() > INDENT.length() && line.length() + 1 + word.length() > WIDTH) {
                 out.append(line).append('\n');
                 line = new StringBuilder(INDENT).append(word);
             } else {
-                line.append(line.length() == 0 ? "" : " ").append(word);
+                line.append(line.toString().isBlank() ? "" : " ").append(word);
             }
         }
         return out.append(line).append('\n').toString();
