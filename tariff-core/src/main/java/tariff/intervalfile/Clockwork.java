@@ -3,8 +3,8 @@ package tariff.intervalfile;
 
 import java.time.ZoneId;
 import java.time.ZoneOffset;
-import java.util.Optional;
 import java.util.NavigableSet;
+import java.util.Optional;
 import tariff.notice.Finding;
 
 /** From stamps to the timeline: the step, which end is stamped, the day's last row, daylight saving. */

@@ -128,7 +128,8 @@ final class Rows extends AbstractBaseCsvCallbackHandler<Boolean> {
                 notices.error(
                         "figure",
                         "row " + line,
-                        Texts.quoted(new String(text, offset, length)) + " is not a figure of " + kept.get(role).words());
+                        Texts.quoted(new String(text, offset, length)) + " is not a figure of "
+                                + kept.get(role).words());
                 value = Decimals.EMPTY;
             }
             current[role] = value;
