@@ -111,6 +111,13 @@ public record Assessment(
                 BankCautions.of(proposal.bank()));
     }
 
+    /** The same answer, with what reading the files took to be so said first. */
+    public Assessment with(List<Assumption> more) {
+        List<Assumption> all =
+                Stream.concat(more.stream(), assumptions.stream()).toList();
+        return new Assessment(billing, proposal, today, savings, appraisals, exact, all, cautions);
+    }
+
     /** The bank's savings month by month; the estimate between the bounds unless another is asked for. */
     public BankSavings savings(Estimate estimate) {
         return savings.getOrDefault(estimate, new BankSavings(List.of(), List.of(), List.of()));

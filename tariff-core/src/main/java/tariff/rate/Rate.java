@@ -13,11 +13,14 @@ import java.util.Set;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import tariff.meter.Period;
+import tariff.meter.Register;
+import tariff.meter.Window;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
 import tariff.rate.clause.Clause;
 import tariff.rate.clause.Earlier;
 import tariff.rate.clause.Line;
+import tariff.rate.clause.Metered;
 import tariff.rate.clause.Scope;
 import tariff.rate.clause.Written;
 
@@ -98,6 +101,20 @@ public final class Rate {
     /** Whether a month's bill depends on the months before it. */
     public boolean looksBack() {
         return clauses(Earlier.class).findAny().isPresent();
+    }
+
+    /** The rate's windows by name. */
+    public Map<String, Window> windows() {
+        Map<String, Window> windows = new LinkedHashMap<>();
+        definition.windows().forEach((name, clause) -> windows.put(name, clause.window()));
+        return windows;
+    }
+
+    /** Whether a bill under this rate looks at a register, directly or through a power factor. */
+    public boolean reads(Register register) {
+        return clauses(Metered.class).anyMatch(each -> each.register() == register)
+                || definition.powerFactors().values().stream()
+                        .anyMatch(rule -> rule.registers().contains(register));
     }
 
     /** The hours of one of the rate's windows in a period; empty if the rate does not define it. */

@@ -57,10 +57,10 @@ class MonthlySumsTest {
     void aSeriesCannotGiveAShorterDemandThanItsStep() {
         IntervalSeries series = InventedYear.of(1, "UTC", 60);
         WindowCalendar none = new WindowCalendar(series, Map.of());
-        assertThatThrownBy(() -> new MonthlySums(series, none, DemandInterval.block(15)))
+        assertThatThrownBy(() -> new MonthlySums(series, none, DemandInterval.block(15), true))
                 .hasMessage("a series of 60 minutes cannot give a demand over 15 minutes");
         assertThatThrownBy(() -> MonthlySums.of(series).each(Cut.HALF_HOURS, DAY))
-                .hasMessage("a series of 60 minutes has no half hours");
+                .hasMessage("a series of 60 minutes has no half-hours");
     }
 
     @ParameterizedTest
@@ -69,7 +69,7 @@ class MonthlySumsTest {
         IntervalSeries series = InventedYear.of(11, zone, 15);
         Map<String, Window> windows =
                 Map.of("day", Window.daily("07:00", "21:00"), "night", Window.daily("21:00", "07:00"));
-        MonthlySums sums = new MonthlySums(series, new WindowCalendar(series, windows), DemandInterval.block(15));
+        MonthlySums sums = new MonthlySums(series, new WindowCalendar(series, windows), DemandInterval.block(15), true);
         Readings whole = sums.month(series.days()).totals();
         List<MeteredMonth> months = sums.calendarMonths();
         assertThat(months).hasSize(12);
@@ -117,7 +117,7 @@ class MonthlySumsTest {
                 "summer", Window.daily("00:00", "00:00").in(java.util.EnumSet.of(java.time.Month.JULY)),
                 "afternoon", Window.daily("12:00", "00:00"));
         MeteredMonth day =
-                new MonthlySums(series, new WindowCalendar(series, windows), DemandInterval.block(60)).month(DAY);
+                new MonthlySums(series, new WindowCalendar(series, windows), DemandInterval.block(60), true).month(DAY);
         assertThat(day.get(Register.PEAK_KW, Optional.of("summer")).orElseThrow())
                 .isEqualByComparingTo("0");
         assertThat(day.get(Register.ENERGY_KWH, Optional.of("afternoon"))).isEmpty();
@@ -142,7 +142,7 @@ class MonthlySumsTest {
     }
 
     private static BigDecimal peakKw(IntervalSeries series, DemandInterval demand) {
-        MonthlySums sums = new MonthlySums(series, new WindowCalendar(series, Map.of()), demand);
+        MonthlySums sums = new MonthlySums(series, new WindowCalendar(series, Map.of()), demand, true);
         return sums.month(DAY).get(Register.PEAK_KW, Optional.empty()).orElseThrow();
     }
 
