@@ -30,9 +30,8 @@ record Axis(long first, long last, double step, int decimals) {
 
     private static Axis of(double low, double high, int about, double leastStep) {
         double from = Math.min(0, low);
-        double to = Math.max(0, high);
-        double span = to > from ? to - from : 1;
-        double step = Math.max(leastStep, niceStep(span / about));
+        double to = low < 0 || high > 0 ? Math.max(0, high) : 1;
+        double step = Math.max(leastStep, niceStep((to - from) / about));
         if (leastStep == 1 && step == 2.5) {
             step = 5;
         }

@@ -45,7 +45,7 @@ record BillLegend(List<BillChart.Layer> lines, double width) {
 
     private List<String> hatchedWords() {
         double sum = lines.stream().mapToDouble(BillChart.Layer::totalReactive).sum();
-        return Lettering.wrapped("of it because of reactive load " + Numbers.money(sum), room(), Lettering.PLAIN);
+        return Lettering.wrapped("of which because of reactive load " + Numbers.money(sum), room(), Lettering.PLAIN);
     }
 
     private double room() {

@@ -72,7 +72,9 @@ final class Flags {
 
     void drawWords(Sheet sheet, double top) {
         for (Placed flag : placed) {
-            sheet.haloed(flag.from(), top - flag.row * ROW - 5, Lettering.PLAIN, Anchor.START, flag.words);
+            double y = top - flag.row * ROW - 5;
+            sheet.rect(flag.from() - 2, y - 11, flag.width() + 2, ROW - 2, Ink.PAPER, "none");
+            sheet.text(flag.from(), y, Lettering.PLAIN, Anchor.START, flag.words);
         }
     }
 }

@@ -83,7 +83,7 @@ final class Sheet {
         double bottom(double width) {
             return MARGIN
                     + LINE * (titleLines(width).size() + subtitleLines(width).size())
-                    + 8;
+                    + 14;
         }
     }
 
@@ -98,27 +98,6 @@ final class Sheet {
 
     void text(double x, double y, int size, Anchor anchor, String words) {
         svg.text(words, "text", "x", x, "y", y, "font-size", size, "text-anchor", anchor.word);
-    }
-
-    /** Words that stay readable across a line. */
-    void haloed(double x, double y, int size, Anchor anchor, String words) {
-        svg.text(
-                words,
-                "text",
-                "x",
-                x,
-                "y",
-                y,
-                "font-size",
-                size,
-                "text-anchor",
-                anchor.word,
-                "paint-order",
-                "stroke",
-                "stroke",
-                Ink.PAPER,
-                "stroke-width",
-                3);
     }
 
     void line(double x1, double y1, double x2, double y2, String colour, double thickness, String dash) {
