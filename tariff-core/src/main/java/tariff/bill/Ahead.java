@@ -47,11 +47,11 @@ final class Ahead {
 
     /** The place from which on the bill stays within a cent of that at unity; its power factor is rounded up to four decimals. */
     Optional<Place> flat() {
-        if (atItsEnd(BigDecimal.ZERO) && room.compareTo(STRIDE) <= 0) {
-            return Optional.empty();
-        }
         BigDecimal high = room;
-        BigDecimal low = high.subtract(STRIDE).max(BigDecimal.ZERO);
+        BigDecimal low = room.subtract(NARROW)
+                .max(BigDecimal.ZERO)
+                .divideToIntegralValue(STRIDE)
+                .multiply(STRIDE);
         while (atItsEnd(low)) {
             if (low.signum() == 0) {
                 return Optional.empty();

@@ -26,19 +26,16 @@ import tariff.rate.clause.PowerFactorRule.Leading;
 final class MonthCurve {
     private static final BigDecimal HOURS_A_DAY = BigDecimal.valueOf(24);
 
-    private final Billing billing;
-    private final List<MeteredMonth> past;
-    private final MeteredMonth month;
-    private final BetterPowerFactor better;
+    private final BetterYear year;
+    private final int place;
     private final PowerFactorRule stated;
     private final Map<BigDecimal, BigDecimal> known = new HashMap<>();
 
-    MonthCurve(Billing billing, List<MeteredMonth> past, MeteredMonth month) {
-        this.billing = billing;
-        this.past = billing.rate().looksBack() ? List.copyOf(past) : List.of();
-        this.month = month;
-        this.better = BetterPowerFactor.under(billing.rate());
-        this.stated = stated(billing.rate());
+    /** @param place of the month in its year */
+    MonthCurve(BetterYear year, int place) {
+        this.year = year;
+        this.place = place;
+        this.stated = stated(year.billing().rate());
     }
 
     /** The rate's first power factor, not rounded; without one, that of what the rate bills. */
@@ -58,25 +55,17 @@ final class MonthCurve {
 
     /** The bill with every power factor better by so much. */
     BigDecimal bill(BigDecimal by) {
-        return known.computeIfAbsent(
-                by.stripTrailingZeros(),
-                each -> billing.statements(
-                                past.stream()
-                                        .map(before -> better.month(before, each))
-                                        .toList(),
-                                List.of(better.month(month, each)))
-                        .get(0)
-                        .total());
+        return known.computeIfAbsent(by.stripTrailingZeros(), each -> year.bill(place, each));
     }
 
     /** How far the month can be bettered. */
     BigDecimal room() {
-        return better.room(month);
+        return year.room(place);
     }
 
     /** The power factor that the rate looks at, not rounded; empty if the month has none. */
     Optional<BigDecimal> powerFactor(BigDecimal by) {
-        Reckoning facts = new Reckoning(billing, better.month(month, by), List.of(), 0);
+        Reckoning facts = new Reckoning(year.billing(), year.month(place, by), List.of(), 0);
         try {
             return stated.value(facts).map(Figure::value);
         } catch (MissingReading missing) {
@@ -96,6 +85,7 @@ final class MonthCurve {
     }
 
     private Optional<BigDecimal> activeKw() {
+        MeteredMonth month = year.month(place, BigDecimal.ZERO);
         BigDecimal hours = BigDecimal.valueOf(month.period().days()).multiply(HOURS_A_DAY);
         return Stream.of(
                         month.totals().get(Register.PEAK_KW),

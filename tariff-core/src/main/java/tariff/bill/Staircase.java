@@ -3,9 +3,10 @@ package tariff.bill;
 
 import java.math.BigDecimal;
 import java.math.RoundingMode;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.IntStream;
+import java.util.stream.Stream;
 import tariff.meter.MeteredMonth;
 import tariff.notice.Refusal;
 
@@ -56,13 +57,11 @@ public record Staircase(
      * @throws Refusal naming a month that lacks what the rate bills
      */
     public static List<Staircase> of(Billing billing, List<MeteredMonth> past, List<MeteredMonth> months) {
-        List<MeteredMonth> before = new ArrayList<>(past);
-        List<Staircase> all = new ArrayList<>();
-        for (MeteredMonth month : months) {
-            all.add(of(new MonthCurve(billing, before, month)));
-            before.add(month);
-        }
-        return all;
+        BetterYear all = new BetterYear(
+                billing, Stream.concat(past.stream(), months.stream()).toList());
+        return IntStream.range(past.size(), past.size() + months.size())
+                .mapToObj(place -> of(new MonthCurve(all, place)))
+                .toList();
     }
 
     private static Staircase of(MonthCurve curve) {

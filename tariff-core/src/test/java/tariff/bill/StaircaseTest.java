@@ -70,7 +70,8 @@ class StaircaseTest {
     })
     void threeTenthsOfAStartedPointAreWorthNothing(BigDecimal better, BigDecimal bill) {
         Billing billing = new Billing(RateFile.parse(surcharge("started")), Site.unnamed());
-        assertThat(new MonthCurve(billing, List.of(), baseMonth()).bill(better)).isEqualByComparingTo(bill);
+        assertThat(new MonthCurve(new BetterYear(billing, List.of(baseMonth())), 0).bill(better))
+                .isEqualByComparingTo(bill);
     }
 
     @Test
@@ -199,5 +200,30 @@ class StaircaseTest {
         List<Staircase> both = Staircase.of(billing, List.of(winter), List.of(baseMonth()));
         // 0.8 × (1,000 − 800 ÷ 0.81) × 10 = 98.765…: 8,000.00 less 7,901.23
         assertThat(both.get(0).nextPoint()).isEqualByComparingTo("98.77");
+    }
+
+    /** Two hours of 100 kWh, one with 75 kvarh: at 0.81 in that hour 72.40 kvarh, so 2.60 × 1.00 less. Own arithmetic. */
+    @Test
+    void insideAMonthEveryHourIsBetter() {
+        String hourly = rate("""
+                { 'name': 'kvarh', 'quantity': { 'each': 'hour', 'take': 'sum', 'of': { 'energy': 'lagging kvarh' } }, 'price': 1 }""");
+        MeteredMonth first = MeteredMonth.of("2026-04").with(ENERGY_KWH, 100).with(LAGGING_KVARH, 75);
+        MeteredMonth second = MeteredMonth.of("2026-04").with(ENERGY_KWH, 100).with(LAGGING_KVARH, 0);
+        MeteredMonth month = MeteredMonth.of("2026-04")
+                .with(ENERGY_KWH, 200)
+                .with(LAGGING_KVARH, 75)
+                .withDetail(cut -> List.of(first, second));
+        Staircase ahead = ahead(hourly, month);
+        assertThat(ahead.nextPoint()).isEqualByComparingTo("2.60");
+        assertThat(ahead.flat()).isPresent();
+    }
+
+    /** Nothing reactive is billed: nothing lies ahead. */
+    @Test
+    void aRateWithoutReactiveClauseIsFlatFromTheStart() {
+        Staircase ahead = ahead(rate("{ 'name': 'Demand', 'quantity': { 'peak': 'kW' }, 'price': 10 }"), baseMonth());
+        assertThat(ahead.nextPoint()).isEqualByComparingTo("0");
+        assertThat(ahead.flat()).isEmpty();
+        assertThat(ahead.nextStep()).isEmpty();
     }
 }
