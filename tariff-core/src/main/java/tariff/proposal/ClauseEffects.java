@@ -17,6 +17,7 @@ import tariff.bill.Staircase;
 import tariff.correction.CapacitorBank;
 import tariff.correction.Estimate;
 import tariff.meter.MeteredMonth;
+import tariff.meter.MonthOrder;
 import tariff.meter.Period;
 import tariff.notice.Refusal;
 
@@ -63,7 +64,7 @@ public record ClauseEffects(String currency, BigDecimal bankKvar, List<LineCost>
     public static ClauseEffects of(Billing billing, List<MeteredMonth> months, BigDecimal bankKvar) {
         Assessment assessment = Assessment.of(billing, months, Proposal.of(CapacitorBank.fixed(bankKvar)));
         PowerFactorCost today = assessment.today();
-        List<MeteredMonth> sorted = months.stream().sorted().toList();
+        List<MeteredMonth> sorted = MonthOrder.of(months);
         int first = sorted.size() - today.months().size();
         List<Staircase> ahead = Staircase.of(billing, sorted.subList(0, first), sorted.subList(first, sorted.size()));
         List<Month> all = new ArrayList<>();

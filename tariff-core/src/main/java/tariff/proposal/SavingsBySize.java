@@ -9,14 +9,20 @@ import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.BiFunction;
+import java.util.function.Function;
 import java.util.stream.Stream;
 import tariff.bill.Billing;
 import tariff.bill.PowerFactorCost;
 import tariff.bill.StatementLine;
+import tariff.correction.BankMonth;
+import tariff.correction.BankYear;
 import tariff.correction.CapacitorBank;
 import tariff.correction.Estimate;
 import tariff.meter.Derivable;
 import tariff.meter.MeteredMonth;
+import tariff.meter.MonthOrder;
+import tariff.meter.MonthlySums;
 import tariff.meter.Readings;
 import tariff.meter.Register;
 import tariff.meter.Triangle;
@@ -67,7 +73,26 @@ public record SavingsBySize(String currency, List<Size> sizes) {
      * @throws Refusal naming every month that lacks what the rate bills
      */
     public static SavingsBySize of(Billing billing, List<MeteredMonth> months, int steps) {
-        List<MeteredMonth> sorted = months.stream().sorted().toList();
+        return of(billing, months, steps, bank -> {
+            BankMonth in = new BankMonth(bank, (month, window) -> billing.rate().hours(month.period(), window));
+            return in::with;
+        });
+    }
+
+    /** The same on interval data, where all three estimates are the same. */
+    public static SavingsBySize of(Billing billing, MonthlySums sums, int steps) {
+        return of(billing, sums.calendarMonths(), steps, bank -> {
+            BankYear in = BankYear.of(sums, bank);
+            return (month, estimate) -> in.month(month.period());
+        });
+    }
+
+    private static SavingsBySize of(
+            Billing billing,
+            List<MeteredMonth> months,
+            int steps,
+            Function<CapacitorBank, BiFunction<MeteredMonth, Estimate, MeteredMonth>> bank) {
+        List<MeteredMonth> sorted = MonthOrder.of(months);
         List<MeteredMonth> past = sorted.subList(0, Math.max(0, sorted.size() - YEAR));
         List<MeteredMonth> year = sorted.subList(past.size(), sorted.size());
         PowerFactorCost today = PowerFactorCost.of(billing, past, year);
@@ -78,8 +103,8 @@ public record SavingsBySize(String currency, List<Size> sizes) {
         List<Size> sizes = new ArrayList<>();
         for (int i = 0; i <= steps; i++) {
             BigDecimal kvar = step.multiply(BigDecimal.valueOf(i));
-            Proposal proposal = Proposal.of(CapacitorBank.fixed(kvar));
-            sizes.add(new Size(kvar, Assessment.savings(billing, today, past, year, proposal)));
+            sizes.add(new Size(
+                    kvar, Assessment.savings(billing, today, past, year, bank.apply(CapacitorBank.fixed(kvar)))));
         }
         return new SavingsBySize(billing.rate().currency(), sizes);
     }
