@@ -123,7 +123,7 @@ public record Assessment(
         return savings.getOrDefault(estimate, new BankSavings(List.of(), List.of(), List.of()));
     }
 
-    private static Map<Estimate, BankSavings> savings(
+    static Map<Estimate, BankSavings> savings(
             Billing billing,
             PowerFactorCost today,
             List<MeteredMonth> past,
