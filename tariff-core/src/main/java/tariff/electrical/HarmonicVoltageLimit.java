@@ -22,6 +22,8 @@ public enum HarmonicVoltageLimit {
     }
 
     /**
+     * The row for a nominal voltage; one on an edge takes the lower row.
+     *
      * @param kilovolts nominal between lines [kV], above 0
      * @throws IllegalArgumentException if it is not above 0
      */

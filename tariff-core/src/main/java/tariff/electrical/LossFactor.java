@@ -16,9 +16,10 @@ public final class LossFactor {
     private LossFactor() {}
 
     /**
+     * The estimate for a load factor, in [LF², LF].
+     *
      * @param loadFactor LF, mean over highest demand, in [0, 1]
      * @param weight k in [0, 1]
-     * @return in [LF², LF]
      * @throws IllegalArgumentException outside these ranges
      */
     public static double of(double loadFactor, double weight) {

@@ -17,7 +17,7 @@ public record PowerTriangle(double activeKw, double reactiveKvar) {
         LEADING
     }
 
-    /** @throws IllegalArgumentException if P is negative, or either is not a number */
+    /** Refuses a negative P, and what is not a number, with an {@link IllegalArgumentException}. */
     public PowerTriangle {
         Given.notNegative("activeKw", activeKw, "kW");
         Given.finite("reactiveKvar", reactiveKvar, "kvar");

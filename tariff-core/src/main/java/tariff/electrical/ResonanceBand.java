@@ -22,7 +22,7 @@ public enum ResonanceBand {
         return factor;
     }
 
-    /** @param amplification 0 or more, infinity allowed */
+    /** The band of an amplification, 0 or more, infinity allowed. */
     public static ResonanceBand of(double amplification) {
         return amplification >= DANGER.factor ? DANGER : amplification >= CAUTION.factor ? CAUTION : LOW;
     }

@@ -10,11 +10,12 @@ public final class TransformerReactive {
     private TransformerReactive() {}
 
     /**
+     * Magnetising and load kvar together [kvar].
+     *
      * @param transformerKva S_T [kVA], above 0
      * @param magnetisingPercent i0 [%], 0 or more; about 1.8 for older units, 0.3 to 0.8 for modern cores (from memory)
      * @param impedancePercent u [%], 0 or more
      * @param loading k, load over rating, 0 or more
-     * @return kvar
      * @throws IllegalArgumentException outside these ranges
      */
     public static double kvar(

@@ -9,9 +9,10 @@ public final class VoltageRise {
     private VoltageRise() {}
 
     /**
+     * The rise with the whole bank on [% of the voltage].
+     *
      * @param bankKvar effective at the bus [kvar], 0 or more
      * @param shortCircuitKva at the bus [kVA], above 0
-     * @return per cent of the voltage
      * @throws IllegalArgumentException outside these ranges
      */
     public static double percent(double bankKvar, double shortCircuitKva) {
