@@ -4,6 +4,7 @@ package tariff.bill;
 import java.util.ArrayList;
 import java.util.List;
 import tariff.meter.MeteredMonth;
+import tariff.meter.MonthOrder;
 import tariff.meter.Site;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
@@ -21,11 +22,11 @@ public record Billing(Rate rate, Site site) {
     /**
      * A statement for each month, in the order of their dates; each month sees those before it as its past.
      *
-     * @param months in any order, none overlapping another
-     * @throws Refusal naming every month and what the rate bills that it does not give
+     * @param months in any order
+     * @throws Refusal naming the months that overlap, or every month and what the rate bills that it does not give
      */
     public List<Statement> statements(List<MeteredMonth> months) {
-        return statements(List.of(), months.stream().sorted().toList());
+        return statements(List.of(), MonthOrder.of(months));
     }
 
     /**

@@ -88,18 +88,25 @@ public record NoPenaltyPoint(
             Register register = allowance.of().register();
             there = change(there, allowance.of().window(), readings -> lowered(readings, register, free));
         }
-        return there;
+        return inside(month, there, part -> reach(part, billing));
     }
 
     /** The month at unity: nothing lagging, kVA equal to kW. */
     MeteredMonth unity(MeteredMonth month) {
-        return at(BigDecimal.ONE, month);
+        return inside(month, at(BigDecimal.ONE, month), this::unity);
     }
 
     private MeteredMonth at(BigDecimal pf, MeteredMonth month) {
         Map<String, Readings> windows = new TreeMap<>();
         month.windows().forEach((name, readings) -> windows.put(name, at(pf, readings)));
         return month.with(at(pf, month.totals())).withWindows(windows);
+    }
+
+    private static MeteredMonth inside(MeteredMonth before, MeteredMonth after, UnaryOperator<MeteredMonth> change) {
+        return before.detail()
+                .map(detail -> after.withDetail(
+                        cut -> detail.each(cut).stream().map(change).toList()))
+                .orElse(after);
     }
 
     private Readings at(BigDecimal pf, Readings before) {

@@ -13,6 +13,7 @@ import java.util.Objects;
 import java.util.Optional;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
+import tariff.meter.Cut;
 import tariff.meter.Derivable;
 import tariff.meter.MeteredMonth;
 import tariff.meter.Period;
@@ -27,7 +28,6 @@ import tariff.rate.clause.Figure;
 import tariff.rate.clause.Line;
 import tariff.rate.clause.MissingReading;
 import tariff.rate.clause.Rounding;
-import tariff.rate.clause.Span;
 
 /** One month under one rate, worked out as far as it is asked; what was worked out once is kept. Lives for one question. */
 final class Reckoning implements Facts {
@@ -212,9 +212,13 @@ final class Reckoning implements Facts {
     }
 
     @Override
-    public List<? extends Facts> each(Span span) {
-        throw new MissingReading("the rate counts by the " + span.words()
-                + "; the bill gives only totals of the period, so give interval data");
+    public List<Reckoning> each(Cut cut) {
+        MeteredMonth.Detail detail = month.detail()
+                .orElseThrow(() -> new MissingReading("the rate counts by the " + cut.one()
+                        + "; the bill gives only totals of the period, so give interval data"));
+        return detail.each(cut).stream()
+                .map(part -> new Reckoning(billing, part, List.of(), 0))
+                .toList();
     }
 
     @Override

@@ -5,6 +5,7 @@ import java.math.BigDecimal;
 import java.time.LocalDate;
 import java.time.YearMonth;
 import java.util.Collections;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
@@ -18,6 +19,7 @@ import java.util.TreeMap;
  * @param charged what the utility asked for, if known
  * @param statementDate the day printed on the bill, if known; some rates choose the season by it
  * @param estimated whether the bill says that a reading was estimated
+ * @param detail the hours and days inside, if interval data are known; never kept when readings are changed
  */
 public record MeteredMonth(
         Period period,
@@ -25,15 +27,23 @@ public record MeteredMonth(
         Map<String, Readings> windows,
         Charged charged,
         Optional<LocalDate> statementDate,
-        boolean estimated)
+        boolean estimated,
+        Optional<Detail> detail)
         implements Comparable<MeteredMonth> {
+
+    /** What is inside a period. */
+    @FunctionalInterface
+    public interface Detail {
+        /** The period cut into hours, days …, each with registers of its own, in order. */
+        List<MeteredMonth> each(Cut cut);
+    }
 
     public MeteredMonth {
         windows = Collections.unmodifiableMap(new TreeMap<>(windows));
     }
 
     public MeteredMonth(Period period, Readings totals) {
-        this(period, totals, Map.of(), Charged.nothingKnown(), Optional.empty(), false);
+        this(period, totals, Map.of(), Charged.nothingKnown(), Optional.empty(), false, Optional.empty());
     }
 
     /** A calendar month without readings, to add them to: {@code MeteredMonth.of("2026-03").with(PEAK_KW, "400")}. */
@@ -58,7 +68,7 @@ public record MeteredMonth(
     }
 
     public MeteredMonth with(Readings newTotals) {
-        return new MeteredMonth(period, newTotals, windows, charged, statementDate, estimated);
+        return new MeteredMonth(period, newTotals, windows, charged, statementDate, estimated, Optional.empty());
     }
 
     public MeteredMonth withWindow(String name, Readings readings) {
@@ -68,11 +78,15 @@ public record MeteredMonth(
     }
 
     public MeteredMonth withWindows(Map<String, Readings> newWindows) {
-        return new MeteredMonth(period, totals, newWindows, charged, statementDate, estimated);
+        return new MeteredMonth(period, totals, newWindows, charged, statementDate, estimated, Optional.empty());
     }
 
     public MeteredMonth withCharged(Charged newCharged) {
-        return new MeteredMonth(period, totals, windows, newCharged, statementDate, estimated);
+        return new MeteredMonth(period, totals, windows, newCharged, statementDate, estimated, detail);
+    }
+
+    public MeteredMonth withDetail(Detail newDetail) {
+        return new MeteredMonth(period, totals, windows, charged, statementDate, estimated, Optional.of(newDetail));
     }
 
     @Override

@@ -15,6 +15,7 @@ import tariff.bill.Statement;
 import tariff.correction.BankMonth;
 import tariff.correction.Estimate;
 import tariff.meter.MeteredMonth;
+import tariff.meter.MonthOrder;
 import tariff.notice.Assumption;
 import tariff.notice.Caution;
 import tariff.notice.Refusal;
@@ -54,17 +55,18 @@ public record Assessment(
     /**
      * Assesses a proposal on the last twelve of the months, or all if they are fewer; those before are their past.
      *
-     * @param months in any order, none overlapping another
-     * @throws Refusal naming every month that lacks what the rate bills
+     * @param months in any order
+     * @throws Refusal naming the months that overlap, or every month that lacks what the rate bills
      */
     public static Assessment of(Billing billing, List<MeteredMonth> months, Proposal proposal) {
-        List<MeteredMonth> sorted = months.stream().sorted().toList();
+        List<MeteredMonth> sorted = MonthOrder.of(months);
         List<MeteredMonth> past = sorted.subList(0, Math.max(0, sorted.size() - YEAR));
         List<MeteredMonth> year = sorted.subList(past.size(), sorted.size());
         PowerFactorCost today = PowerFactorCost.of(billing, past, year);
         Map<Estimate, BankSavings> savings = savings(billing, today, past, year, proposal);
         Set<Assumption> assumptions = new LinkedHashSet<>();
         today.months().forEach(month -> assumptions.addAll(month.asItIs().assumptions()));
+        assumptions.addAll(MonthOrder.gaps(sorted));
         assumptions.addAll(BankAssumptions.of(billing.rate(), proposal, year));
         return new Assessment(
                 billing,

@@ -2,6 +2,8 @@
 package tariff.rate;
 
 import java.time.LocalDate;
+import java.time.ZoneId;
+import java.time.ZoneOffset;
 import java.time.format.DateTimeParseException;
 import java.util.ArrayList;
 import java.util.Collections;
@@ -9,6 +11,8 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
+import java.util.TreeSet;
 import tariff.rate.clause.Line;
 import tariff.rate.clause.PowerFactorRule;
 import tariff.rate.clause.Quantity;
@@ -66,7 +70,7 @@ public record RateDefinition(
                 in.optionalText("source"),
                 in.optionalText("follows"),
                 in.named("powerFactors", PowerFactorRule::read),
-                in.named("windows", WindowClause::read),
+                windows(in),
                 in.named("seasons", Season::read),
                 in.word("seasonBy", SeasonBy.WORDS, SeasonBy.DAYS),
                 in.named("quantities", QuantityKinds::read),
@@ -75,6 +79,29 @@ public record RateDefinition(
                 in.has("roundTotal") ? Rounding.readOptional(in, "roundTotal").orElseThrow() : Rounding.toTheCent());
         in.refuseOtherKeys();
         return definition;
+    }
+
+    private static Map<String, WindowClause> windows(Written in) {
+        Set<LocalDate> holidays = new TreeSet<>();
+        for (Written each : in.has("holidays") ? in.list("holidays") : List.<Written>of()) {
+            try {
+                holidays.add(LocalDate.parse(each.text()));
+            } catch (DateTimeParseException e) {
+                each.wrong("date", "is not a day", "a day such as 2026-01-01");
+            }
+        }
+        ZoneId zone = zone(in);
+        return in.named("windows", window -> WindowClause.read(window, holidays, zone));
+    }
+
+    private static ZoneId zone(Written in) {
+        String name = in.optionalText("timeZone").orElse("UTC");
+        if (!ZoneId.getAvailableZoneIds().contains(name)) {
+            in.at("timeZone")
+                    .wrong("time-zone", "is not a time zone", "a name such as Europe/Berlin (IANA time zone database)");
+            return ZoneOffset.UTC;
+        }
+        return ZoneId.of(name);
     }
 
     private static List<Line> lines(Written in) {

@@ -7,6 +7,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import tariff.meter.Cut;
 import tariff.meter.Triangle;
 import tariff.meter.Unit;
 
@@ -17,21 +18,21 @@ import tariff.meter.Unit;
  *
  * @param count how many of the highest are averaged; 1 for the highest itself, 0 for the sum
  */
-record Each(Span span, int count, Quantity of) implements Quantity {
+record Each(Cut cut, int count, Quantity of) implements Quantity {
 
     static Quantity read(Written in) {
-        Map<String, Span> spans = new LinkedHashMap<>();
-        for (Span span : Span.values()) {
-            spans.put(span.key(), span);
+        Map<String, Cut> cuts = new LinkedHashMap<>();
+        for (Cut cut : Cut.values()) {
+            cuts.put(cut.key(), cut);
         }
         Map<String, Integer> takes = new LinkedHashMap<>();
         takes.put("sum", 0);
         takes.put("highest", 1);
         takes.put("meanOfHighest", 2);
-        Span span = in.requiredWord("each", spans, Span.HOUR);
+        Cut cut = in.requiredWord("each", cuts, Cut.HOURS);
         int take = in.requiredWord("take", takes, 0);
         int count = take == 2 ? in.wholeNumber("count", 2, 100) : take;
-        return new Each(span, count, in.quantity("of"));
+        return new Each(cut, count, in.quantity("of"));
     }
 
     @Override
@@ -41,9 +42,9 @@ record Each(Span span, int count, Quantity of) implements Quantity {
 
     @Override
     public Figure value(Facts facts) {
-        List<Figure> figures = facts.each(span).stream().map(of::value).toList();
+        List<Figure> figures = facts.each(cut).stream().map(of::value).toList();
         if (figures.isEmpty()) {
-            return Figure.given(BigDecimal.ZERO, Unit.NUMBER, "no " + span.words());
+            return Figure.given(BigDecimal.ZERO, Unit.NUMBER, "no " + cut.one());
         }
         BigDecimal value;
         if (count == 0) {
@@ -58,12 +59,12 @@ record Each(Span span, int count, Quantity of) implements Quantity {
                     .divide(BigDecimal.valueOf(taken), Triangle.PRECISION);
         }
         return Figure.given(
-                value, figures.get(0).unit(), takeWords() + " over " + figures.size() + " " + span.words() + "s");
+                value, figures.get(0).unit(), takeWords() + " over " + figures.size() + " " + cut.one() + "s");
     }
 
     @Override
     public String words() {
-        return takeWords() + ", over each " + span.words() + ", of " + of.words();
+        return takeWords() + ", over each " + cut.one() + ", of " + of.words();
     }
 
     @Override

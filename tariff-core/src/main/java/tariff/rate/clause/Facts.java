@@ -5,6 +5,7 @@ import java.math.BigDecimal;
 import java.time.LocalDate;
 import java.util.List;
 import java.util.Optional;
+import tariff.meter.Cut;
 import tariff.meter.Period;
 import tariff.meter.Register;
 import tariff.meter.Unit;
@@ -57,7 +58,7 @@ public interface Facts {
      *
      * @throws MissingReading if only totals of the period are known
      */
-    List<? extends Facts> each(Span span);
+    List<? extends Facts> each(Cut cut);
 
     /** Notes something taken to be so because the data do not say. */
     void assume(Assumption assumption);

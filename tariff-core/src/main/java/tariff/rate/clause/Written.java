@@ -209,13 +209,13 @@ public final class Written {
 
     /** Reports every key that nothing asked for: a rate never has keys that are silently ignored. */
     public void refuseOtherKeys() {
+        List<String> known = List.copyOf(asked);
         for (String key : keys()) {
-            if (!asked.contains(key)) {
-                findings.accept(Finding.error(
-                                "unknown-key", at(key).pointer, "is not a key here" + Nearest.hint(key, asked))
-                        .found(key)
-                        .allowed(Nearest.list(
-                                asked.stream().filter(each -> !each.equals(key)).toList())));
+            if (!known.contains(key)) {
+                findings.accept(
+                        Finding.error("unknown-key", at(key).pointer, "is not a key here" + Nearest.hint(key, known))
+                                .found(key)
+                                .allowed(Nearest.list(known)));
             }
         }
     }

@@ -1,0 +1,119 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.meter;
+
+import java.time.Instant;
+import java.time.LocalDate;
+import java.time.YearMonth;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.TreeMap;
+import java.util.stream.Stream;
+
+/**
+ * An interval series as the bill will see it: registers of billing periods, of their windows, and of the hours or days inside.
+ *
+ * <p>Sums are exact. kVAh are Σ√(kWh² + kvarh²) interval by interval with kvarh = lagging − leading, each root rounded half up
+ * to the scale of the series. Peak kW, lagging kvar and leading kvar are the highest averages of their registers; peak kVA is
+ * the highest √(kW² + (lagging − leading)²) of one demand interval. Only energy taken enters kVAh and kVA, not export. A window
+ * that no interval of the period falls in has zeros; one whose intervals are all absent has no readings.
+ *
+ * @param series the meter
+ * @param calendar the rate's windows
+ * @param demand what a peak is averaged over
+ */
+public record MonthlySums(IntervalSeries series, WindowCalendar calendar, DemandInterval demand) {
+    /** @throws IllegalArgumentException if the series cannot give such a demand */
+    public MonthlySums {
+        demand.stepsIn(series);
+    }
+
+    /** No windows; peaks over the step of the series. */
+    public static MonthlySums of(IntervalSeries series) {
+        return new MonthlySums(
+                series, new WindowCalendar(series, Map.of()), DemandInterval.block(series.stepMinutes()));
+    }
+
+    /** Calendar months; the first and the last only as far as the series has days. */
+    public List<MeteredMonth> calendarMonths() {
+        return months(calendarMonthsOf(series.days()));
+    }
+
+    public List<MeteredMonth> months(List<Period> periods) {
+        return periods.stream().map(this::month).toList();
+    }
+
+    /** The period's registers from the intervals that are present; see {@link IntervalSeries#coverage} for the others. */
+    public MeteredMonth month(Period period) {
+        return registers(period, series.range(period))
+                .withDetail(cut -> each(cut, period).map(SubPeriod::registers).toList());
+    }
+
+    /** The highest demands of the period. */
+    public Peaks peaks(Period period) {
+        return new Peaks(this, period);
+    }
+
+    /**
+     * The period cut into hours or days by the clock, in order, each with registers of its own. One without a recorded interval
+     * is left out.
+     *
+     * @throws IllegalArgumentException if an interval of the series is longer than the cut
+     */
+    public Stream<SubPeriod> each(Cut cut, Period period) {
+        if (series.stepMinutes() > cut.minutes()) {
+            throw new IllegalArgumentException(
+                    "a series of " + series.stepMinutes() + " minutes has no " + cut.words());
+        }
+        return Stream.iterate(period.first(), date -> !date.isAfter(period.last()), date -> date.plusDays(1))
+                .flatMap(date -> each(cut, date));
+    }
+
+    private Stream<SubPeriod> each(Cut cut, LocalDate date) {
+        Instant midnight = date.atStartOfDay(series.zone()).toInstant();
+        Instant end = date.plusDays(1).atStartOfDay(series.zone()).toInstant();
+        if (cut == Cut.DAYS) {
+            return subPeriod(date, midnight, end).stream();
+        }
+        long seconds = 60L * cut.minutes();
+        return Stream.iterate(midnight, at -> at.isBefore(end), at -> at.plusSeconds(seconds))
+                .flatMap(at -> subPeriod(date, at, earlier(at.plusSeconds(seconds), end)).stream());
+    }
+
+    private List<SubPeriod> subPeriod(LocalDate date, Instant from, Instant to) {
+        IntervalRange range = new IntervalRange(series.firstFrom(from), series.firstFrom(to));
+        MeteredMonth registers = registers(new Period(date, date), range);
+        return range.size() == 0 || registers.totals().values().isEmpty()
+                ? List.of()
+                : List.of(new SubPeriod(from, to, registers));
+    }
+
+    private MeteredMonth registers(Period period, IntervalRange range) {
+        MeteredMonth month =
+                new MeteredMonth(period, range.size() == 0 ? Readings.none() : Tally.readings(this, range, 0));
+        if (calendar.names().isEmpty() || month.totals().values().isEmpty()) {
+            return month;
+        }
+        Map<String, Readings> windows = new TreeMap<>();
+        for (String name : calendar.names()) {
+            windows.put(name, Tally.readings(this, range, calendar.bit(name)));
+        }
+        return month.withWindows(windows);
+    }
+
+    private static List<Period> calendarMonthsOf(Period days) {
+        List<Period> periods = new ArrayList<>();
+        YearMonth last = YearMonth.from(days.last());
+        for (YearMonth month = YearMonth.from(days.first()); !month.isAfter(last); month = month.plusMonths(1)) {
+            Period whole = Period.of(month);
+            periods.add(new Period(
+                    whole.first().isBefore(days.first()) ? days.first() : whole.first(),
+                    whole.last().isAfter(days.last()) ? days.last() : whole.last()));
+        }
+        return periods;
+    }
+
+    private static Instant earlier(Instant one, Instant other) {
+        return one.isBefore(other) ? one : other;
+    }
+}
