@@ -64,6 +64,9 @@ public record FreeSize(List<BankShape> shapes, BigDecimal incrementKvar, BigDeci
     }
 
     private Optional<CapacitorBank> smallest(BankShape shape, Predicate<CapacitorBank> holds) {
+        if (holds.test(bank(shape, sizes()))) {
+            return Optional.of(bank(shape, firstAbove(0, sizes(), shape, holds)));
+        }
         int before = 0;
         for (int size : points().toArray()) {
             if (holds.test(bank(shape, size))) {

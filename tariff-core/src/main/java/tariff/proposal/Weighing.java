@@ -4,6 +4,7 @@ package tariff.proposal;
 import java.math.BigDecimal;
 import java.util.EnumMap;
 import java.util.Map;
+import java.util.function.Function;
 import tariff.correction.CapacitorBank;
 import tariff.correction.Estimate;
 import tariff.meter.Triangle;
@@ -62,9 +63,13 @@ final class Weighing {
 
             @Override
             public BigDecimal atMost(CapacitorBank smaller, CapacitorBank larger) {
-                BigDecimal most = yearlyReturn(prices.of(smaller), year.atMost(smaller, larger, estimate));
+                RepeatedYear.Saved most = year.atMost(smaller, larger, estimate);
+                BigDecimal cheap = yearlyReturn(prices.of(smaller), most);
                 // a loss is the smaller a part of the cost, the dearer the bank
-                return most.signum() < 0 ? BigDecimal.ZERO : most;
+                return cheap.signum() >= 0
+                        ? cheap
+                        : cheap.multiply(prices.of(smaller).netCost().max(CENT))
+                                .divide(prices.of(larger).netCost().max(CENT), Triangle.PRECISION);
             }
         };
     }
@@ -90,8 +95,7 @@ final class Weighing {
         };
     }
 
-    private static BigDecimal regret(
-            Map<Estimate, BigDecimal> best, java.util.function.Function<Estimate, BigDecimal> value) {
+    private static BigDecimal regret(Map<Estimate, BigDecimal> best, Function<Estimate, BigDecimal> value) {
         return best.entrySet().stream()
                 .map(each -> each.getValue().subtract(value.apply(each.getKey())))
                 .max(BigDecimal::compareTo)

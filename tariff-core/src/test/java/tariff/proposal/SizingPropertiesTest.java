@@ -37,23 +37,7 @@ class SizingPropertiesTest {
         Weighing weighing = new Weighing(new RepeatedYear(billing, today, year, false), prices, RandomYears.outlook());
         Estimate estimate = Estimate.values()[random.nextInt(3)];
         for (Objective objective : List.of(weighing.highestValue(estimate), weighing.shortestPayback(estimate))) {
-            int[] looks = {0};
-            Objective counted = new Objective() {
-                @Override
-                public BigDecimal at(CapacitorBank bank) {
-                    looks[0]++;
-                    return objective.at(bank);
-                }
-
-                @Override
-                public BigDecimal atMost(CapacitorBank smaller, CapacitorBank larger) {
-                    looks[0]++;
-                    return objective.atMost(smaller, larger);
-                }
-            };
-            CapacitorBank best = FreeSize.upTo(BigDecimal.valueOf(MOST), shape).best(counted);
-            System.out.println(seed + " " + estimate + " looks " + looks[0] + " best " + best.ratedKvar() + " "
-                    + shape.fixedShare());
+            CapacitorBank best = FreeSize.upTo(BigDecimal.valueOf(MOST), shape).best(objective);
             BigDecimal value = objective.at(best);
             for (int kvar = 1; kvar <= MOST; kvar++) {
                 assertThat(objective.at(shape.of(BigDecimal.valueOf(kvar)))).isLessThanOrEqualTo(value);
