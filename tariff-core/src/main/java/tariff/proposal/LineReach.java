@@ -12,11 +12,11 @@ import java.math.BigDecimal;
  */
 public record LineReach(String line, BigDecimal saves, BigDecimal fromKvar) {
 
-    /** {@code Reactive energy: saves up to 1200.00 a year, no more from 140 kvar on}. */
+    /** {@code Reactive energy: saves up to 1200.00 a year, 99 % of it from 140 kvar on}. */
     public String words() {
         String kvar = fromKvar.stripTrailingZeros().toPlainString();
         return saves.signum() > 0
-                ? line + ": saves up to " + saves.toPlainString() + " a year, no more from " + kvar + " kvar on"
+                ? line + ": saves up to " + saves.toPlainString() + " a year, 99 % of it from " + kvar + " kvar on"
                 : line + ": costs more from " + kvar + " kvar on";
     }
 }

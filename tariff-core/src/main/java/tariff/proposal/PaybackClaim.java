@@ -57,10 +57,9 @@ public record PaybackClaim(BigDecimal years) implements Claim {
                     "holds: by the estimate between the bounds the cost is back in " + years(central.get()));
         }
         if (high.filter(this::reaches).isPresent()) {
-            return new Verdict.HoldsOnlyIf(
-                    "holds only if the kvarh are drawn more evenly than is usual: the estimate is "
-                            + central.map(PaybackClaim::years).orElse("that the cost is not recovered")
-                            + "; interval data would tell");
+            return new Verdict.HoldsOnlyIf("holds only if the load's timing is kinder than assumed: the estimate is "
+                    + central.map(PaybackClaim::years).orElse("that the cost is not recovered")
+                    + "; interval data would tell");
         }
         if (high.isPresent()) {
             return new Verdict.BeyondRate(
@@ -95,10 +94,15 @@ public record PaybackClaim(BigDecimal years) implements Claim {
                 .filter(claim -> claim.amount().signum() > 0
                         && !claim.ofBill()
                         && claim.review(evidence).verdict() instanceof Verdict.BeyondRate
-                        && reaches(investment.netCost().divide(claim.amount(), Triangle.PRECISION)))
+                        && isAbout(investment.netCost().divide(claim.amount(), Triangle.PRECISION)))
                 .findFirst()
                 .ifPresent(claim -> slips.add(Slip.ON_CLAIMED_SAVINGS));
         return slips;
+    }
+
+    /** Within a tenth. */
+    private boolean isAbout(BigDecimal time) {
+        return years.subtract(time).abs().multiply(BigDecimal.TEN).compareTo(time) <= 0;
     }
 
     private boolean reaches(BigDecimal time) {
@@ -122,6 +126,7 @@ public record PaybackClaim(BigDecimal years) implements Claim {
     }
 
     private static String years(BigDecimal years) {
-        return Words.upTo(years, 2) + " years";
+        String number = Words.upTo(years, 2);
+        return number + (number.equals("1") ? " year" : " years");
     }
 }

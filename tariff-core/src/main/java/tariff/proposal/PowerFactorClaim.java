@@ -61,9 +61,8 @@ public record PowerFactorClaim(BigDecimal powerFactor) implements Claim {
         Verdict verdict = within(central.get())
                 ? new Verdict.Holds("holds by the estimate between the bounds, " + Words.upTo(central.get(), 3)
                         + " in the lowest month")
-                : new Verdict.HoldsOnlyIf(
-                        "holds only if the kvarh are drawn more evenly than is usual: the estimate is "
-                                + Words.upTo(central.get(), 3) + " in the lowest month; interval data would tell");
+                : new Verdict.HoldsOnlyIf("holds only if the load's timing is kinder than assumed: the estimate is "
+                        + Words.upTo(central.get(), 3) + " in the lowest month; interval data would tell");
         return new Reviewed(this, verdict, working, List.of());
     }
 

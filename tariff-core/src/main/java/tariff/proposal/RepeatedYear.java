@@ -13,13 +13,17 @@ import tariff.correction.BankMonth;
 import tariff.correction.CapacitorBank;
 import tariff.correction.Estimate;
 import tariff.meter.MeteredMonth;
+import tariff.rate.clause.PowerFactorRule;
 
 /** A year of bills that is asked again and again with other banks; what was asked once is kept. Lives for one question. */
 final class RepeatedYear {
+    private static final Saved NO_CEILING = new Saved(new BigDecimal("1e15"), new BigDecimal("1e15"));
+
     private final Billing billing;
     private final List<MeteredMonth> year;
     private final List<Statement> before;
     private final boolean looksBack;
+    private final boolean netsLeading;
     private final BankMonth.WindowHours hours;
     private final Map<Asked, BankSavings> known = new HashMap<>();
     private final Map<AskedBetween, Saved> bounds = new HashMap<>();
@@ -35,6 +39,8 @@ final class RepeatedYear {
         this.billing = billing;
         this.year = year;
         this.looksBack = billing.rate().looksBack();
+        this.netsLeading = billing.rate().definition().powerFactors().values().stream()
+                .anyMatch(rule -> rule.leading() == PowerFactorRule.Leading.NETTED);
         this.before = looksBack && !fullPast
                 ? billing.statements(year, year)
                 : today.months().stream().map(PowerFactorCost.Month::asItIs).toList();
@@ -61,8 +67,14 @@ final class RepeatedYear {
         return sums(savings(bank, estimate));
     }
 
-    /** What no bank between two can exceed, as long as no bill falls where its reactive readings rise. */
+    /**
+     * What no bank between two can exceed, as long as no bill falls where its reactive readings rise. Where leading kvarh are taken from
+     * lagging ones it may, and then there is no ceiling.
+     */
     Saved atMost(CapacitorBank smaller, CapacitorBank larger, Estimate estimate) {
+        if (netsLeading) {
+            return NO_CEILING;
+        }
         return Objects.requireNonNull(bounds.computeIfAbsent(new AskedBetween(smaller, larger, estimate), asked -> {
             KindestMonth kindest = new KindestMonth(smaller, larger, hours, estimate);
             return sums(billed(year.stream().map(kindest::of).toList()));

@@ -42,7 +42,9 @@ public record SavingsByPart(Map<String, BigDecimal> parts) implements Claim {
         BigDecimal most = parts.values().stream().max(BigDecimal::compareTo).orElse(sum);
         if (whole.verdict() instanceof Verdict.BeyondRate beyond
                 && parts.size() > 1
-                && most.compareTo(beyond.ceiling()) <= 0) {
+                && most.compareTo(beyond.ceiling()
+                                .max(evidence.assessment().today().toUnity()))
+                        <= 0) {
             slips.add(0, Slip.COUNTED_TWICE);
             slips.remove(Slip.UNITY_NOT_PAID);
         }

@@ -103,7 +103,7 @@ public record SavingsClaim(BigDecimal amount, boolean ofBill, boolean fromFirstY
     }
 
     private static String onlyIf(BigDecimal central) {
-        return "holds only if the kvarh are drawn more evenly than is usual: the estimate is " + Words.money(central)
+        return "holds only if the load's timing is kinder than assumed: the estimate is " + Words.money(central)
                 + " a year; interval data would tell";
     }
 

@@ -88,7 +88,7 @@ final class SizeAnswers {
         Optional<CapacitorBank> bank = terms.choice().smallest(this::removesEveryPenalty);
         return bank.<Answer<SizedBank>>map(found -> Answer.known(weighing.sized(found)))
                 .orElseGet(() -> Answer.notApplicable("no bank up to "
-                        + Words.kvar(terms.choice().mostKvar()) + " brings every month to "
+                        + Words.kvar(terms.choice().mostKvar()) + " takes the penalty from every month; it ends at "
                         + today.point().words()));
     }
 

@@ -21,11 +21,14 @@ import tariff.payback.Outlook;
 final class RandomYears {
     private static final String ENERGY = "{ 'name': 'Energy', 'quantity': { 'energy': 'kWh' }, 'price': 0.1 }";
 
+    private static final String[] LEADING = {"ignored", "added", "netted", "larger"};
+
     private RandomYears() {}
 
     static String rate(Random random) {
-        String powerFactor = "'billing': { 'from': '" + (random.nextBoolean() ? "energies" : "peak") + "'"
-                + (random.nextBoolean() ? ", 'round': { 'to': 0.01 }" : "") + " }";
+        String from = random.nextBoolean() ? "peak'" : "energies', 'leading': '" + LEADING[random.nextInt(4)] + "'";
+        String powerFactor =
+                "'billing': { 'from': '" + from + (random.nextBoolean() ? ", 'round': { 'to': 0.01 }" : "") + " }";
         int kind = random.nextInt(7);
         double price = 0.01 + random.nextInt(60) / 1000.0;
         String lines = switch (kind) {
