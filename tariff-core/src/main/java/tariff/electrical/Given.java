@@ -27,7 +27,13 @@ final class Given {
     }
 
     static int order(int value) {
-        value("order", value, value >= 2, "a whole number from 2");
+        return order(value, value >= 2, "a whole number from 2");
+    }
+
+    static int order(int value, boolean allowed, String what) {
+        if (!allowed) {
+            throw new IllegalArgumentException("order was " + value + "; allowed: " + what);
+        }
         return value;
     }
 

@@ -50,7 +50,7 @@ public enum HarmonicCurrentLimit {
 
     /** Limit of one odd harmonic [% of I_L]. */
     public double percent(int order) {
-        Given.value("order", order, order >= 3 && order % 2 == 1, "an odd number from 3");
+        Given.order(order, order >= 3 && order % 2 == 1, "an odd number from 3");
         return order < 11 ? below11 : order < 17 ? below17 : order < 23 ? below23 : order < 35 ? below35 : above;
     }
 

@@ -63,12 +63,14 @@ public record ResonancePoint(double capacitorKvar, double order, int harmonic, d
             int harmonic) {
         double least = capacitorKvar * tolerance.low();
         double most = capacitorKvar * tolerance.high();
-        boolean meets = Resonance.order(shortCircuitKva, most, reactorP) <= harmonic
-                && harmonic <= Resonance.order(shortCircuitKva, least, reactorP);
+        double leastP = reactorP * tolerance.low();
+        double mostP = reactorP * tolerance.high();
+        boolean meets = Resonance.order(shortCircuitKva, most, mostP) <= harmonic
+                && harmonic <= Resonance.order(shortCircuitKva, least, leastP);
         return meets
                 ? Double.POSITIVE_INFINITY
                 : Math.max(
-                        Resonance.networkAmplification(shortCircuitKva, least, reactorP, harmonic),
-                        Resonance.networkAmplification(shortCircuitKva, most, reactorP, harmonic));
+                        Resonance.networkAmplification(shortCircuitKva, least, leastP, harmonic),
+                        Resonance.networkAmplification(shortCircuitKva, most, mostP, harmonic));
     }
 }

@@ -150,7 +150,7 @@ class HarmonicsTest {
     @Test
     void evenHarmonicsHaveOtherRules() {
         assertThatThrownBy(() -> HarmonicCurrentLimit.BELOW_20.percent(6))
-                .hasMessage("order was 6.0; allowed: an odd number from 3");
+                .hasMessage("order was 6; allowed: an odd number from 3");
     }
 
     @ParameterizedTest(name = "{0} kV: {1} and {2} %")

@@ -128,6 +128,9 @@ class ResonanceTest {
         assertThat(StepCombinations.totalsKvar(List.of(6.25, 12.5, 12.5)))
                 .containsExactly(6.25, 12.5, 18.75, 25.0, 31.25);
         assertThat(StepCombinations.totalsKvar(List.of())).isEmpty();
+        List<Double> uneven = new Random(6).doubles(24, 1e3, 1e6).boxed().toList();
+        assertThat(StepCombinations.totalsKvar(uneven)).hasSizeBetween(1_000, 100_050);
+        assertThat(StepCombinations.totalsKvar(List.of(0.001))).containsExactly(0.01);
         assertThatThrownBy(() -> StepCombinations.totalsKvar(List.of(25.0, 0.0)))
                 .hasMessage("stepsKvar was 0.0; allowed: above 0 kvar");
     }
@@ -163,7 +166,7 @@ class ResonanceTest {
         assertThatThrownBy(() -> Resonance.order(0, 100)).hasMessage("shortCircuitKva was 0.0; allowed: above 0 kVA");
         assertThatThrownBy(() -> Resonance.order(1000, -1)).hasMessage("capacitorKvar was -1.0; allowed: above 0 kvar");
         assertThatThrownBy(() -> Resonance.kvarTunedTo(1, 1000))
-                .hasMessage("order was 1.0; allowed: a whole number from 2");
+                .hasMessage("order was 1; allowed: a whole number from 2");
         assertThatThrownBy(() -> ShortCircuit.behindTransformerKva(1000, 0))
                 .hasMessage("impedancePercent was 0.0; allowed: above 0, up to 100 %");
     }

@@ -4,6 +4,7 @@ package tariff.rate.clause;
 import java.math.BigDecimal;
 import java.util.List;
 import java.util.Optional;
+import tariff.meter.CutEnergies;
 import tariff.meter.Unit;
 
 /**
@@ -29,6 +30,12 @@ record AllOnceAbove(Quantity of, Quantity limit) implements Quantity {
         Figure edge = limit.value(facts);
         boolean above = whole.value().compareTo(edge.value()) > 0;
         return Figure.of(above ? whole.value() : BigDecimal.ZERO, whole.unit(), "{}, all once above {}", whole, edge);
+    }
+
+    @Override
+    public Optional<Column> column(CutEnergies parts, Facts facts) {
+        return of.column(parts, facts)
+                .flatMap(whole -> limit.column(parts, facts).map(edge -> whole.with(edge, (a, b) -> a > b ? a : 0)));
     }
 
     @Override
