@@ -2,11 +2,13 @@
 package tariff.proposal;
 
 import java.math.BigDecimal;
+import java.util.Comparator;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
+import java.util.stream.Stream;
 import tariff.bill.Billing;
 import tariff.bill.PowerFactorCost;
 import tariff.correction.CapacitorBank;
@@ -49,6 +51,7 @@ final class SizeAnswers {
         BigDecimal ofBank = regret.at(calmest).negate();
         BigDecimal ofNone = values.values().stream().max(BigDecimal::compareTo).orElseThrow();
         SizeChoice alike = terms.choice().like(basis);
+        List<LineReach> lines = new LineReaches(repeated, alike, terms.basis()).of(billing.rate());
         return new Sizing(
                 today,
                 Objects.requireNonNull(bestFor.get(terms.basis())),
@@ -60,9 +63,23 @@ final class SizeAnswers {
                         : Answer.notApplicable(
                                 "no bank at all is the calmest choice: at worst it forgoes " + Words.money(ofNone)),
                 ofBank.min(ofNone),
-                alike.curve().stream().map(weighing::sized).toList(),
-                new LineReaches(repeated, alike, terms.basis()).of(billing.rate()),
+                curve(alike, basis, lines),
+                lines,
+                basis.ratedKvar().compareTo(terms.choice().mostKvar()) >= 0,
                 Undecided.of(bestFor, year));
+    }
+
+    /** Even points, the best size, and the sizes at which a line stops paying. */
+    private List<SizedBank> curve(SizeChoice alike, CapacitorBank best, List<LineReach> lines) {
+        Stream<CapacitorBank> kinks = lines.stream()
+                .map(LineReach::fromKvar)
+                .flatMap(kvar -> alike.smallest(bank -> bank.ratedKvar().compareTo(kvar) >= 0).stream());
+        return Stream.of(alike.curve().stream(), Stream.of(best), kinks)
+                .flatMap(banks -> banks)
+                .distinct()
+                .sorted(Comparator.comparing(CapacitorBank::ratedKvar))
+                .map(weighing::sized)
+                .toList();
     }
 
     private Answer<SizedBank> worthwhile(CapacitorBank bank, Estimate estimate) {
@@ -79,8 +96,8 @@ final class SizeAnswers {
 
     private Answer<SizedBank> smallestWithoutPenalty() {
         if (!today.point().named()) {
-            return Answer.notApplicable("the rate names no point at which penalties end: "
-                    + today.point().words());
+            return Answer.notApplicable("the rate names no point at which penalties end"
+                    + (today.point().billsApparent() ? "; it bills kVA, which fall all the way to unity" : ""));
         }
         if (today.months().stream().allMatch(month -> month.penalty().signum() <= 0)) {
             return Answer.notApplicable("no month pays a penalty today");

@@ -27,8 +27,9 @@ import tariff.payback.Answer;
  * @param leastRegret the bank whose worst regret is least; a regret is how far its net present value is below that of the best answer,
  *     a bank or none, for the same estimate
  * @param worstRegret the regret that is least, of that bank or of none
- * @param curve savings and value against size, for banks divided like the best one
+ * @param curve savings and value against size, for banks divided like the best one; also where a line stops paying
  * @param lines where each line of the bill stops paying, in the order of the bill
+ * @param roomLimits whether the best size is the largest in the choice, so that a larger one might be better
  * @param undecided what in the answer depends on data that the bills do not hold
  */
 public record Sizing(
@@ -41,6 +42,7 @@ public record Sizing(
         BigDecimal worstRegret,
         List<SizedBank> curve,
         List<LineReach> lines,
+        boolean roomLimits,
         Optional<Undecided> undecided) {
     private static final int YEAR = 12;
 

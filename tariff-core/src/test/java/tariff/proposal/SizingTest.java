@@ -104,6 +104,17 @@ class SizingTest {
                         "Leading: costs more from 162 kvar on");
     }
 
+    @Test
+    void theCurveHoldsTheSizesAtWhichLinesStopPaying() {
+        Sizing sizing = size(KVARH_ABOVE_A_THIRD, ReviewedSite.year(), terms(fixedUpTo("250"), "20", Estimate.HIGH));
+        assertThat(sizing.curve())
+                .extracting(point -> point.kvar().intValue())
+                .contains(93, 100, 162, 250)
+                .isSorted()
+                .doesNotHaveDuplicates();
+        assertThat(sizing.roomLimits()).isFalse();
+    }
+
     /** All drawn at the peak of 300 kvar, 300 × (1 − 52,800 ÷ 120,000) = 168 kvar reach the free share; drawn evenly, 100 do. */
     @Test
     void whatTheBillsDoNotSayIsSaidWithWhatWouldSettleIt() {
@@ -130,7 +141,7 @@ class SizingTest {
         assertThat(why(nothingReactive.shortestPayback()))
                 .isEqualTo("savings are not positive, so the cost is never recovered");
         assertThat(why(nothingReactive.smallestWithoutPenalty()))
-                .isEqualTo("the rate names no point at which penalties end: none (the rate bills nothing reactive)");
+                .isEqualTo("the rate names no point at which penalties end");
         assertThat(why(nothingReactive.leastRegret()))
                 .isEqualTo("no bank at all is the calmest choice: at worst it forgoes 0.00");
         assertThat(nothingReactive.worstRegret()).isEqualByComparingTo("0");
@@ -154,9 +165,11 @@ class SizingTest {
                                 + " life; it would pay below 3504.00 per kvar");
     }
 
+    /** Savings grow with the size up to 90 kvar in every month, so the largest bank of 50 is best, and more might be better. */
     @Test
     void aBankThatIsTooSmallForThePenaltySaysSo() {
         Sizing small = size(KVARH_ABOVE_A_THIRD, ReviewedSite.year(), terms(fixedUpTo("50"), "20", Estimate.HIGH));
+        assertThat(small.roomLimits()).isTrue();
         assertThat(why(small.smallestWithoutPenalty()))
                 .isEqualTo(
                         "no bank up to 50 kvar takes the penalty from every month; it ends at the lagging kvarh up to 33 % of"
