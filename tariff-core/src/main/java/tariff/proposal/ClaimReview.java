@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.List;
 import tariff.bill.Billing;
 import tariff.meter.MeteredMonth;
+import tariff.meter.MonthlySums;
 import tariff.notice.Refusal;
 
 /**
@@ -21,11 +22,23 @@ public record ClaimReview(Assessment assessment, List<Reviewed> claims) {
     /**
      * Reviews an offer on the last twelve of the months, or all if they are fewer.
      *
-     * @param months in any order, none overlapping another
-     * @throws Refusal naming every month that lacks what the rate bills
+     * @param months in any order
+     * @throws Refusal naming the months that overlap, or every month that lacks what the rate bills
      */
     public static ClaimReview of(Billing billing, List<MeteredMonth> months, Offer offer) {
-        Assessment assessment = Assessment.of(billing, months, offer.proposal());
+        return of(Assessment.of(billing, months, offer.proposal()), offer);
+    }
+
+    /**
+     * Reviews an offer on interval data, where nothing is left to bounds.
+     *
+     * @throws Refusal naming every month that lacks what the rate bills
+     */
+    public static ClaimReview of(Billing billing, MonthlySums sums, Offer offer) {
+        return of(Assessment.of(billing, sums, offer.proposal()), offer);
+    }
+
+    private static ClaimReview of(Assessment assessment, Offer offer) {
         Evidence evidence = new Evidence(assessment, offer);
         List<Claim> claims = new ArrayList<>(offer.claims());
         if (offer.proposal().bank().reactorShare().signum() == 0

@@ -6,13 +6,16 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
+import java.util.Optional;
 import tariff.bill.Billing;
 import tariff.bill.PowerFactorCost;
 import tariff.bill.Statement;
 import tariff.correction.BankMonth;
+import tariff.correction.BankYear;
 import tariff.correction.CapacitorBank;
 import tariff.correction.Estimate;
 import tariff.meter.MeteredMonth;
+import tariff.meter.MonthlySums;
 import tariff.rate.clause.PowerFactorRule;
 
 /** A year of bills that is asked again and again with other banks; what was asked once is kept. Lives for one question. */
@@ -24,6 +27,7 @@ final class RepeatedYear {
     private final List<Statement> before;
     private final boolean looksBack;
     private final boolean netsLeading;
+    private final Optional<MonthlySums> exact;
     private final BankMonth.WindowHours hours;
     private final Map<Asked, BankSavings> known = new HashMap<>();
     private final Map<AskedBetween, Saved> bounds = new HashMap<>();
@@ -35,7 +39,14 @@ final class RepeatedYear {
 
     private record AskedBetween(CapacitorBank smaller, CapacitorBank larger, Estimate estimate) {}
 
-    RepeatedYear(Billing billing, PowerFactorCost today, List<MeteredMonth> year, boolean fullPast) {
+    /** @param exact interval data of the year, if there are any */
+    RepeatedYear(
+            Billing billing,
+            PowerFactorCost today,
+            List<MeteredMonth> year,
+            boolean fullPast,
+            Optional<MonthlySums> exact) {
+        this.exact = exact;
         this.billing = billing;
         this.year = year;
         this.looksBack = billing.rate().looksBack();
@@ -49,12 +60,16 @@ final class RepeatedYear {
 
     /** The months as they would be metered with a bank. */
     List<MeteredMonth> months(CapacitorBank bank, Estimate estimate) {
+        if (exact.isPresent()) {
+            BankYear walked = BankYear.of(exact.get(), bank);
+            return year.stream().map(month -> walked.month(month.period())).toList();
+        }
         BankMonth with = new BankMonth(bank, hours);
         return year.stream().map(month -> with.with(month, estimate)).toList();
     }
 
     BankSavings savings(CapacitorBank bank, Estimate estimate) {
-        Asked asked = new Asked(bank, estimate);
+        Asked asked = new Asked(bank, exact.isPresent() ? Estimate.CENTRAL : estimate);
         BankSavings savings = known.get(asked);
         if (savings == null) {
             savings = billed(months(bank, estimate));
@@ -69,10 +84,10 @@ final class RepeatedYear {
 
     /**
      * What no bank between two can exceed, as long as no bill falls where its reactive readings rise. Where leading kvarh are taken from
-     * lagging ones it may, and then there is no ceiling.
+     * lagging ones it may, and for interval data it is not worked out; then there is no ceiling.
      */
     Saved atMost(CapacitorBank smaller, CapacitorBank larger, Estimate estimate) {
-        if (netsLeading) {
+        if (netsLeading || exact.isPresent()) {
             return NO_CEILING;
         }
         return Objects.requireNonNull(bounds.computeIfAbsent(new AskedBetween(smaller, larger, estimate), asked -> {

@@ -12,6 +12,8 @@ import tariff.bill.Billing;
 import tariff.bill.PowerFactorCost;
 import tariff.correction.Estimate;
 import tariff.meter.MeteredMonth;
+import tariff.meter.MonthOrder;
+import tariff.meter.MonthlySums;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
 import tariff.payback.Answer;
@@ -55,11 +57,26 @@ public record Sizing(
     /**
      * Sizes a bank on the last twelve of the months; those before are their past.
      *
-     * @param months in any order, none overlapping another
-     * @throws Refusal naming every month that lacks what the rate bills, fewer than twelve months, or a missing discount rate
+     * @param months in any order
+     * @throws Refusal naming the months that overlap, every month that lacks what the rate bills, fewer than twelve months, or a missing discount rate
      */
     public static Sizing of(Billing billing, List<MeteredMonth> months, SizingTerms terms) {
-        List<MeteredMonth> sorted = months.stream().sorted().toList();
+        return of(billing, months, Optional.empty(), terms);
+    }
+
+    /**
+     * Sizes a bank on interval data, where nothing is left to bounds: every size is walked through the year, and all three estimates are
+     * the same.
+     *
+     * @throws Refusal naming every month that lacks what the rate bills, fewer than twelve months, or a missing discount rate
+     */
+    public static Sizing of(Billing billing, MonthlySums sums, SizingTerms terms) {
+        return of(billing, sums.calendarMonths(), Optional.of(sums), terms);
+    }
+
+    private static Sizing of(
+            Billing billing, List<MeteredMonth> months, Optional<MonthlySums> exact, SizingTerms terms) {
+        List<MeteredMonth> sorted = MonthOrder.of(months);
         if (sorted.size() < YEAR) {
             throw new Refusal(Finding.error("not-twelve-months", "/months", "the best size needs a full year")
                     .found(sorted.size() + " months")
@@ -68,7 +85,7 @@ public record Sizing(
         List<MeteredMonth> past = sorted.subList(0, sorted.size() - YEAR);
         List<MeteredMonth> year = sorted.subList(past.size(), sorted.size());
         PowerFactorCost today = PowerFactorCost.of(billing, past, year);
-        RepeatedYear repeated = new RepeatedYear(billing, today, year, past.size() >= YEAR);
+        RepeatedYear repeated = new RepeatedYear(billing, today, year, past.size() >= YEAR, exact);
         return new SizeAnswers(billing, today, year, repeated, terms).all();
     }
 

@@ -42,7 +42,8 @@ class SizingPropertiesTest {
         BankShape shape = RandomYears.shape(random);
         FreeSize choice = FreeSize.upTo(BigDecimal.valueOf(MOST), shape);
         PowerFactorCost today = PowerFactorCost.of(billing, List.of(), year);
-        Weighing weighing = new Weighing(new RepeatedYear(billing, today, year, false), prices, RandomYears.outlook());
+        Weighing weighing = new Weighing(
+                new RepeatedYear(billing, today, year, false, Optional.empty()), prices, RandomYears.outlook());
         Map<Estimate, BigDecimal> best = new EnumMap<>(Estimate.class);
         List<Objective> objectives = new ArrayList<>();
         for (Estimate estimate : Estimate.values()) {
@@ -76,7 +77,8 @@ class SizingPropertiesTest {
                 new BigDecimal("0.01"),
                 Optional.of(new Taxation(new BigDecimal("0.25"), 5)));
         PowerFactorCost today = PowerFactorCost.of(billing, List.of(), year);
-        SizedBank sized = new Weighing(new RepeatedYear(billing, today, year, false), prices, outlook).sized(bank);
+        SizedBank sized = new Weighing(new RepeatedYear(billing, today, year, false, Optional.empty()), prices, outlook)
+                .sized(bank);
         Assessment assessment = Assessment.of(billing, year, new Proposal(bank, Optional.of(prices.of(bank)), outlook));
         assessment
                 .appraisals()
