@@ -5,6 +5,7 @@ import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
@@ -21,6 +22,7 @@ import tariff.rate.clause.Clause;
 import tariff.rate.clause.Earlier;
 import tariff.rate.clause.Line;
 import tariff.rate.clause.Metered;
+import tariff.rate.clause.Named;
 import tariff.rate.clause.Scope;
 import tariff.rate.clause.Written;
 
@@ -101,6 +103,26 @@ public final class Rate {
     /** Whether a month's bill depends on the months before it. */
     public boolean looksBack() {
         return clauses(Earlier.class).findAny().isPresent();
+    }
+
+    /** The registers that a clause counts in this month, through the quantities it names; the past is left out. */
+    public Set<Metered> registers(Clause clause) {
+        Set<Metered> registers = new LinkedHashSet<>();
+        collect(clause, registers);
+        return registers;
+    }
+
+    private void collect(@Nullable Clause clause, Set<Metered> registers) {
+        if (clause == null || clause instanceof Earlier) {
+            return;
+        }
+        if (clause instanceof Metered metered) {
+            registers.add(metered);
+        }
+        if (clause instanceof Named named) {
+            collect(definition.quantities().get(named.name()), registers);
+        }
+        clause.parts().forEach(part -> collect(part, registers));
     }
 
     /** The rate's windows by name. */
