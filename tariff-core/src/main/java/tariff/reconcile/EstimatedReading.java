@@ -1,0 +1,120 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.reconcile;
+
+import java.math.BigDecimal;
+import java.math.RoundingMode;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.stream.IntStream;
+import java.util.stream.Stream;
+import tariff.meter.MeteredMonth;
+import tariff.meter.Readings;
+import tariff.meter.Register;
+import tariff.meter.Triangle;
+
+/**
+ * Two bills that only agree together: one was billed on an estimated reading, the next made up for it. The kWh to move from one to the other
+ * are sought so that the first agrees; the second then has to agree by itself.
+ */
+record EstimatedReading() implements Cause {
+    private static final int STEPS = 6;
+
+    @Override
+    public String code() {
+        return "estimated-reading";
+    }
+
+    @Override
+    public Stream<Trial> trials(Case bills) {
+        return IntStream.range(0, bills.months().size() - 1)
+                .filter(place ->
+                        areOpposite(bills.charged().get(place), bills.charged().get(place + 1)))
+                .boxed()
+                .flatMap(place -> Stream.of(false, true).flatMap(withKvarh -> moved(bills, place, withKvarh).stream()));
+    }
+
+    private static boolean areOpposite(
+            @org.jspecify.annotations.Nullable ReconciledMonth first,
+            @org.jspecify.annotations.Nullable ReconciledMonth second) {
+        return first != null
+                && second != null
+                && first.verdict() == Verdict.DIFFERS
+                && second.verdict() == Verdict.DIFFERS
+                && first.difference().signum() * second.difference().signum() < 0;
+    }
+
+    /** Follows the slope of the first bill to the amount that was charged. */
+    private Optional<Trial> moved(Case bills, int place, boolean withKvarh) {
+        Optional<BigDecimal> kwh = bills.months().get(place).totals().get(Register.ENERGY_KWH);
+        ReconciledMonth before = bills.charged().get(place);
+        if (kwh.isEmpty() || kwh.get().signum() == 0 || before == null) {
+            return Optional.empty();
+        }
+        int decimals = Math.max(0, kwh.get().scale());
+        BigDecimal from = BigDecimal.ZERO;
+        BigDecimal at = kwh.get()
+                .movePointLeft(2)
+                .setScale(decimals, RoundingMode.UP)
+                .multiply(BigDecimal.valueOf(before.difference().signum()));
+        for (int step = 0; step < STEPS; step++) {
+            Optional<Trial> trial = trial(bills, place, at, withKvarh);
+            Optional<ReconciledMonth> now = trial.flatMap(each -> each.month(place, bills));
+            if (now.isEmpty() || now.get().verdict() == Verdict.AGREES) {
+                return now.isEmpty() ? Optional.empty() : trial;
+            }
+            BigDecimal gained = before.difference().subtract(now.get().difference());
+            if (gained.signum() == 0) {
+                return Optional.empty();
+            }
+            BigDecimal next =
+                    at.add(now.get().difference().multiply(at.subtract(from)).divide(gained, Triangle.PRECISION));
+            from = at;
+            before = now.get();
+            at = next.setScale(decimals, RoundingMode.HALF_UP);
+            if (at.compareTo(from) == 0) {
+                return trial;
+            }
+        }
+        return Optional.empty();
+    }
+
+    private Optional<Trial> trial(Case bills, int place, BigDecimal kwh, boolean withKvarh) {
+        MeteredMonth first = bills.months().get(place);
+        MeteredMonth second = bills.months().get(place + 1);
+        Optional<Readings> more = more(first.totals(), kwh, withKvarh ? kvarh(first, kwh) : BigDecimal.ZERO);
+        Optional<Readings> less = more(
+                second.totals(), kwh.negate(), withKvarh ? kvarh(first, kwh).negate() : BigDecimal.ZERO);
+        if (more.isEmpty() || less.isEmpty()) {
+            return Optional.empty();
+        }
+        List<MeteredMonth> ends = kwh.signum() > 0 ? List.of(second, first) : List.of(first, second);
+        String words = Digits.shown(kwh.abs()) + " kWh" + (withKvarh ? " and their kvarh" : "") + " moved from "
+                + ends.get(0).period() + " to " + ends.get(1).period() + " (an estimated reading)";
+        return Optional.of(
+                bills.read(this, words, Map.of(place, first.with(more.get()), place + 1, second.with(less.get()))));
+    }
+
+    /** The kvarh that go with so many kWh at the month's own proportion. */
+    private static BigDecimal kvarh(MeteredMonth month, BigDecimal kwh) {
+        BigDecimal all = month.totals().get(Register.ENERGY_KWH).orElse(BigDecimal.ONE);
+        BigDecimal kvarh = month.totals().get(Register.LAGGING_KVARH).orElse(BigDecimal.ZERO);
+        return kvarh.multiply(kwh).divide(all, Math.max(0, kvarh.scale()), RoundingMode.HALF_UP);
+    }
+
+    private static Optional<Readings> more(Readings readings, BigDecimal kwh, BigDecimal kvarh) {
+        Optional<BigDecimal> active =
+                readings.get(Register.ENERGY_KWH).map(kwh::add).filter(sum -> sum.signum() >= 0);
+        if (active.isEmpty()) {
+            return Optional.empty();
+        }
+        Readings moved = readings.with(Register.ENERGY_KWH, active.get());
+        if (kvarh.signum() == 0) {
+            return Optional.of(moved);
+        }
+        return readings.get(Register.LAGGING_KVARH)
+                .map(kvarh::add)
+                .filter(sum -> sum.signum() >= 0)
+                .map(sum -> moved.with(Register.LAGGING_KVARH, sum));
+    }
+}
