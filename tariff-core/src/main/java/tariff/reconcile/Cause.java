@@ -1,7 +1,6 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.reconcile;
 
-import java.util.List;
 import java.util.stream.Stream;
 
 /** A way in which a bill comes about other than by the rate and the readings as they are given. */
@@ -17,31 +16,4 @@ interface Cause {
     default boolean mayBeOfSingleMonths() {
         return false;
     }
-
-    /** Changes of the rate, likeliest first. */
-    List<Cause> OF_THE_RATE = List.of(
-            new PowerFactorRounding(),
-            new PowerFactorBasis(),
-            new LeadingKvarh(),
-            new PointCount(),
-            new DemandRounding(),
-            new DemandRegister(),
-            new AmountRounding(),
-            new SeasonChoice(),
-            new SeasonPrices(),
-            new DaysBilled(),
-            new RatchetLeftOut(),
-            new LineLeftOut(),
-            new PercentageNotInRate(),
-            new AmountNotInRate(),
-            new PeakBeforeTheBills());
-
-    /** What may have happened to single bills. */
-    List<Cause> OF_A_MONTH = List.of(
-            new LinesNotInRate(),
-            new SwappedTotal(),
-            new SwappedDigits(),
-            new SwappedRegisters(),
-            new ReadingsOfTheMonthBefore(),
-            new EstimatedReading());
 }

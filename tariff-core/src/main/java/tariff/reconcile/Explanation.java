@@ -31,14 +31,11 @@ public record Explanation(
     /**
      * A month that would agree.
      *
+     * @param period as the bill gives it
      * @param words what would be otherwise in it
      * @param month its amounts and lines as they would then compare
      */
-    public record Month(String words, ReconciledMonth month) {
-
-        public Period period() {
-            return month.period();
-        }
+    public record Month(Period period, String words, ReconciledMonth month) {
 
         String sentence() {
             return period() + " would agree " + (month.verdict() == Verdict.AGREES ? "to the cent" : "within rounding")
@@ -68,6 +65,11 @@ public record Explanation(
         return explains.stream()
                 .mapToInt(each -> each.month().verdict() == Verdict.AGREES ? 2 : 1)
                 .sum();
+    }
+
+    /** Whether it makes more agree than it breaks. */
+    boolean isBetterThanNow() {
+        return then.agreeing() + then.toTheCent() > now.agreeing() + now.toTheCent();
     }
 
     boolean explains(Period period) {

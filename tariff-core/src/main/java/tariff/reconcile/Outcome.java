@@ -73,7 +73,7 @@ record Outcome(Trial trial, SortedMap<Integer, ReconciledMonth> months, int gain
             if (before != null
                     && before.verdict().isAgreement()
                     && month.verdict().compareTo(before.verdict()) > 0) {
-                breaks.add(month.period());
+                breaks.add(before.period());
             }
         });
         return breaks;
@@ -88,7 +88,7 @@ record Outcome(Trial trial, SortedMap<Integer, ReconciledMonth> months, int gain
         List<Explanation.Month> explains = new ArrayList<>();
         months.forEach((place, month) -> {
             if (gain(month, bills.charged().get(place)) > 0) {
-                explains.add(new Explanation.Month(trial.words(), month));
+                explains.add(new Explanation.Month(period(bills, place), trial.words(), month));
             }
         });
         return new Explanation(
@@ -122,7 +122,9 @@ record Outcome(Trial trial, SortedMap<Integer, ReconciledMonth> months, int gain
         }
         List<Explanation.Month> explains = best.entrySet().stream()
                 .map(each -> new Explanation.Month(
-                        String.join(", or ", words.getOrDefault(each.getKey(), List.of())), each.getValue()))
+                        period(bills, each.getKey()),
+                        String.join(", or ", words.getOrDefault(each.getKey(), List.of())),
+                        each.getValue()))
                 .toList();
         return new Explanation(
                 outcomes.get(0).trial.code(),
@@ -133,6 +135,11 @@ record Outcome(Trial trial, SortedMap<Integer, ReconciledMonth> months, int gain
                 tally(bills, Map.of()),
                 tally(bills, best),
                 residual(bills, best));
+    }
+
+    /** As the bill gives it, which a trial may change. */
+    private static Period period(Case bills, int place) {
+        return bills.months().get(place).period();
     }
 
     private static BigDecimal residual(Case bills, Map<Integer, ReconciledMonth> otherwise) {

@@ -39,7 +39,7 @@ final class Search {
     }
 
     private void tryRates() {
-        for (Cause cause : Cause.OF_THE_RATE) {
+        for (Cause cause : Causes.OF_THE_RATE) {
             cause.trials(bills).forEach(trial -> {
                 Outcome outcome = Outcome.of(trial, bills);
                 ofTheRate.add(outcome);
@@ -54,7 +54,7 @@ final class Search {
     }
 
     private void tryMonths() {
-        for (Cause cause : Cause.OF_A_MONTH) {
+        for (Cause cause : Causes.OF_A_MONTH) {
             List<Outcome> outcomes = cause.trials(bills)
                     .map(trial -> Outcome.of(trial, bills))
                     .filter(outcome -> outcome.explainsAllItIsAbout(bills))
@@ -89,7 +89,7 @@ final class Search {
                 .toList();
         for (Outcome one : nearest) {
             Case changed = bills.with(one.trial().rate());
-            Cause.OF_THE_RATE.stream()
+            Causes.OF_THE_RATE.stream()
                     .filter(cause -> !cause.code().equals(one.trial().code()))
                     .flatMap(cause -> cause.trials(changed))
                     .map(two -> Outcome.of(one.trial().and(two), bills))
@@ -101,7 +101,8 @@ final class Search {
     /** Leaves out what explains only a part of what a better one explains. */
     private List<Explanation> best() {
         List<Explanation> best = new ArrayList<>();
-        for (Explanation each : found.stream().sorted(RANK).toList()) {
+        for (Explanation each :
+                found.stream().filter(Explanation::isBetterThanNow).sorted(RANK).toList()) {
             boolean isPartOfABetter = best.stream().anyMatch(better -> covers(better, each));
             if (best.size() < BEST && !isPartOfABetter) {
                 best.add(each);

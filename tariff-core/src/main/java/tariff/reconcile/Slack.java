@@ -6,7 +6,9 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.TreeMap;
+import java.util.function.Function;
 import tariff.bill.Billing;
 import tariff.bill.Statement;
 import tariff.bill.StatementLine;
@@ -46,30 +48,30 @@ public record Slack(BigDecimal total, Map<String, BigDecimal> lines) {
         Map<String, BigDecimal> lines = new HashMap<>();
         statement.lines().forEach(line -> lines.put(line.name(), HALF_A_CENT));
         for (List<MeteredMonth> upAndDown : moved(statement.month())) {
-            BigDecimal most = BigDecimal.ZERO;
-            Map<String, BigDecimal> mostOfLines = new HashMap<>();
-            for (MeteredMonth month : upAndDown) {
-                try {
-                    Statement other = billing.statements(past, List.of(month)).get(0);
-                    most = most.max(other.total().subtract(statement.total()).abs());
-                    for (int i = 0; i < other.lines().size(); i++) {
-                        StatementLine line = other.lines().get(i);
-                        mostOfLines.merge(
-                                line.name(),
-                                line.amount()
-                                        .subtract(statement.lines().get(i).amount())
-                                        .abs(),
-                                BigDecimal::max);
-                    }
-                } catch (Refusal cannotMoveSoFar) {
-                    // nothing is added for a register that the rate cannot bill at its edge
-                    continue;
-                }
+            List<Statement> others = upAndDown.stream()
+                    .flatMap(month -> billed(billing, past, month).stream())
+                    .toList();
+            total = total.add(most(others, other -> other.total().subtract(statement.total())));
+            for (StatementLine line : statement.lines()) {
+                BigDecimal most =
+                        most(others, other -> other.amount(line.name()).subtract(line.amount()));
+                lines.merge(line.name(), most, BigDecimal::add);
             }
-            total = total.add(most);
-            mostOfLines.forEach((name, move) -> lines.merge(name, move, BigDecimal::add));
         }
         return new Slack(total, lines);
+    }
+
+    private static BigDecimal most(List<Statement> others, Function<Statement, BigDecimal> move) {
+        return others.stream().map(move).map(BigDecimal::abs).reduce(BigDecimal.ZERO, BigDecimal::max);
+    }
+
+    /** Empty for a register that the rate cannot bill half a digit away; it then adds nothing. */
+    private static Optional<Statement> billed(Billing billing, List<MeteredMonth> past, MeteredMonth month) {
+        try {
+            return Optional.of(billing.statements(past, List.of(month)).get(0));
+        } catch (Refusal refused) {
+            return Optional.empty();
+        }
     }
 
     /** For each printed register the month with it half a digit higher and half a digit lower. */
