@@ -86,8 +86,8 @@ public record Agreement(List<ReconciledMonth> months) {
         return Optional.of(new Assumption(
                 "bills-not-reconciled",
                 "the bills",
-                differing.size() + " of " + months.size() + (months.size() == 1 ? " bill does" : " bills do")
-                        + " not agree with this rate; the difference is "
+                differing.size() + " of " + months.size() + (months.size() == 1 ? " bill" : " bills")
+                        + (differing.size() == 1 ? " does" : " do") + " not agree with this rate; the difference is "
                         + Digits.shown(difference().setScale(2, RoundingMode.HALF_UP)) + " in all" + share,
                 "reconcile the bills, and correct the rate or the readings"));
     }

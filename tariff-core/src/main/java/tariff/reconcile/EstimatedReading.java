@@ -8,6 +8,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.stream.IntStream;
 import java.util.stream.Stream;
+import org.jspecify.annotations.Nullable;
 import tariff.meter.MeteredMonth;
 import tariff.meter.Readings;
 import tariff.meter.Register;
@@ -18,7 +19,8 @@ import tariff.meter.Triangle;
  * are sought so that the first agrees; the second then has to agree by itself.
  */
 record EstimatedReading() implements Cause {
-    private static final int STEPS = 6;
+    private static final int STEPS = 8;
+    private static final BigDecimal NUDGE = new BigDecimal(16);
 
     @Override
     public String code() {
@@ -34,9 +36,7 @@ record EstimatedReading() implements Cause {
                 .flatMap(place -> Stream.of(false, true).flatMap(withKvarh -> moved(bills, place, withKvarh).stream()));
     }
 
-    private static boolean areOpposite(
-            @org.jspecify.annotations.Nullable ReconciledMonth first,
-            @org.jspecify.annotations.Nullable ReconciledMonth second) {
+    private static boolean areOpposite(@Nullable ReconciledMonth first, @Nullable ReconciledMonth second) {
         return first != null
                 && second != null
                 && first.verdict() == Verdict.DIFFERS
@@ -44,39 +44,33 @@ record EstimatedReading() implements Cause {
                 && first.difference().signum() * second.difference().signum() < 0;
     }
 
-    /** Follows the slope of the first bill to the amount that was charged. */
+    /** Follows the slope of the first bill to the amount that was charged; steps of the rate may take several goes. */
     private Optional<Trial> moved(Case bills, int place, boolean withKvarh) {
         Optional<BigDecimal> kwh = bills.months().get(place).totals().get(Register.ENERGY_KWH);
-        ReconciledMonth before = bills.charged().get(place);
-        if (kwh.isEmpty() || kwh.get().signum() == 0 || before == null) {
-            return Optional.empty();
-        }
-        int decimals = Math.max(0, kwh.get().scale());
-        BigDecimal from = BigDecimal.ZERO;
-        BigDecimal at = kwh.get()
-                .movePointLeft(2)
-                .setScale(decimals, RoundingMode.UP)
-                .multiply(BigDecimal.valueOf(before.difference().signum()));
-        for (int step = 0; step < STEPS; step++) {
-            Optional<Trial> trial = trial(bills, place, at, withKvarh);
-            Optional<ReconciledMonth> now = trial.flatMap(each -> each.month(place, bills));
-            if (now.isEmpty() || now.get().verdict() == Verdict.AGREES) {
-                return now.isEmpty() ? Optional.empty() : trial;
-            }
-            BigDecimal gained = before.difference().subtract(now.get().difference());
-            if (gained.signum() == 0) {
+        int decimals = Math.max(0, kwh.map(BigDecimal::scale).orElse(0));
+        BigDecimal at = BigDecimal.ZERO;
+        for (int step = 0; step < STEPS && kwh.isPresent(); step++) {
+            BigDecimal further = at.add(NUDGE.movePointLeft(decimals));
+            Optional<ReconciledMonth> here = first(bills, place, at, withKvarh);
+            Optional<ReconciledMonth> there = first(bills, place, further, withKvarh);
+            if (here.isEmpty() || there.isEmpty()) {
                 return Optional.empty();
             }
-            BigDecimal next =
-                    at.add(now.get().difference().multiply(at.subtract(from)).divide(gained, Triangle.PRECISION));
-            from = at;
-            before = now.get();
-            at = next.setScale(decimals, RoundingMode.HALF_UP);
-            if (at.compareTo(from) == 0) {
-                return trial;
+            if (here.get().verdict() == Verdict.AGREES) {
+                return trial(bills, place, at, withKvarh);
             }
+            BigDecimal closed = here.get().difference().subtract(there.get().difference());
+            if (closed.signum() == 0) {
+                return Optional.empty();
+            }
+            at = at.add(further.subtract(at).multiply(here.get().difference()).divide(closed, Triangle.PRECISION))
+                    .setScale(decimals, RoundingMode.HALF_UP);
         }
         return Optional.empty();
+    }
+
+    private Optional<ReconciledMonth> first(Case bills, int place, BigDecimal kwh, boolean withKvarh) {
+        return trial(bills, place, kwh, withKvarh).flatMap(trial -> trial.month(place, bills));
     }
 
     private Optional<Trial> trial(Case bills, int place, BigDecimal kwh, boolean withKvarh) {
