@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.reconcile;
 
+import java.math.BigDecimal;
 import java.util.List;
 import java.util.stream.Stream;
 import tariff.rate.RateSource;
@@ -25,6 +26,9 @@ record AmountRounding() implements Cause {
 
     @Override
     public Stream<Trial> trials(Case bills) {
+        if (!isSmall(bills)) {
+            return Stream.empty();
+        }
         Stream<Trial> lines = OF_LINES.stream()
                 .flatMap(way -> bills.written(this, "each line " + way.words(), lines(bills.source(), way)));
         Stream<Trial> total = OF_TOTAL.stream()
@@ -33,6 +37,14 @@ record AmountRounding() implements Cause {
                         "the total " + way.words(),
                         new RateSource(way.under(bills.source().tree(), "roundTotal"))));
         return Stream.concat(lines, total);
+    }
+
+    /** Rounding to a whole unit moves no line by more than one, and what is worked out from it by little more. */
+    private static boolean isSmall(Case bills) {
+        BigDecimal most = BigDecimal.valueOf(2L * (bills.rate().lines().size() + 1));
+        return bills.charged().values().stream()
+                .anyMatch(month ->
+                        month.distance().signum() > 0 && month.distance().compareTo(most) <= 0);
     }
 
     private static RateSource lines(RateSource source, Steps way) {

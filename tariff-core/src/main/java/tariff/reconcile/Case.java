@@ -5,12 +5,14 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import java.util.function.UnaryOperator;
 import java.util.stream.Stream;
 import tariff.bill.Billing;
 import tariff.meter.MeteredMonth;
+import tariff.meter.Period;
 import tariff.rate.Rate;
 import tariff.rate.RateSource;
 
@@ -20,21 +22,24 @@ final class Case {
     private final List<MeteredMonth> months;
     private final SortedMap<Integer, ReconciledMonth> charged;
     private final Map<RateSource, Optional<Rate>> compiled;
+    private final Set<Period> settled;
 
     /** @param months in order; those without anything charged are history */
     Case(Billing billing, List<MeteredMonth> months, Agreement agreement) {
-        this(billing, months, byPlace(months, agreement), new HashMap<>());
+        this(billing, months, byPlace(months, agreement), new HashMap<>(), Set.of());
     }
 
     private Case(
             Billing billing,
             List<MeteredMonth> months,
             SortedMap<Integer, ReconciledMonth> charged,
-            Map<RateSource, Optional<Rate>> compiled) {
+            Map<RateSource, Optional<Rate>> compiled,
+            Set<Period> settled) {
         this.billing = billing;
         this.months = months;
         this.charged = charged;
         this.compiled = compiled;
+        this.settled = settled;
     }
 
     private static SortedMap<Integer, ReconciledMonth> byPlace(List<MeteredMonth> months, Agreement agreement) {
@@ -50,7 +55,12 @@ final class Case {
 
     /** The same bills as if the rate were another. */
     Case with(Rate rate) {
-        return new Case(new Billing(rate, billing.site()), months, charged, compiled);
+        return new Case(new Billing(rate, billing.site()), months, charged, compiled, settled);
+    }
+
+    /** The same bills without looking any further into some of the months. */
+    Case settled(Set<Period> explained) {
+        return new Case(billing, months, charged, compiled, explained);
     }
 
     Billing billing() {
@@ -74,10 +84,11 @@ final class Case {
         return charged;
     }
 
-    /** The places of the months that do not agree to the cent. */
+    /** The places of the months that do not agree to the cent and are not settled. */
     List<Integer> open() {
         return charged.entrySet().stream()
                 .filter(month -> month.getValue().verdict() != Verdict.AGREES)
+                .filter(month -> !settled.contains(month.getValue().period()))
                 .map(Map.Entry::getKey)
                 .toList();
     }

@@ -30,18 +30,28 @@ record EstimatedReading() implements Cause {
     @Override
     public Stream<Trial> trials(Case bills) {
         return IntStream.range(0, bills.months().size() - 1)
-                .filter(place ->
-                        areOpposite(bills.charged().get(place), bills.charged().get(place + 1)))
+                .filter(place -> bills.open().contains(place)
+                        && areOpposite(
+                                bills.charged().get(place), bills.charged().get(place + 1)))
                 .boxed()
                 .flatMap(place -> Stream.of(false, true).flatMap(withKvarh -> moved(bills, place, withKvarh).stream()));
     }
 
+    /** The differences cancel at least by half; power factor clauses keep them from doing so wholly. */
     private static boolean areOpposite(@Nullable ReconciledMonth first, @Nullable ReconciledMonth second) {
         return first != null
                 && second != null
                 && first.verdict() == Verdict.DIFFERS
                 && second.verdict() == Verdict.DIFFERS
-                && first.difference().signum() * second.difference().signum() < 0;
+                && first.difference().signum() * second.difference().signum() < 0
+                && first.difference()
+                                .add(second.difference())
+                                .abs()
+                                .multiply(BigDecimal.valueOf(2))
+                                .compareTo(first.difference()
+                                        .abs()
+                                        .max(second.difference().abs()))
+                        <= 0;
     }
 
     /** Follows the slope of the first bill to the amount that was charged; steps of the rate may take several goes. */

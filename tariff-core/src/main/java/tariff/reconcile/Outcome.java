@@ -6,6 +6,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import java.util.stream.Collectors;
@@ -20,6 +21,17 @@ import tariff.meter.Period;
  */
 record Outcome(Trial trial, SortedMap<Integer, ReconciledMonth> months, int gained) {
 
+    /** Tries the first two months alone, and all of them only if both come to agree. */
+    static Optional<Outcome> ofAllOrNothing(Trial trial, Case bills) {
+        boolean promising = bills.open().stream()
+                .limit(2)
+                .allMatch(place -> gain(
+                                trial.month(place, bills).orElse(null),
+                                bills.charged().get(place))
+                        > 0);
+        return promising ? Optional.of(of(trial, bills)) : Optional.empty();
+    }
+
     static Outcome of(Trial trial, Case bills) {
         SortedMap<Integer, ReconciledMonth> months = new TreeMap<>();
         List<Integer> open = bills.open();
@@ -32,7 +44,7 @@ record Outcome(Trial trial, SortedMap<Integer, ReconciledMonth> months, int gain
         }
         if (gained > 0) {
             bills.charged().keySet().stream()
-                    .filter(place -> trial.isAbout(place) && !open.contains(place))
+                    .filter(place -> trial.isAbout(place) && !months.containsKey(place))
                     .forEach(place -> trial.month(place, bills).ifPresent(month -> months.put(place, month)));
         }
         return new Outcome(trial, months, gained);
@@ -82,6 +94,15 @@ record Outcome(Trial trial, SortedMap<Integer, ReconciledMonth> months, int gain
     /** Everything that still separates the bills from the rate, months outside the trial as they stand. */
     BigDecimal residual(Case bills) {
         return residual(bills, months);
+    }
+
+    static BigDecimal residualAsItStands(Case bills) {
+        return residual(bills, Map.of());
+    }
+
+    /** Whether nothing but the rate is otherwise, so that it can be changed once more. */
+    boolean isOfTheRateAlone(Case bills) {
+        return trial.past().isEmpty() && !trial.rate().equals(bills.rate());
     }
 
     Explanation everyMonth(Case bills) {

@@ -1,9 +1,12 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.reconcile;
 
+import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.stream.Collectors;
+import tariff.meter.Triangle;
 
 /** Tries the causes on bills that do not agree, and ranks what would make them agree. */
 final class Search {
@@ -53,10 +56,17 @@ final class Search {
         }
     }
 
+    /** A month that a change of the rate brings to the cent, without breaking another, is not put down to something of its own. */
     private void tryMonths() {
+        Case left = bills.settled(found.stream()
+                .filter(each -> each.breaks().isEmpty())
+                .flatMap(each -> each.explains().stream())
+                .filter(each -> each.month().verdict() == Verdict.AGREES)
+                .map(Explanation.Month::period)
+                .collect(Collectors.toSet()));
         for (Cause cause : Causes.OF_A_MONTH) {
-            List<Outcome> outcomes = cause.trials(bills)
-                    .map(trial -> Outcome.of(trial, bills))
+            List<Outcome> outcomes = cause.trials(left)
+                    .map(trial -> Outcome.of(trial, left))
                     .filter(outcome -> outcome.explainsAllItIsAbout(bills))
                     .map(outcome -> outcome.withWhatFollows(bills))
                     .toList();
@@ -79,23 +89,25 @@ final class Search {
         return explained * 2 > differing || differing == 0;
     }
 
-    /** Whatever brought the bills nearest, together with each other change of the rate. */
+    /** Whatever closed at least half of the distance, together with each other change of the rate. */
     private void tryPairs() {
-        List<Outcome> nearest = ofTheRate.stream()
-                .filter(outcome -> outcome.trial().past().isEmpty()
-                        && !outcome.trial().rate().equals(bills.rate()))
+        BigDecimal half = Outcome.residualAsItStands(bills).divide(BigDecimal.valueOf(2), Triangle.PRECISION);
+        ofTheRate.stream()
+                .filter(outcome -> outcome.isOfTheRateAlone(bills))
+                .filter(outcome -> outcome.residual(bills).compareTo(half) <= 0)
                 .sorted(Comparator.comparing(outcome -> outcome.residual(bills)))
                 .limit(PAIRED_WITH)
-                .toList();
-        for (Outcome one : nearest) {
-            Case changed = bills.with(one.trial().rate());
-            Causes.OF_THE_RATE.stream()
-                    .filter(cause -> !cause.code().equals(one.trial().code()))
-                    .flatMap(cause -> cause.trials(changed))
-                    .map(two -> Outcome.of(one.trial().and(two), bills))
-                    .filter(outcome -> outcome.gained() > 0)
-                    .forEach(outcome -> found.add(outcome.everyMonth(bills)));
-        }
+                .forEach(outcome -> tryPairsWith(outcome.trial()));
+    }
+
+    private void tryPairsWith(Trial one) {
+        Case changed = bills.with(one.rate());
+        Causes.OF_THE_RATE.stream()
+                .filter(cause -> !cause.code().equals(one.code()))
+                .flatMap(cause -> cause.trials(changed))
+                .flatMap(two -> Outcome.ofAllOrNothing(one.and(two), bills).stream())
+                .filter(outcome -> outcome.gained() > 0)
+                .forEach(outcome -> found.add(outcome.everyMonth(bills)));
     }
 
     /** Leaves out what explains only a part of what a better one explains. */
