@@ -30,6 +30,10 @@ class ArchitectureTest {
             knows("tariff.bill", "tariff.rate", "tariff.rate.clause", "tariff.meter", "tariff.notice");
 
     @ArchTest
+    static final ArchRule RECONCILE = knows(
+            "tariff.reconcile", "tariff.bill", "tariff.rate", "tariff.rate.clause", "tariff.meter", "tariff.notice");
+
+    @ArchTest
     static final ArchRule ELECTRICAL = knows("tariff.electrical");
 
     @ArchTest

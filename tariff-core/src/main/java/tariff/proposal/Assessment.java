@@ -25,6 +25,7 @@ import tariff.notice.Refusal;
 import tariff.payback.Appraisal;
 import tariff.payback.Savings;
 import tariff.payback.Venture;
+import tariff.reconcile.Agreement;
 
 /**
  * A bank held against a year of bills: what low power factor costs today, what the bank would save, when it pays back, and on what all
@@ -99,6 +100,7 @@ public record Assessment(
         Set<Assumption> assumptions = new LinkedHashSet<>();
         today.months().forEach(month -> assumptions.addAll(month.asItIs().assumptions()));
         assumptions.addAll(MonthOrder.gaps(sorted));
+        Agreement.of(billing, past, year).assumption().ifPresent(assumptions::add);
         assumptions.addAll(BankAssumptions.of(billing.rate(), proposal, year, exact.isPresent()));
         return new Assessment(
                 billing,

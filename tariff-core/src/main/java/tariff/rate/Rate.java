@@ -29,11 +29,13 @@ import tariff.rate.clause.Written;
 /** A rate that has been checked: one that exists can be billed with. */
 public final class Rate {
     private final RateDefinition definition;
+    private final RateSource source;
     private final Map<String, Line> lines;
     private final List<Clause> clauses;
 
-    private Rate(RateDefinition definition) {
+    private Rate(RateDefinition definition, RateSource source) {
         this.definition = definition;
+        this.source = source;
         Map<String, Line> byName = new LinkedHashMap<>();
         definition.lines().forEach(line -> byName.put(line.name(), line));
         this.lines = Collections.unmodifiableMap(byName);
@@ -61,7 +63,8 @@ public final class Rate {
         if (usable) {
             RateDoubts.check(definition, findings::add);
         }
-        return new Checked(usable ? Optional.of(new Rate(definition)) : Optional.empty(), findings);
+        return new Checked(
+                usable ? Optional.of(new Rate(definition, RateSource.of(file))) : Optional.empty(), findings);
     }
 
     /**
@@ -76,6 +79,11 @@ public final class Rate {
 
     public RateDefinition definition() {
         return definition;
+    }
+
+    /** The rate as it was written, to write it otherwise. */
+    public RateSource source() {
+        return source;
     }
 
     public String name() {
