@@ -117,6 +117,16 @@ class PowerFactorRulesTest {
                 .isEqualTo(lost);
     }
 
+    /** 1 kWh beside 1,000 kVAh is 0.001, which rounds to 0.00; it stays 0.001: 100 × (0.95 ÷ 0.001 − 1) is 94,900 %. Own arithmetic. */
+    @Test
+    void aPowerFactorIsNeverRoundedToNothing() {
+        String rate = rate("'billing': { 'from': 'kVAh', 'round': { 'to': 0.01 } }", "", """
+                { 'name': 'Bill', 'quantity': { 'constant': 100 }, 'price': 1 },
+                { 'name': 'Surcharge', 'percentOf': ['Bill'], 'schedule': { 'powerFactor': 'billing', 'ratioTo': 0.95 } }""");
+        assertThat(last(bill(rate, energies("1", "1000").with(APPARENT_KVAH, 1000))))
+                .isEqualTo("94900.00");
+    }
+
     /** tan φ = √(1 ÷ PF² − 1) at thresholds that rates quote, as whole kvarh for 10,000 kWh; identity. */
     @ParameterizedTest
     @CsvSource({

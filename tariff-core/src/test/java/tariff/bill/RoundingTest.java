@@ -64,6 +64,29 @@ class RoundingTest {
         assertThat(bill(rate, energies("1", "1")).total()).isEqualTo(total);
     }
 
+    /** kW × 0.95 ÷ (kW ÷ kVA) is 0.95 kVA: 475.95 at 1.5 is 713.925, an exact half, though 370 ÷ 501 has no end. Own arithmetic. */
+    @Test
+    void aDivisionOnTheWayDoesNotSpoilAnExactHalf() {
+        String rate = rate("'peak': { 'from': 'peak' }", "", """
+                { 'name': 'Demand', 'quantity': { 'raised': { 'peak': 'kW' }, 'by': { 'powerFactor': 'peak', 'ratioTo': 0.95 } },
+                  'price': 1.5 }""");
+        assertThat(last(bill(
+                        rate,
+                        Bills.baseMonth()
+                                .with(tariff.meter.Register.PEAK_KW, 370)
+                                .with(tariff.meter.Register.PEAK_KVA, 501))))
+                .isEqualTo("713.93");
+    }
+
+    /** 10 kWh × 10 ÷ 30 × 3 is 10 kWh, cut off to 10 and not to 9. Own arithmetic. */
+    @Test
+    void aThirdTimesThreeIsWhole() {
+        String rate = rate(
+                "{ 'name': 'Energy', 'quantity': { 'rounded': { 'share': 3, 'of': { 'prorated': { 'energy': 'kWh' }, 'perDays': 90"
+                        + " } }, 'to': 1, 'mode': 'down' }, 'price': 1 }");
+        assertThat(last(bill(rate, energies("10", "0")))).isEqualTo("10.00");
+    }
+
     /** A percentage is taken of the amounts as printed: 6 % of 0.01, not of 0.0149. Own arithmetic with a price of 0.0149. */
     @Test
     void aPercentageIsTakenOfPrintedAmounts() {

@@ -138,8 +138,11 @@ public record PowerFactorRule(From from, Optional<String> window, Leading leadin
         return Optional.of(rounded(Figure.of(pf, Unit.NUMBER, "{} ÷ {}", top, bottom)));
     }
 
+    /** A month with next to no energy would round to 0, which nothing can be divided by: it keeps the power factor it has. */
     private Figure rounded(Figure powerFactor) {
-        return round.map(rounding -> rounding.apply(powerFactor)).orElse(powerFactor);
+        return round.map(rounding -> rounding.apply(powerFactor))
+                .filter(figure -> figure.value().signum() > 0)
+                .orElse(powerFactor);
     }
 
     public String words() {
