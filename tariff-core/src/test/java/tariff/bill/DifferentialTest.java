@@ -66,7 +66,7 @@ class DifferentialTest {
                 .isLessThan(new BigDecimal("1e-15"));
     }
 
-    private static MeteredMonth metered(NaiveBill.Month month) {
+    static MeteredMonth metered(NaiveBill.Month month) {
         Readings totals = Readings.none();
         Readings day = Readings.none();
         for (Register register : Register.values()) {
