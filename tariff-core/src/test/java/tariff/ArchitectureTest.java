@@ -33,6 +33,9 @@ class ArchitectureTest {
     static final ArchRule ELECTRICAL = knows("tariff.electrical");
 
     @ArchTest
+    static final ArchRule CHART = knows("tariff.chart");
+
+    @ArchTest
     static final ArchRule CORRECTION =
             knows("tariff.correction", "tariff.electrical", "tariff.meter", "tariff.notice", "org.hipparchus..");
 

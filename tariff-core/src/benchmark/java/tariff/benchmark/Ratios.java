@@ -13,11 +13,19 @@ public final class Ratios {
     private Ratios() {}
 
     public static void main(String[] args) throws RunnerException {
+        String which = args.length == 0 ? "tariff.benchmark" : args[0];
         Collection<RunResult> results =
-                new Runner(new OptionsBuilder().include("AssessmentBenchmark").build()).run();
-        double asData = score(results, "rateAsData");
-        double byHand = score(results, "byHand");
-        System.out.printf(Locale.ROOT, "rate as data ÷ by hand = %.2f (at most 3)%n", asData / byHand);
+                new Runner(new OptionsBuilder().include(which).build()).run();
+        ratio(results, "rateAsData", "byHand", 3);
+        ratio(results, "billedYear", "bareLoop", 10);
+    }
+
+    private static void ratio(Collection<RunResult> results, String ours, String reference, double most) {
+        if (results.stream()
+                .anyMatch(result -> result.getPrimaryResult().getLabel().equals(ours))) {
+            double ratio = score(results, ours) / score(results, reference);
+            System.out.printf(Locale.ROOT, "%s ÷ %s = %.2f (at most %.0f)%n", ours, reference, ratio, most);
+        }
     }
 
     private static double score(Collection<RunResult> results, String name) {

@@ -14,6 +14,7 @@ import java.util.Optional;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import tariff.meter.Cut;
+import tariff.meter.CutEnergies;
 import tariff.meter.Derivable;
 import tariff.meter.MeteredMonth;
 import tariff.meter.Period;
@@ -216,9 +217,18 @@ final class Reckoning implements Facts {
         MeteredMonth.Detail detail = month.detail()
                 .orElseThrow(() -> new MissingReading("the rate counts by the " + cut.one()
                         + "; the bill gives only totals of the period, so give interval data"));
-        return detail.each(cut).stream()
-                .map(part -> new Reckoning(billing, part, List.of(), 0))
-                .toList();
+        try {
+            return detail.each(cut).stream()
+                    .map(part -> new Reckoning(billing, part, List.of(), 0))
+                    .toList();
+        } catch (IllegalArgumentException tooCoarse) {
+            throw new MissingReading("the rate counts by the " + cut.one() + "; " + tooCoarse.getMessage());
+        }
+    }
+
+    @Override
+    public Optional<CutEnergies> energies(Cut cut) {
+        return month.detail().flatMap(detail -> detail.energies(cut));
     }
 
     @Override

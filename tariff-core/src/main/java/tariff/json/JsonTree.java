@@ -5,6 +5,7 @@ import com.fasterxml.jackson.core.JsonParser;
 import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.core.StreamReadConstraints;
 import com.fasterxml.jackson.core.StreamReadFeature;
+import com.fasterxml.jackson.core.exc.StreamConstraintsException;
 import com.fasterxml.jackson.core.json.JsonReadFeature;
 import com.fasterxml.jackson.databind.DeserializationFeature;
 import com.fasterxml.jackson.databind.ObjectReader;
@@ -16,16 +17,18 @@ import tariff.notice.Refusal;
 
 /**
  * A JSON document as maps, lists, texts, decimals, true and false. Decimals keep the digits they were written with; a key that stands
- * twice, a document deeper than 60 levels or a number of more than 100 characters is refused.
+ * twice, a document deeper than 60 levels or of more than 50,000 parts, or a number of more than 100 characters is refused.
  */
 public final class JsonTree {
     private static final int MAX_DEPTH = 60;
     private static final int MAX_NUMBER_LENGTH = 100;
+    private static final int MAX_PARTS = 50_000;
 
     private static final ObjectReader READER = JsonMapper.builder(com.fasterxml.jackson.core.JsonFactory.builder()
                     .streamReadConstraints(StreamReadConstraints.builder()
                             .maxNestingDepth(MAX_DEPTH)
                             .maxNumberLength(MAX_NUMBER_LENGTH)
+                            .maxTokenCount(MAX_PARTS)
                             .build())
                     .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
                     .build())
@@ -46,6 +49,10 @@ public final class JsonTree {
     public static @Nullable Object read(byte[] json) {
         try {
             return decimals(READER.readValue(json));
+        } catch (StreamConstraintsException e) {
+            throw new Refusal(Finding.error("too-large", "", "is larger than a document can be")
+                    .allowed(MAX_DEPTH + " levels, " + MAX_PARTS + " parts, numbers of " + MAX_NUMBER_LENGTH
+                            + " characters"));
         } catch (JsonProcessingException e) {
             String where = e.getLocation() == null
                     ? ""

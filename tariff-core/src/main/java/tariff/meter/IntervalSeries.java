@@ -21,6 +21,8 @@ public final class IntervalSeries {
     private static final Set<Integer> STEPS = Set.of(5, 10, 15, 30, 60);
     /** So large a total still fits a long after it is multiplied by the twelve five-minute intervals of an hour. */
     private static final long LARGEST_TOTAL = 1L << 59;
+    /** So large a figure stays in the range of {@link Apparent} as the power of a five-minute interval. */
+    private static final long LARGEST = 1L << 51;
 
     private final Instant start;
     private final int stepMinutes;
@@ -42,8 +44,8 @@ public final class IntervalSeries {
      * @param leadingKvarh as long as {@code kwh}
      * @param exportedKwh as long as {@code kwh}, if the meter has the register
      * @param absent the intervals that were not recorded
-     * @throws IllegalArgumentException if the arrays differ in length or are empty, an energy is below zero, a total is beyond
-     *     2<sup>59</sup>, or start, step or scale is not as said
+     * @throws IllegalArgumentException if the arrays differ in length or are empty, an energy is below zero, one is beyond
+     *     2<sup>51</sup>, a total beyond 2<sup>59</sup>, or start, step or scale is not as said
      */
     public IntervalSeries(
             Instant start,
@@ -64,10 +66,11 @@ public final class IntervalSeries {
         this.zone = zone;
         this.scale = scale;
         this.absent = (BitSet) absent.clone();
-        this.kwh = checked(kwh, "kWh");
-        this.laggingKvarh = checked(laggingKvarh, "lagging kvarh");
-        this.leadingKvarh = checked(leadingKvarh, "leading kvarh");
-        this.exportedKwh = exportedKwh.isPresent() ? checked(exportedKwh.get(), "exported kWh") : null;
+        int size = kwh.length;
+        this.kwh = checked(kwh, size, "kWh");
+        this.laggingKvarh = checked(laggingKvarh, size, "lagging kvarh");
+        this.leadingKvarh = checked(leadingKvarh, size, "leading kvarh");
+        this.exportedKwh = exportedKwh.isPresent() ? checked(exportedKwh.get(), size, "exported kWh") : null;
         require(absent.length() <= kwh.length, "interval " + (absent.length() - 1) + " is absent from " + kwh.length);
     }
 
@@ -110,6 +113,11 @@ public final class IntervalSeries {
         return absent.get(interval);
     }
 
+    /** Whether any interval of a range was recorded. */
+    boolean recordedIn(IntervalRange range) {
+        return absent.nextClearBit(range.from()) < range.to();
+    }
+
     public boolean hasExport() {
         return exportedKwh != null;
     }
@@ -145,7 +153,11 @@ public final class IntervalSeries {
 
     /** The first interval that starts at the moment or later, kept inside 0 … size. */
     public int firstFrom(Instant moment) {
-        long seconds = moment.getEpochSecond() - start.getEpochSecond();
+        return firstFrom(moment.getEpochSecond());
+    }
+
+    int firstFrom(long epochSecond) {
+        long seconds = epochSecond - start.getEpochSecond();
         long index = -Math.floorDiv(-seconds, 60L * stepMinutes);
         return (int) Math.max(0, Math.min(size(), index));
     }
@@ -196,25 +208,23 @@ public final class IntervalSeries {
         return date.atStartOfDay(zone).toInstant();
     }
 
-    private long[] checked(long[] given, String name) {
-        require(
-                given.length == size(kwh, given),
-                name + " of " + given.length + " intervals beside kWh of another number");
+    private long[] checked(long[] given, int size, String name) {
+        require(given.length == size, name + " of " + given.length + " intervals beside kWh of " + size);
         long[] copy = given.clone();
         long total = 0;
         for (int i = 0; i < copy.length; i++) {
             if (absent.get(i)) {
                 copy[i] = 0;
             }
-            require(copy[i] >= 0, name + " of the interval from " + startOf(i) + " is below zero");
+            if (copy[i] < 0) {
+                throw new IllegalArgumentException(name + " of the interval from " + startOf(i) + " is below zero");
+            }
             total += copy[i];
-            require(total >= 0 && total <= LARGEST_TOTAL, name + " add up to more than can be held");
+            if (copy[i] > LARGEST || total > LARGEST_TOTAL) {
+                throw new IllegalArgumentException(name + " add up to more than can be held");
+            }
         }
         return copy;
-    }
-
-    private static int size(long @Nullable [] known, long[] given) {
-        return known == null ? given.length : known.length;
     }
 
     private static void require(boolean holds, String message) {

@@ -34,6 +34,11 @@ public record MeteredMonth(
     /** What is inside a period. */
     @FunctionalInterface
     public interface Detail {
+        /** The energies of each part in whole numbers, if they are at hand. */
+        default Optional<CutEnergies> energies(Cut cut) {
+            return Optional.empty();
+        }
+
         /** The period cut into hours, days …, each with registers of its own, in order. */
         List<MeteredMonth> each(Cut cut);
     }
@@ -42,8 +47,19 @@ public record MeteredMonth(
         windows = Collections.unmodifiableMap(new TreeMap<>(windows));
     }
 
+    /** A month of totals, without interval data. */
+    public MeteredMonth(
+            Period period,
+            Readings totals,
+            Map<String, Readings> windows,
+            Charged charged,
+            Optional<LocalDate> statementDate,
+            boolean estimated) {
+        this(period, totals, windows, charged, statementDate, estimated, Optional.empty());
+    }
+
     public MeteredMonth(Period period, Readings totals) {
-        this(period, totals, Map.of(), Charged.nothingKnown(), Optional.empty(), false, Optional.empty());
+        this(period, totals, Map.of(), Charged.nothingKnown(), Optional.empty(), false);
     }
 
     /** A calendar month without readings, to add them to: {@code MeteredMonth.of("2026-03").with(PEAK_KW, "400")}. */

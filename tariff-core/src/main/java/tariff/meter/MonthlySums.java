@@ -21,8 +21,9 @@ import java.util.stream.Stream;
  * @param series the meter
  * @param calendar the rate's windows
  * @param demand what a peak is averaged over
+ * @param apparentKvah whether kVAh are wanted: a root for each interval, which most rates do not need
  */
-public record MonthlySums(IntervalSeries series, WindowCalendar calendar, DemandInterval demand) {
+public record MonthlySums(IntervalSeries series, WindowCalendar calendar, DemandInterval demand, boolean apparentKvah) {
     /** @throws IllegalArgumentException if the series cannot give such a demand */
     public MonthlySums {
         demand.stepsIn(series);
@@ -31,7 +32,12 @@ public record MonthlySums(IntervalSeries series, WindowCalendar calendar, Demand
     /** No windows; peaks over the step of the series. */
     public static MonthlySums of(IntervalSeries series) {
         return new MonthlySums(
-                series, new WindowCalendar(series, Map.of()), DemandInterval.block(series.stepMinutes()));
+                series, new WindowCalendar(series, Map.of()), DemandInterval.block(series.stepMinutes()), true);
+    }
+
+    /** The same questions to another series of the same intervals, such as the one behind a bank. */
+    public MonthlySums on(IntervalSeries other) {
+        return new MonthlySums(other, calendar, demand, apparentKvah);
     }
 
     /** Calendar months; the first and the last only as far as the series has days. */
@@ -45,8 +51,7 @@ public record MonthlySums(IntervalSeries series, WindowCalendar calendar, Demand
 
     /** The period's registers from the intervals that are present; see {@link IntervalSeries#coverage} for the others. */
     public MeteredMonth month(Period period) {
-        return registers(period, series.range(period))
-                .withDetail(cut -> each(cut, period).map(SubPeriod::registers).toList());
+        return registers(period, series.range(period)).withDetail(new Inside(this, period));
     }
 
     /** The highest demands of the period. */
@@ -70,22 +75,35 @@ public record MonthlySums(IntervalSeries series, WindowCalendar calendar, Demand
     }
 
     private Stream<SubPeriod> each(Cut cut, LocalDate date) {
-        Instant midnight = date.atStartOfDay(series.zone()).toInstant();
-        Instant end = date.plusDays(1).atStartOfDay(series.zone()).toInstant();
-        if (cut == Cut.DAYS) {
-            return subPeriod(date, midnight, end).stream();
-        }
-        long seconds = 60L * cut.minutes();
-        return Stream.iterate(midnight, at -> at.isBefore(end), at -> at.plusSeconds(seconds))
-                .flatMap(at -> subPeriod(date, at, earlier(at.plusSeconds(seconds), end)).stream());
+        List<SubPeriod> parts = new ArrayList<>();
+        cut(cut, date, (from, to, range) -> {
+            MeteredMonth registers = registers(new Period(date, date), range);
+            if (!registers.totals().values().isEmpty()) {
+                parts.add(new SubPeriod(Instant.ofEpochSecond(from), Instant.ofEpochSecond(to), registers));
+            }
+        });
+        return parts.stream();
     }
 
-    private List<SubPeriod> subPeriod(LocalDate date, Instant from, Instant to) {
-        IntervalRange range = new IntervalRange(series.firstFrom(from), series.firstFrom(to));
-        MeteredMonth registers = registers(new Period(date, date), range);
-        return range.size() == 0 || registers.totals().values().isEmpty()
-                ? List.of()
-                : List.of(new SubPeriod(from, to, registers));
+    /** What is done with a part of a day, from one second of the epoch to another. */
+    interface Part {
+        void visit(long from, long to, IntervalRange range);
+    }
+
+    /** Cuts a day by the clock; parts outside the series are passed over. */
+    void cut(Cut cut, LocalDate date, Part part) {
+        long midnight = date.atStartOfDay(series.zone()).toEpochSecond();
+        long end = date.plusDays(1).atStartOfDay(series.zone()).toEpochSecond();
+        long seconds = cut == Cut.DAYS ? end - midnight : 60L * cut.minutes();
+        int next = series.firstFrom(midnight);
+        for (long from = midnight; from < end; from += seconds) {
+            long to = Math.min(from + seconds, end);
+            int first = next;
+            next = series.firstFrom(to);
+            if (next > first) {
+                part.visit(from, to, new IntervalRange(first, next));
+            }
+        }
     }
 
     private MeteredMonth registers(Period period, IntervalRange range) {
@@ -111,9 +129,5 @@ public record MonthlySums(IntervalSeries series, WindowCalendar calendar, Demand
                     whole.last().isAfter(days.last()) ? days.last() : whole.last()));
         }
         return periods;
-    }
-
-    private static Instant earlier(Instant one, Instant other) {
-        return one.isBefore(other) ? one : other;
     }
 }

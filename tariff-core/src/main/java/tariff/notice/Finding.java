@@ -43,6 +43,11 @@ public record Finding(
         return new Finding(severity, code, where, message, found, Optional.of(text));
     }
 
+    /** The same finding about an input that stands inside another, at this pointer. */
+    public Finding inside(String pointer) {
+        return new Finding(severity, code, pointer + where, message, found, allowed);
+    }
+
     public boolean isError() {
         return severity == Severity.ERROR;
     }

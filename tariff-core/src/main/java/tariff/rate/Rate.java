@@ -5,6 +5,7 @@ import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
@@ -13,11 +14,15 @@ import java.util.Set;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import tariff.meter.Period;
+import tariff.meter.Register;
+import tariff.meter.Window;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
 import tariff.rate.clause.Clause;
 import tariff.rate.clause.Earlier;
 import tariff.rate.clause.Line;
+import tariff.rate.clause.Metered;
+import tariff.rate.clause.Named;
 import tariff.rate.clause.Scope;
 import tariff.rate.clause.Written;
 
@@ -100,6 +105,40 @@ public final class Rate {
     /** Whether a month's bill depends on the months before it. */
     public boolean looksBack() {
         return clauses(Earlier.class).findAny().isPresent();
+    }
+
+    /** The registers that a clause counts in this month, through the quantities it names; the past is left out. */
+    public Set<Metered> registers(Clause clause) {
+        Set<Metered> registers = new LinkedHashSet<>();
+        collect(clause, registers);
+        return registers;
+    }
+
+    private void collect(@Nullable Clause clause, Set<Metered> registers) {
+        if (clause == null || clause instanceof Earlier) {
+            return;
+        }
+        if (clause instanceof Metered metered) {
+            registers.add(metered);
+        }
+        if (clause instanceof Named named) {
+            collect(definition.quantities().get(named.name()), registers);
+        }
+        clause.parts().forEach(part -> collect(part, registers));
+    }
+
+    /** The rate's windows by name. */
+    public Map<String, Window> windows() {
+        Map<String, Window> windows = new LinkedHashMap<>();
+        definition.windows().forEach((name, clause) -> windows.put(name, clause.window()));
+        return windows;
+    }
+
+    /** Whether a bill under this rate looks at a register, directly or through a power factor. */
+    public boolean reads(Register register) {
+        return clauses(Metered.class).anyMatch(each -> each.register() == register)
+                || definition.powerFactors().values().stream()
+                        .anyMatch(rule -> rule.registers().contains(register));
     }
 
     /** The hours of one of the rate's windows in a period; empty if the rate does not define it. */

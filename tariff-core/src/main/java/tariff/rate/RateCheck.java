@@ -25,6 +25,10 @@ final class RateCheck {
     private RateCheck() {}
 
     static void check(RateDefinition rate, Consumer<Finding> findings) {
+        if (RateSize.isTooLarge(rate)) {
+            findings.accept(RateSize.tooLarge());
+            return;
+        }
         Scope top = new Scope("", names(rate), List.of(), Set.of(), findings);
         rate.powerFactors()
                 .forEach((name, rule) -> rule.check(top.at("powerFactors").at(name)));

@@ -11,7 +11,10 @@ import java.time.ZoneOffset;
 import java.util.BitSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.Random;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 import tariff.json.RateFile;
 import tariff.meter.IntervalSeries;
 import tariff.meter.MeteredMonth;
@@ -76,6 +79,50 @@ class HourlyBillsTest {
                         + " 'price': 1 }");
         MeteredMonth month = series(60, new long[] {10, 70, 20, 50, 30}, new long[5]);
         assertThat(Bills.bill(rate, month).total()).isEqualByComparingTo("50.00");
+    }
+
+    /** A rounding to the ninth decimal changes nothing, but it keeps the sum out of whole numbers. */
+    @ParameterizedTest
+    @ValueSource(
+            strings = {
+                "{ 'excess': { 'energy': 'lagging kvarh' }, 'over': { 'share': 0.4843, 'of': { 'energy': 'kWh' } } }",
+                "{ 'all': { 'energy': 'lagging kvarh' }, 'onceAbove': { 'share': 0.5, 'of': { 'energy': 'kWh' } } }",
+                "{ 'largest': [ { 'energy': 'lagging kvarh' }, { 'hours': 0.25, 'of': { 'agreed': 'kW' } }, { 'energy': 'kWh' } ] }",
+                "{ 'smallest': [ { 'energy': 'lagging kvarh' }, { 'constant': 17.25, 'unit': 'kvarh' } ] }",
+                "{ 'sum': [ { 'energy': 'lagging kvarh' }, { 'share': -1, 'of': { 'energy': 'leading kvarh' } } ] }"
+            })
+    void sumsInWholeNumbersEqualSumsInDecimals(String quantity) {
+        String sum =
+                "{ 'name': 'X', 'quantity': { 'each': '%s', 'take': 'sum', 'of': %s }, 'price': 1, 'round': { 'to': 0.0000001 } }";
+        String decimals = "{ 'rounded': " + quantity + ", 'to': 0.000000001 }";
+        Random random = new Random(20260301);
+        for (String cut : List.of("quarterHour", "halfHour", "hour", "day")) {
+            long[] kwh = random.longs(96, 0, 60).toArray();
+            long[] lagging = random.longs(96, 0, 40).toArray();
+            MeteredMonth month = series(15, kwh, lagging);
+            Site site = Bills.agreed(tariff.meter.Unit.KW, "100");
+            assertThat(Bills.bill(rate(String.format(sum, cut, quantity)), site, List.of(month))
+                            .get(0)
+                            .lines()
+                            .get(0)
+                            .amount())
+                    .isEqualTo(Bills.bill(rate(String.format(sum, cut, decimals)), site, List.of(month))
+                            .get(0)
+                            .lines()
+                            .get(0)
+                            .amount())
+                    .isNotZero();
+        }
+    }
+
+    @Test
+    void aSeriesThatIsTooCoarseIsRefusedByName() {
+        String rate = rate(
+                "{ 'name': 'X', 'quantity': { 'each': 'quarterHour', 'take': 'sum', 'of': { 'energy': 'kWh' } }, 'price': 1 }");
+        MeteredMonth month = series(60, new long[] {10}, new long[] {10});
+        assertThatThrownBy(() -> Bills.bill(rate, month))
+                .hasMessage(
+                        "2026-03-02 to 2026-03-02: the rate counts by the quarter-hour; a series of 60 minutes has no quarter-hours");
     }
 
     @Test

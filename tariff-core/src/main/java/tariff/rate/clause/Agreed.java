@@ -4,6 +4,7 @@ package tariff.rate.clause;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
+import tariff.meter.CutEnergies;
 import tariff.meter.Unit;
 
 /** A figure in the site's contract, such as a contract demand: {@code { "agreed": "kW" }}. */
@@ -23,6 +24,11 @@ record Agreed(Unit of) implements Quantity {
     @Override
     public Figure value(Facts facts) {
         return facts.agreed(of);
+    }
+
+    @Override
+    public Optional<Column> column(CutEnergies parts, Facts facts) {
+        return Column.constant(value(facts).value(), of, parts.size());
     }
 
     @Override

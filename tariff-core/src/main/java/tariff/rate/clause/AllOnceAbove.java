@@ -4,6 +4,7 @@ package tariff.rate.clause;
 import java.math.BigDecimal;
 import java.util.List;
 import java.util.Optional;
+import tariff.meter.CutEnergies;
 import tariff.meter.Unit;
 
 /**
@@ -32,13 +33,19 @@ record AllOnceAbove(Quantity of, Quantity limit) implements Quantity {
     }
 
     @Override
+    public Optional<Column> column(CutEnergies parts, Facts facts) {
+        return of.column(parts, facts)
+                .flatMap(whole -> limit.column(parts, facts).map(edge -> whole.with(edge, (a, b) -> a > b ? a : 0)));
+    }
+
+    @Override
     public String words() {
         return "all of " + of.words() + " once above " + limit.words();
     }
 
     @Override
     public Optional<Allowance> allowance() {
-        return Allowance.on(of, limit);
+        return Optional.of(new Allowance(of, limit));
     }
 
     @Override

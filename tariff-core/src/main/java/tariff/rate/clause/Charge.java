@@ -53,7 +53,7 @@ record Charge(Heading heading, Quantity quantity, Price price) implements Line {
 
     @Override
     public Optional<Allowance> allowance() {
-        return price.freeUpTo().flatMap(free -> Allowance.on(quantity, free));
+        return price.freeUpTo().map(free -> new Allowance(quantity, free));
     }
 
     @Override

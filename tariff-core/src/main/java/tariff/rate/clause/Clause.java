@@ -38,20 +38,10 @@ public interface Clause {
     }
 
     /**
-     * How much of a register is free.
+     * How much of a quantity is free.
      *
-     * @param of the register that is counted
+     * @param of what is counted
      * @param free up to which nothing is asked for it
      */
-    record Allowance(Metered of, Quantity free) {
-
-        /** The allowance on the first register that a quantity counts; empty if it counts none. */
-        static Optional<Allowance> on(Quantity quantity, Quantity free) {
-            return quantity.all()
-                    .filter(Metered.class::isInstance)
-                    .map(Metered.class::cast)
-                    .findFirst()
-                    .map(metered -> new Allowance(metered, free));
-        }
-    }
+    record Allowance(Quantity of, Quantity free) {}
 }

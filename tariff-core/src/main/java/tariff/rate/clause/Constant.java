@@ -5,6 +5,7 @@ import java.math.BigDecimal;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
+import tariff.meter.CutEnergies;
 import tariff.meter.Unit;
 
 /** A number that stands in the rate: {@code { "constant": 50, "unit": "kVA" }}; without a unit it is a plain number. */
@@ -31,6 +32,11 @@ record Constant(BigDecimal number, Unit of) implements Quantity {
     @Override
     public Figure value(Facts facts) {
         return Figure.given(number, of, "");
+    }
+
+    @Override
+    public Optional<Column> column(CutEnergies parts, Facts facts) {
+        return Column.constant(number, of, parts.size());
     }
 
     @Override

@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import tariff.meter.Cut;
+import tariff.meter.CutEnergies;
 import tariff.meter.Triangle;
 import tariff.meter.Unit;
 
@@ -42,6 +43,21 @@ record Each(Cut cut, int count, Quantity of) implements Quantity {
 
     @Override
     public Figure value(Facts facts) {
+        return inWholeNumbers(facts).orElseGet(() -> inDecimals(facts));
+    }
+
+    /** The sum in whole numbers, where that is possible; the same to the last digit, and a hundred times quicker. */
+    private Optional<Figure> inWholeNumbers(Facts facts) {
+        Optional<CutEnergies> parts = count == 0 ? facts.energies(cut) : Optional.empty();
+        try {
+            return parts.flatMap(energies -> of.column(energies, facts)
+                    .map(column -> Figure.given(column.sum(), column.unit(), how(energies.size()))));
+        } catch (ArithmeticException tooLarge) {
+            return Optional.empty();
+        }
+    }
+
+    private Figure inDecimals(Facts facts) {
         List<Figure> figures = facts.each(cut).stream().map(of::value).toList();
         if (figures.isEmpty()) {
             return Figure.given(BigDecimal.ZERO, Unit.NUMBER, "no " + cut.one());
@@ -58,8 +74,7 @@ record Each(Cut cut, int count, Quantity of) implements Quantity {
                     .reduce(BigDecimal.ZERO, BigDecimal::add)
                     .divide(BigDecimal.valueOf(taken), Triangle.PRECISION);
         }
-        return Figure.given(
-                value, figures.get(0).unit(), takeWords() + " over " + figures.size() + " " + cut.one() + "s");
+        return Figure.given(value, figures.get(0).unit(), how(figures.size()));
     }
 
     @Override
@@ -70,6 +85,10 @@ record Each(Cut cut, int count, Quantity of) implements Quantity {
     @Override
     public List<Clause> parts() {
         return List.of(of);
+    }
+
+    private String how(int parts) {
+        return takeWords() + " over " + parts + " " + cut.words();
     }
 
     private String takeWords() {

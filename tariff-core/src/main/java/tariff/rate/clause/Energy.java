@@ -4,6 +4,7 @@ package tariff.rate.clause;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
+import tariff.meter.CutEnergies;
 import tariff.meter.Register;
 
 /**
@@ -22,6 +23,22 @@ record Energy(Register register, Optional<String> window) implements Metered {
 
     static Quantity read(Written in) {
         return new Energy(in.requiredWord("energy", WORDS, Register.ENERGY_KWH), in.optionalText("in"));
+    }
+
+    @Override
+    public Optional<Column> column(CutEnergies parts, Facts facts) {
+        if (window.isPresent() || register == Register.APPARENT_KVAH) {
+            return Optional.empty();
+        }
+        return Optional.of(new Column(
+                register.unit(),
+                parts.scale(),
+                switch (register) {
+                    case LAGGING_KVARH -> parts.laggingKvarh();
+                    case LEADING_KVARH -> parts.leadingKvarh();
+                    case EXPORTED_KWH -> parts.exportedKwh();
+                    default -> parts.kwh();
+                }));
     }
 
     @Override

@@ -4,6 +4,7 @@ package tariff.rate.clause;
 import java.math.BigDecimal;
 import java.util.List;
 import java.util.Optional;
+import tariff.meter.CutEnergies;
 import tariff.meter.Unit;
 
 /** What one quantity has above another, never below zero: {@code { "excess": { "peak": "lagging kvar" }, "over": … }}. */
@@ -29,13 +30,20 @@ record Excess(Quantity of, Quantity over) implements Quantity {
     }
 
     @Override
+    public Optional<Column> column(CutEnergies parts, Facts facts) {
+        return of.column(parts, facts)
+                .flatMap(whole -> over.column(parts, facts)
+                        .map(free -> whole.with(free, (a, b) -> Math.max(0, Math.subtractExact(a, b)))));
+    }
+
+    @Override
     public String words() {
         return of.words() + " above " + over.words();
     }
 
     @Override
     public Optional<Allowance> allowance() {
-        return Allowance.on(of, over);
+        return Optional.of(new Allowance(of, over));
     }
 
     @Override

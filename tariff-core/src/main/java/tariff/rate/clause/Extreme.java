@@ -3,6 +3,8 @@ package tariff.rate.clause;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.function.LongBinaryOperator;
+import tariff.meter.CutEnergies;
 import tariff.meter.Unit;
 
 /** What {@link Largest} and {@link Smallest} share: one of several is taken whole, with the unit of the first. */
@@ -30,5 +32,13 @@ final class Extreme {
             }
         }
         return Figure.of(best.value(), figures[0].unit(), words + "{}" + ", {}".repeat(figures.length - 1), figures);
+    }
+
+    static Optional<Column> columns(List<Quantity> of, CutEnergies parts, Facts facts, LongBinaryOperator combine) {
+        Optional<Column> all = of.get(0).column(parts, facts);
+        for (Quantity each : of.subList(1, of.size())) {
+            all = all.flatMap(sofar -> each.column(parts, facts).map(next -> sofar.with(next, combine)));
+        }
+        return all;
     }
 }

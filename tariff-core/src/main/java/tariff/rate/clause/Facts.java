@@ -6,6 +6,7 @@ import java.time.LocalDate;
 import java.util.List;
 import java.util.Optional;
 import tariff.meter.Cut;
+import tariff.meter.CutEnergies;
 import tariff.meter.Period;
 import tariff.meter.Register;
 import tariff.meter.Unit;
@@ -59,6 +60,9 @@ public interface Facts {
      * @throws MissingReading if only totals of the period are known
      */
     List<? extends Facts> each(Cut cut);
+
+    /** The energies of each hour, day … of the period in whole numbers, where interval data give them. */
+    Optional<CutEnergies> energies(Cut cut);
 
     /** Notes something taken to be so because the data do not say. */
     void assume(Assumption assumption);

@@ -4,6 +4,7 @@ package tariff.rate.clause;
 import java.math.BigDecimal;
 import java.util.List;
 import java.util.Optional;
+import tariff.meter.CutEnergies;
 import tariff.meter.Unit;
 
 /**
@@ -32,6 +33,11 @@ record HoursOf(BigDecimal hours, Quantity of) implements Quantity {
         Figure demand = of.value(facts);
         return Figure.of(
                 hours.multiply(demand.value()), energy(demand.unit()), "{} h × {}", Figure.number(hours), demand);
+    }
+
+    @Override
+    public Optional<Column> column(CutEnergies parts, Facts facts) {
+        return of.column(parts, facts).map(demand -> demand.times(hours).in(energy(demand.unit())));
     }
 
     @Override

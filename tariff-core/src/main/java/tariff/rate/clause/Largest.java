@@ -5,6 +5,7 @@ import java.math.BigDecimal;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
+import tariff.meter.CutEnergies;
 import tariff.meter.Register;
 import tariff.meter.Unit;
 
@@ -23,6 +24,11 @@ record Largest(List<Quantity> of) implements Quantity {
     @Override
     public Figure value(Facts facts) {
         return Extreme.of(of, facts, 1, "largest of ");
+    }
+
+    @Override
+    public Optional<Column> column(CutEnergies parts, Facts facts) {
+        return Extreme.columns(of, parts, facts, Math::max);
     }
 
     @Override

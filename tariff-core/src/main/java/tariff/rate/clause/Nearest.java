@@ -10,6 +10,7 @@ import java.util.stream.Collectors;
 /** Finds what somebody probably meant to write. */
 public final class Nearest {
     private static final int SLIP = 3;
+    private static final int MOST_LISTED = 30;
 
     private Nearest() {}
 
@@ -22,7 +23,10 @@ public final class Nearest {
 
     /** The known words for a message. */
     public static String list(Collection<String> known) {
-        return known.isEmpty() ? "none is defined" : known.stream().collect(Collectors.joining(", "));
+        String more = known.size() > MOST_LISTED ? " and " + (known.size() - MOST_LISTED) + " more" : "";
+        return known.isEmpty()
+                ? "none is defined"
+                : known.stream().limit(MOST_LISTED).collect(Collectors.joining(", ")) + more;
     }
 
     static Optional<String> nearest(String written, Collection<String> known) {

@@ -5,6 +5,7 @@ import java.math.BigDecimal;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import tariff.meter.Register;
 import tariff.meter.Triangle;
 import tariff.meter.Unit;
@@ -23,20 +24,22 @@ public record PowerFactorRule(From from, Optional<String> window, Leading leadin
     /** The registers a power factor is worked out from. */
     public enum From {
         /** kWh ÷ √(kWh² + kvarh²) of the period. */
-        ENERGIES("energies", "from the period's kWh and kvarh"),
+        ENERGIES("energies", "from the period's kWh and kvarh", Register.ENERGY_KWH, Register.LAGGING_KVARH),
         /** kWh ÷ kVAh; never above the one from energies. */
-        APPARENT("kVAh", "kWh ÷ kVAh"),
+        APPARENT("kVAh", "kWh ÷ kVAh", Register.ENERGY_KWH, Register.APPARENT_KVAH),
         /** Highest kW ÷ highest kVA. */
-        PEAK("peak", "highest kW ÷ highest kVA"),
+        PEAK("peak", "highest kW ÷ highest kVA", Register.PEAK_KW, Register.PEAK_KVA),
         /** As printed on the bill. */
-        PRINTED("printed", "as printed on the bill");
+        PRINTED("printed", "as printed on the bill", Register.POWER_FACTOR);
 
         private final String key;
         private final String words;
+        private final Set<Register> registers;
 
-        From(String key, String words) {
+        From(String key, String words, Register... registers) {
             this.key = key;
             this.words = words;
+            this.registers = Set.of(registers);
         }
     }
 
@@ -76,6 +79,11 @@ public record PowerFactorRule(From from, Optional<String> window, Leading leadin
                 Rounding.readOptional(in, "round"));
         in.refuseOtherKeys();
         return rule;
+    }
+
+    /** The registers it is worked out from, leading kvarh aside. */
+    public Set<Register> registers() {
+        return from.registers;
     }
 
     public void check(Scope scope) {

@@ -4,6 +4,7 @@ package tariff.rate.clause;
 import java.math.BigDecimal;
 import java.util.List;
 import java.util.Optional;
+import tariff.meter.CutEnergies;
 import tariff.meter.Unit;
 
 /**
@@ -37,6 +38,11 @@ public sealed interface Quantity extends Clause
 
     /** What it comes to in this month. */
     Figure value(Facts facts);
+
+    /** What it comes to in each part of a period, in whole numbers; empty if it needs decimals. */
+    default Optional<Column> column(CutEnergies parts, Facts facts) {
+        return Optional.empty();
+    }
 
     /** A noun phrase: {@code 33 % of the kWh}. */
     String words();

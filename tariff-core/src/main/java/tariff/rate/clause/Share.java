@@ -4,6 +4,7 @@ package tariff.rate.clause;
 import java.math.BigDecimal;
 import java.util.List;
 import java.util.Optional;
+import tariff.meter.CutEnergies;
 import tariff.meter.Unit;
 
 /**
@@ -25,6 +26,11 @@ record Share(BigDecimal share, Quantity of) implements Quantity {
     public Figure value(Facts facts) {
         Figure whole = of.value(facts);
         return Figure.of(share.multiply(whole.value()), whole.unit(), "{} × {}", Figure.number(share), whole);
+    }
+
+    @Override
+    public Optional<Column> column(CutEnergies parts, Facts facts) {
+        return of.column(parts, facts).map(whole -> whole.times(share));
     }
 
     @Override

@@ -4,6 +4,7 @@ package tariff.rate.clause;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
+import tariff.meter.CutEnergies;
 import tariff.meter.Unit;
 
 /** The smallest of several quantities that can be compared: {@code { "smallest": [ … , … ] }}. */
@@ -21,6 +22,11 @@ record Smallest(List<Quantity> of) implements Quantity {
     @Override
     public Figure value(Facts facts) {
         return Extreme.of(of, facts, -1, "smallest of ");
+    }
+
+    @Override
+    public Optional<Column> column(CutEnergies parts, Facts facts) {
+        return Extreme.columns(of, parts, facts, Math::min);
     }
 
     @Override

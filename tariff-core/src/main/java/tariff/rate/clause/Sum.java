@@ -5,6 +5,7 @@ import java.math.BigDecimal;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
+import tariff.meter.CutEnergies;
 import tariff.meter.Unit;
 
 /** Several quantities of one unit added: {@code { "sum": [ … , … ] }}. */
@@ -40,6 +41,11 @@ record Sum(List<Quantity> terms) implements Quantity {
             total = total.add(figure.value());
         }
         return Figure.of(total, figures[0].unit(), "{}" + " + {}".repeat(figures.length - 1), figures);
+    }
+
+    @Override
+    public Optional<Column> column(CutEnergies parts, Facts facts) {
+        return Extreme.columns(terms, parts, facts, Math::addExact);
     }
 
     @Override

@@ -21,6 +21,7 @@ import tariff.notice.Finding;
 public final class Written {
     private static final int MAX_EXPONENT = 30;
     private static final int MAX_DIGITS = 40;
+    private static final int MAX_ENTRIES = 1000;
 
     private final @Nullable Object value;
     private final String pointer;
@@ -132,7 +133,7 @@ public final class Written {
         }
         Written list = at(key);
         List<Written> entries = list.entries();
-        if (list.value instanceof List && entries.isEmpty()) {
+        if (list.value instanceof List<?> written && written.isEmpty()) {
             list.wrong("empty", "is empty", "at least one entry");
         }
         return entries;
@@ -149,6 +150,10 @@ public final class Written {
             Written object = at(key);
             if (!object.isObject()) {
                 object.wrong("type", "must be an object with a name for each entry", "an object");
+            }
+            if (object.keys().size() > MAX_ENTRIES) {
+                object.tooMany(object.keys().size());
+                return all;
             }
             object.keys().forEach(name -> all.put(name, read.apply(object.at(name))));
         }
@@ -198,6 +203,10 @@ public final class Written {
     public List<Written> entries() {
         List<Written> entries = new ArrayList<>();
         if (value instanceof List<?> list) {
+            if (list.size() > MAX_ENTRIES) {
+                tooMany(list.size());
+                return entries;
+            }
             for (int i = 0; i < list.size(); i++) {
                 entries.add(new Written(list.get(i), pointer + "/" + i, findings));
             }
@@ -212,6 +221,11 @@ public final class Written {
         findings.accept(Finding.error(code, pointer, message).found(found()).allowed(allowed));
     }
 
+    /** Reports that the value is wrong, with other words for what stands there. */
+    public void wrongAs(String code, String message, String found, String allowed) {
+        findings.accept(Finding.error(code, pointer, message).found(found).allowed(allowed));
+    }
+
     /** Reports every key that nothing asked for: a rate never has keys that are silently ignored. */
     public void refuseOtherKeys() {
         List<String> known = List.copyOf(asked);
@@ -223,6 +237,10 @@ public final class Written {
                                 .allowed(Nearest.list(known)));
             }
         }
+    }
+
+    private void tooMany(int count) {
+        wrongAs("too-many", "has too many entries", String.valueOf(count), "at most " + MAX_ENTRIES);
     }
 
     private boolean present(String key) {

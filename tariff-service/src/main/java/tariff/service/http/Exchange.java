@@ -1,0 +1,42 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.service.http;
+
+import io.javalin.http.Context;
+import io.javalin.http.Handler;
+import java.util.List;
+import org.jspecify.annotations.Nullable;
+import tariff.json.JsonObject;
+import tariff.notice.Finding;
+import tariff.notice.Refusal;
+
+/** Read a document, ask, write the answer: what every question has in common. */
+final class Exchange {
+    static final String JSON = "application/json";
+
+    private Exchange() {}
+
+    static Handler of(Question question) {
+        return ctx -> {
+            Accepts.require(ctx, JSON);
+            write(ctx, ask(question, Body.read(ctx)));
+        };
+    }
+
+    static void write(Context ctx, JsonObject answer) {
+        ctx.result(answer.bytes()).contentType(JSON);
+    }
+
+    /** A document may still lead deeper than a thread can follow; that is said like any other finding. */
+    private static JsonObject ask(Question question, @Nullable Object document) {
+        try {
+            return question.answer(document);
+        } catch (Refusal refusal) {
+            throw new Problem(422, "The document cannot be used; see findings.", refusal.findings());
+        } catch (StackOverflowError e) {
+            throw new Problem(
+                    422,
+                    "The document cannot be used; see findings.",
+                    List.of(Finding.error("too-large", "", "leads too deep to be worked out")));
+        }
+    }
+}

@@ -1,0 +1,28 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.service.http;
+
+import static io.javalin.http.HandlerType.GET;
+import static io.javalin.http.HandlerType.POST;
+
+import java.util.List;
+import tariff.service.shelf.Shelf;
+
+/** Everything that is served, on one page. A new answer is a file that implements {@link Question} and a line here. */
+public final class Routes {
+    private Routes() {}
+
+    public static List<Route> of(Shelf shelf) {
+        Rates rates = new Rates(shelf);
+        return List.of(
+                new Route(GET, "/", Document.of("text/html", "/page/index.html")),
+                new Route(GET, "/openapi.json", Document.of("application/json", "/openapi/openapi.json")),
+                new Route(
+                        GET, "/schemas/rate.json", Document.of("application/schema+json", "/openapi/rate.schema.json")),
+                new Route(GET, "/health", new Health(shelf)),
+                new Route(GET, "/rates", rates::list),
+                new Route(GET, "/rates/{id}", rates::one),
+                new Route(POST, "/rate-checks", Exchange.of(new RateChecks())),
+                new Route(POST, "/statements", Exchange.of(new Statements(shelf))),
+                new Route(POST, "/assessments", Exchange.of(new Assessments(shelf))));
+    }
+}

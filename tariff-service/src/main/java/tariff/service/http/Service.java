@@ -1,0 +1,78 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.service.http;
+
+import io.javalin.Javalin;
+import io.javalin.config.JavalinConfig;
+import java.util.List;
+import org.eclipse.jetty.server.HttpConfiguration;
+import org.eclipse.jetty.server.Server;
+import org.eclipse.jetty.server.ServerConnector;
+import org.eclipse.jetty.util.thread.QueuedThreadPool;
+import tariff.service.shelf.Shelf;
+
+/** The service: built from a shelf of rates, and started on a port apart from that. */
+public final class Service {
+    private static final int IDLE_MILLIS = 30_000;
+    private static final int MOST_THREADS = 24;
+
+    private final Javalin app;
+
+    private Service(Javalin app) {
+        this.app = app;
+    }
+
+    /**
+     * Builds the service.
+     *
+     * @param stopMillis how long a request under way may take to finish once the service is stopped
+     */
+    public static Service build(Shelf shelf, long stopMillis) {
+        List<Route> routes = Routes.of(shelf);
+        return new Service(Javalin.create(config -> configure(config, routes, stopMillis)));
+    }
+
+    private static void configure(JavalinConfig config, List<Route> routes, long stopMillis) {
+        config.startup.showJavalinBanner = false;
+        config.startup.showOldJavalinVersionWarning = false;
+        config.startup.startupWatcherEnabled = false;
+        config.http.prefer405over404 = true;
+        config.http.maxRequestSize = Body.MOST_BYTES;
+        config.jetty.threadPool = new QueuedThreadPool(MOST_THREADS);
+        config.jetty.modifyHttpConfiguration(http -> {
+            http.setSendServerVersion(false);
+            http.setIdleTimeout(IDLE_MILLIS);
+        });
+        config.jetty.modifyServer(server -> {
+            server.setStopTimeout(stopMillis);
+            server.setErrorHandler(new ProblemPages());
+        });
+        config.jetty.addConnector(Service::connector);
+        config.routes.before(RequestId::set);
+        routes.forEach(route -> config.routes.addHttpHandler(route.method(), route.path(), route.handler()));
+        Problems.answerWith(config.routes);
+        config.requestLogger.http(RequestId::log);
+    }
+
+    private static ServerConnector connector(Server server, HttpConfiguration http) {
+        ServerConnector connector =
+                new ServerConnector(server, new org.eclipse.jetty.server.HttpConnectionFactory(http));
+        connector.setIdleTimeout(IDLE_MILLIS);
+        return connector;
+    }
+
+    /** Starts it; port 0 takes any free one. */
+    public Service start(int port) {
+        app.start(port);
+        return this;
+    }
+
+    /** The port it listens on. */
+    public int port() {
+        return app.port();
+    }
+
+    /** Stops taking requests and lets those under way finish. */
+    public void stop() {
+        app.stop();
+    }
+}

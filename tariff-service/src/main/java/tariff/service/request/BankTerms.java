@@ -1,0 +1,94 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.service.request;
+
+import jakarta.validation.constraints.AssertTrue;
+import jakarta.validation.constraints.DecimalMax;
+import jakarta.validation.constraints.DecimalMin;
+import jakarta.validation.constraints.Size;
+import java.math.BigDecimal;
+import java.util.List;
+import java.util.Optional;
+import tariff.correction.CapacitorBank;
+import tariff.rate.clause.Written;
+
+/** A bank as somebody offers it, with the ranges of {@link CapacitorBank} and bounds beyond any real one. */
+public record BankTerms(
+        @DecimalMin(value = "0", message = KVAR) @DecimalMax(value = MOST_KVAR, message = KVAR)
+        BigDecimal fixedKvar,
+
+        @Size(max = 64, message = "at most 64 steps")
+        List<
+                        @DecimalMin(value = "0", inclusive = false, message = STEP)
+                        @DecimalMax(value = MOST_KVAR, message = STEP) BigDecimal>
+                stepsKvar,
+
+        Optional<
+                        @DecimalMin(value = "0.5", message = "0.5 to 1") @DecimalMax(value = "1", message = "0.5 to 1")
+                        BigDecimal>
+                targetPowerFactor,
+        Optional<@DecimalMin(value = "50", message = VOLTS) @DecimalMax(value = MOST_VOLTS, message = VOLTS) BigDecimal>
+                ratedVolts,
+        Optional<@DecimalMin(value = "50", message = VOLTS) @DecimalMax(value = MOST_VOLTS, message = VOLTS) BigDecimal>
+                serviceVolts,
+
+        @DecimalMin(value = "0", message = "0 to 0.25") @DecimalMax(value = "0.25", message = "0 to 0.25")
+        BigDecimal reactorShare,
+
+        @DecimalMin(value = "0", message = "0 to 50") @DecimalMax(value = "50", message = "0 to 50")
+        BigDecimal wattsPerKvar) {
+    private static final String MOST_KVAR = "1000000";
+    private static final String MOST_VOLTS = "1000000";
+    private static final String KVAR = "0 to 1000000 kvar";
+    private static final String STEP = "above 0, at most 1000000 kvar";
+    private static final String VOLTS = "50 to 1000000 V";
+
+    public BankTerms {
+        stepsKvar = List.copyOf(stepsKvar);
+    }
+
+    /** A plain bank at the service voltage. */
+    public static BankTerms plain(BigDecimal fixedKvar, List<BigDecimal> stepsKvar) {
+        return new BankTerms(
+                fixedKvar,
+                stepsKvar,
+                Optional.empty(),
+                Optional.empty(),
+                Optional.empty(),
+                BigDecimal.ZERO,
+                BigDecimal.ZERO);
+    }
+
+    static BankTerms read(Written in) {
+        if (!in.isObject()) {
+            in.wrong("type", "must be a bank", "an object with \"fixedKvar\", \"stepsKvar\" or both");
+            return plain(BigDecimal.ONE, List.of());
+        }
+        BankTerms terms = new BankTerms(
+                in.optionalNumber("fixedKvar").orElse(BigDecimal.ZERO),
+                in.has("stepsKvar")
+                        ? in.list("stepsKvar").stream().map(Written::number).toList()
+                        : List.of(),
+                in.optionalNumber("targetPowerFactor"),
+                in.optionalNumber("ratedVolts"),
+                in.optionalNumber("serviceVolts"),
+                in.optionalNumber("reactorShare").orElse(BigDecimal.ZERO),
+                in.optionalNumber("wattsPerKvar").orElse(BigDecimal.ZERO));
+        in.refuseOtherKeys();
+        return terms;
+    }
+
+    @AssertTrue(message = "\"fixedKvar\" above 0, \"stepsKvar\", or both")
+    boolean isBank() {
+        return fixedKvar.signum() > 0 || !stepsKvar.isEmpty();
+    }
+
+    @AssertTrue(message = "\"ratedVolts\" and \"serviceVolts\" together, or neither")
+    boolean isVoltagePair() {
+        return ratedVolts.isPresent() == serviceVolts.isPresent();
+    }
+
+    public CapacitorBank bank() {
+        return new CapacitorBank(
+                fixedKvar, stepsKvar, targetPowerFactor, ratedVolts, serviceVolts, reactorShare, wattsPerKvar);
+    }
+}

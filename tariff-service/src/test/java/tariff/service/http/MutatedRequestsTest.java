@@ -1,0 +1,118 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.service.http;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import io.restassured.response.Response;
+import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Random;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+import tariff.json.JsonTree;
+
+/** Valid requests with something in them changed at random: always an answer or a problem, never a failure of the service. */
+class MutatedRequestsTest extends Served {
+    private static final Object[] STRANGE = {
+        null,
+        true,
+        "",
+        "x",
+        "2026-02-30",
+        List.of(),
+        Map.of(),
+        new java.math.BigDecimal("-1"),
+        new java.math.BigDecimal("0"),
+        new java.math.BigDecimal("1e29"),
+        new java.math.BigDecimal("1e-29"),
+        new java.math.BigDecimal("0.5"),
+        new java.math.BigDecimal("1e400"),
+        new java.math.BigDecimal("13"),
+        "billed demand",
+        "corrected demand",
+        "all above",
+        Map.of("peak", "kVA"),
+        Map.of("energy", "leading kvarh"),
+        Map.of("constant", new java.math.BigDecimal("0"))
+    };
+
+    @ParameterizedTest
+    @CsvSource({"statement, /statements, 250", "assessment, /assessments, 250", "rate-check, /rate-checks, 250"})
+    void aChangedRequestNeverFailsTheService(String example, String path, int times) {
+        Object valid = inline(JsonTree.read(
+                Examples.text("examples/requests/" + example + ".json").getBytes(StandardCharsets.UTF_8)));
+        Random random = new Random(20261201);
+        for (int i = 0; i < times; i++) {
+            Object changed = valid;
+            for (int change = random.nextInt(3); change >= 0; change--) {
+                changed = mutate(changed, random);
+            }
+            String body = Json.text(changed);
+            Response response = json(body).post(path);
+            assertThat(response.statusCode()).as(body).isIn(200, 422);
+        }
+    }
+
+    @ParameterizedTest
+    @CsvSource({"statement, /statements, 150", "rate-check, /rate-checks, 150"})
+    void aDamagedTextNeverFailsTheService(String example, String path, int times) {
+        byte[] valid = Examples.text("examples/requests/" + example + ".json").getBytes(StandardCharsets.UTF_8);
+        Random random = new Random(7);
+        for (int i = 0; i < times; i++) {
+            byte[] damaged = valid.clone();
+            for (int change = random.nextInt(4); change >= 0; change--) {
+                damaged[random.nextInt(damaged.length)] = (byte) random.nextInt(256);
+            }
+            int status = given().header("Content-Type", "application/json")
+                    .body(damaged)
+                    .post(path)
+                    .statusCode();
+            assertThat(status).isIn(200, 400, 422);
+        }
+    }
+
+    /** The rate itself in place of its id, so that it is changed too. */
+    private static Object inline(Object document) {
+        Map<String, Object> copy = copy(document);
+        if (copy.get("rate") instanceof String id) {
+            copy.put(
+                    "rate",
+                    JsonTree.read(
+                            Examples.text("examples/rates/" + id + ".json").getBytes(StandardCharsets.UTF_8)));
+        }
+        return copy;
+    }
+
+    private static Map<String, Object> copy(Object object) {
+        Map<String, Object> copy = new LinkedHashMap<>();
+        ((Map<?, ?>) object).forEach((key, value) -> copy.put(String.valueOf(key), value));
+        return copy;
+    }
+
+    private static Object mutate(Object value, Random random) {
+        if (value instanceof Map<?, ?> map && !map.isEmpty() && random.nextInt(12) > 0) {
+            Map<String, Object> copy = copy(map);
+            String key = List.copyOf(copy.keySet()).get(random.nextInt(copy.size()));
+            switch (random.nextInt(14)) {
+                case 0 -> copy.remove(key);
+                case 1 -> copy.put(key + "x", copy.remove(key));
+                default -> copy.put(key, mutate(copy.get(key), random));
+            }
+            return copy;
+        }
+        if (value instanceof List<?> list && !list.isEmpty() && random.nextInt(12) > 0) {
+            List<Object> copy = new ArrayList<>(list);
+            int index = random.nextInt(copy.size());
+            switch (random.nextInt(14)) {
+                case 0 -> copy.remove(index);
+                case 1 -> copy.add(copy.get(index));
+                default -> copy.set(index, mutate(copy.get(index), random));
+            }
+            return copy;
+        }
+        return STRANGE[random.nextInt(STRANGE.length)];
+    }
+}
