@@ -48,7 +48,7 @@ public final class Rate {
      * Checks a rate as it stands in a file.
      *
      * @param file maps, lists, texts, decimals, true and false, as a JSON document holds them
-     * @return everything that is wrong or doubtful, and the rate if nothing is wrong
+     * @return everything that is wrong; or, if nothing is, the rate and everything that is doubtful
      */
     public static Checked check(@Nullable Object file) {
         List<Finding> findings = new ArrayList<>();
@@ -62,6 +62,8 @@ public final class Rate {
         boolean usable = findings.stream().noneMatch(Finding::isError);
         if (usable) {
             RateDoubts.check(definition, findings::add);
+        } else {
+            findings.removeIf(finding -> !finding.isError());
         }
         return new Checked(
                 usable ? Optional.of(new Rate(definition, RateSource.of(file))) : Optional.empty(), findings);
@@ -163,7 +165,7 @@ public final class Rate {
      * What a check found.
      *
      * @param rate the rate, if there is no error
-     * @param findings errors and warnings in the order of the file
+     * @param findings errors, or warnings if there is no error
      */
     public record Checked(Optional<Rate> rate, List<Finding> findings) {
         public Checked {

@@ -19,6 +19,9 @@ import tariff.rate.clause.Season;
 
 /** Finds everything that is wrong with a rate at once. */
 final class RateCheck {
+    /** Sets the names of lines apart from those of quantities. */
+    private static final String LINE = "line ";
+
     private RateCheck() {}
 
     static void check(RateDefinition rate, Consumer<Finding> findings) {
@@ -54,6 +57,13 @@ final class RateCheck {
             leansOn(rate, rate.quantities().get(named.name()), names);
         }
         clause.parts().forEach(part -> leansOn(rate, part, names));
+        for (String base : clause.bases()) {
+            if (names.add(LINE + base)) {
+                rate.lines().stream()
+                        .filter(line -> line.name().equals(base))
+                        .forEach(line -> leansOn(rate, line, names));
+            }
+        }
         return names;
     }
 

@@ -12,6 +12,16 @@ public interface Clause {
     /** The clauses written directly inside this one. */
     List<? extends Clause> parts();
 
+    /** The lines of the same month whose amounts this clause itself is worked out from. */
+    default List<String> bases() {
+        return List.of();
+    }
+
+    /** Whether this clause itself depends on the season. */
+    default boolean looksAtSeasons() {
+        return false;
+    }
+
     /** The power factor from which on this clause itself asks no penalty; empty if it knows none. */
     default Optional<BigDecimal> target() {
         return Optional.empty();

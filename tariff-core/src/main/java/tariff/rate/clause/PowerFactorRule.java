@@ -100,11 +100,18 @@ public record PowerFactorRule(From from, Optional<String> window, Leading leadin
             case ENERGIES -> fromEnergies(facts);
             case APPARENT -> ratio(facts, Register.ENERGY_KWH, Register.APPARENT_KVAH);
             case PEAK -> ratio(facts, Register.PEAK_KW, Register.PEAK_KVA);
-            case PRINTED -> Optional.of(facts.register(Register.POWER_FACTOR, window));
+            case PRINTED -> printed(facts);
         };
     }
 
-    /** The power factor of a month that gives only the printed one is that one: working it out again could move its last digit. */
+    /** A bill for a month without energy prints no power factor, and none may be asked for. */
+    private Optional<Figure> printed(Facts facts) {
+        boolean idle = !facts.has(Register.POWER_FACTOR, window)
+                && facts.has(Register.ENERGY_KWH, window)
+                && facts.register(Register.ENERGY_KWH, window).value().signum() == 0;
+        return idle ? Optional.empty() : Optional.of(rounded(facts.register(Register.POWER_FACTOR, window)));
+    }
+
     private Optional<Figure> fromEnergies(Facts facts) {
         Figure active = facts.register(Register.ENERGY_KWH, window);
         Figure reactive = reactive(facts);
@@ -139,8 +146,11 @@ public record PowerFactorRule(From from, Optional<String> window, Leading leadin
         return Optional.of(rounded(Figure.of(pf, Unit.NUMBER, "{} ÷ {}", top, bottom)));
     }
 
+    /** A month with next to no energy would round to 0, which nothing can be divided by: it keeps the power factor it has. */
     private Figure rounded(Figure powerFactor) {
-        return round.map(rounding -> rounding.apply(powerFactor)).orElse(powerFactor);
+        return round.map(rounding -> rounding.apply(powerFactor))
+                .filter(figure -> figure.value().signum() > 0)
+                .orElse(powerFactor);
     }
 
     public String words() {
