@@ -105,7 +105,7 @@ public record PowerFactorRule(From from, Optional<String> window, Leading leadin
             return Optional.empty();
         }
         BigDecimal pf = Triangle.powerFactor(active.value(), apparent);
-        return Optional.of(rounded(Figure.of(pf, Unit.NUMBER, "{} ÷ √({}² + {}²)", active, active, reactive)));
+        return rounded(Figure.of(pf, Unit.NUMBER, "{} ÷ √({}² + {}²)", active, active, reactive));
     }
 
     private Figure reactive(Facts facts) {
@@ -128,11 +128,20 @@ public record PowerFactorRule(From from, Optional<String> window, Leading leadin
             return Optional.empty();
         }
         BigDecimal pf = Triangle.powerFactor(top.value(), bottom.value());
-        return Optional.of(rounded(Figure.of(pf, Unit.NUMBER, "{} ÷ {}", top, bottom)));
+        return rounded(Figure.of(pf, Unit.NUMBER, "{} ÷ {}", top, bottom));
     }
 
-    private Figure rounded(Figure powerFactor) {
-        return round.map(rounding -> rounding.apply(powerFactor)).orElse(powerFactor);
+    /** One so low that it would round to nothing stays as it is; one of nothing at all is none. */
+    private Optional<Figure> rounded(Figure powerFactor) {
+        return Optional.of(powerFactor)
+                .filter(PowerFactorRule::isAboveZero)
+                .map(figure -> round.map(rounding -> rounding.apply(figure))
+                        .filter(PowerFactorRule::isAboveZero)
+                        .orElse(figure));
+    }
+
+    private static boolean isAboveZero(Figure figure) {
+        return figure.value().signum() > 0;
     }
 
     public String words() {

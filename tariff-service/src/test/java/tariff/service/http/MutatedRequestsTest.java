@@ -45,7 +45,7 @@ class MutatedRequestsTest extends Served {
         Object valid = inline(JsonTree.read(
                 Examples.text("examples/requests/" + example + ".json").getBytes(StandardCharsets.UTF_8)));
         Random random = new Random(20261201);
-        for (int i = 0; i < times; i++) {
+        for (int i = 0; i < times * Integer.getInteger("fuzz", 1); i++) {
             Object changed = valid;
             for (int change = random.nextInt(3); change >= 0; change--) {
                 changed = mutate(changed, random);
@@ -61,7 +61,7 @@ class MutatedRequestsTest extends Served {
     void aDamagedTextNeverFailsTheService(String example, String path, int times) {
         byte[] valid = Examples.text("examples/requests/" + example + ".json").getBytes(StandardCharsets.UTF_8);
         Random random = new Random(7);
-        for (int i = 0; i < times; i++) {
+        for (int i = 0; i < times * Integer.getInteger("fuzz", 1); i++) {
             byte[] damaged = valid.clone();
             for (int change = random.nextInt(4); change >= 0; change--) {
                 damaged[random.nextInt(damaged.length)] = (byte) random.nextInt(256);
