@@ -85,6 +85,11 @@ public record CapacitorBank(
         return effective(switchedKvar());
     }
 
+    /** Each switched step at the service voltage. */
+    public List<BigDecimal> effectiveStepsKvar() {
+        return stepsKvar.stream().map(this::effective).toList();
+    }
+
     /** The smallest switched step at the service voltage, 0 for a fixed bank. */
     public BigDecimal smallestStepKvar() {
         return stepsKvar.stream()

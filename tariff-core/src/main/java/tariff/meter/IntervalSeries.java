@@ -64,10 +64,11 @@ public final class IntervalSeries {
         this.zone = zone;
         this.scale = scale;
         this.absent = (BitSet) absent.clone();
-        this.kwh = checked(kwh, "kWh");
-        this.laggingKvarh = checked(laggingKvarh, "lagging kvarh");
-        this.leadingKvarh = checked(leadingKvarh, "leading kvarh");
-        this.exportedKwh = exportedKwh.isPresent() ? checked(exportedKwh.get(), "exported kWh") : null;
+        int size = kwh.length;
+        this.kwh = checked(kwh, size, "kWh");
+        this.laggingKvarh = checked(laggingKvarh, size, "lagging kvarh");
+        this.leadingKvarh = checked(leadingKvarh, size, "leading kvarh");
+        this.exportedKwh = exportedKwh.isPresent() ? checked(exportedKwh.get(), size, "exported kWh") : null;
         require(absent.length() <= kwh.length, "interval " + (absent.length() - 1) + " is absent from " + kwh.length);
     }
 
@@ -205,10 +206,8 @@ public final class IntervalSeries {
         return date.atStartOfDay(zone).toInstant();
     }
 
-    private long[] checked(long[] given, String name) {
-        require(
-                given.length == size(kwh, given),
-                name + " of " + given.length + " intervals beside kWh of another number");
+    private long[] checked(long[] given, int size, String name) {
+        require(given.length == size, name + " of " + given.length + " intervals beside kWh of " + size);
         long[] copy = given.clone();
         long total = 0;
         for (int i = 0; i < copy.length; i++) {
@@ -220,10 +219,6 @@ public final class IntervalSeries {
             require(total >= 0 && total <= LARGEST_TOTAL, name + " add up to more than can be held");
         }
         return copy;
-    }
-
-    private static int size(long @Nullable [] known, long[] given) {
-        return known == null ? given.length : known.length;
     }
 
     private static void require(boolean holds, String message) {

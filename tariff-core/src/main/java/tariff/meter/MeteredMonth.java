@@ -47,8 +47,19 @@ public record MeteredMonth(
         windows = Collections.unmodifiableMap(new TreeMap<>(windows));
     }
 
+    /** A month of totals, without interval data. */
+    public MeteredMonth(
+            Period period,
+            Readings totals,
+            Map<String, Readings> windows,
+            Charged charged,
+            Optional<LocalDate> statementDate,
+            boolean estimated) {
+        this(period, totals, windows, charged, statementDate, estimated, Optional.empty());
+    }
+
     public MeteredMonth(Period period, Readings totals) {
-        this(period, totals, Map.of(), Charged.nothingKnown(), Optional.empty(), false, Optional.empty());
+        this(period, totals, Map.of(), Charged.nothingKnown(), Optional.empty(), false);
     }
 
     /** A calendar month without readings, to add them to: {@code MeteredMonth.of("2026-03").with(PEAK_KW, "400")}. */

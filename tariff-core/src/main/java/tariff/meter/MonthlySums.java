@@ -35,6 +35,11 @@ public record MonthlySums(IntervalSeries series, WindowCalendar calendar, Demand
                 series, new WindowCalendar(series, Map.of()), DemandInterval.block(series.stepMinutes()), true);
     }
 
+    /** The same questions to another series of the same intervals, such as the one behind a bank. */
+    public MonthlySums on(IntervalSeries other) {
+        return new MonthlySums(other, calendar, demand, apparentKvah);
+    }
+
     /** Calendar months; the first and the last only as far as the series has days. */
     public List<MeteredMonth> calendarMonths() {
         return months(calendarMonthsOf(series.days()));

@@ -112,8 +112,7 @@ public record Window(
     public BigDecimal hoursIn(Period period, ZoneId zone) {
         return BigDecimal.valueOf(minutesIn(period, zone))
                 .divide(BigDecimal.valueOf(60), 6, RoundingMode.HALF_UP)
-                .stripTrailingZeros()
-                .add(BigDecimal.ZERO);
+                .stripTrailingZeros();
     }
 
     private long minutesOn(LocalDate date, ZoneId zone) {

@@ -8,14 +8,17 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.BiFunction;
 import java.util.stream.Stream;
 import tariff.bill.Billing;
 import tariff.bill.PowerFactorCost;
 import tariff.bill.Statement;
 import tariff.correction.BankMonth;
+import tariff.correction.BankYear;
 import tariff.correction.Estimate;
 import tariff.meter.MeteredMonth;
 import tariff.meter.MonthOrder;
+import tariff.meter.MonthlySums;
 import tariff.notice.Assumption;
 import tariff.notice.Caution;
 import tariff.notice.Refusal;
@@ -32,6 +35,7 @@ import tariff.payback.Venture;
  * @param today what low power factor costs without the bank
  * @param savings the least, an estimate between, and the most that the bills allow
  * @param appraisals payback and its kin for each; empty without a price or a full year of twelve months
+ * @param exact the bank run through interval data, if there are any
  * @param assumptions what was taken to be so
  * @param cautions what a person must know
  */
@@ -41,6 +45,7 @@ public record Assessment(
         PowerFactorCost today,
         Map<Estimate, BankSavings> savings,
         Map<Estimate, Appraisal> appraisals,
+        Optional<BankYear> exact,
         List<Assumption> assumptions,
         List<Caution> cautions) {
     private static final int YEAR = 12;
@@ -59,21 +64,49 @@ public record Assessment(
      * @throws Refusal naming the months that overlap, or every month that lacks what the rate bills
      */
     public static Assessment of(Billing billing, List<MeteredMonth> months, Proposal proposal) {
+        BankMonth bank =
+                new BankMonth(proposal.bank(), (month, window) -> billing.rate().hours(month.period(), window));
+        return of(billing, months, proposal, bank::with, Optional.empty());
+    }
+
+    /**
+     * Assesses a proposal on interval data, where nothing is left to bounds: all three estimates are the same. The months are the
+     * calendar months of the series.
+     *
+     * @throws Refusal naming every month that lacks what the rate bills
+     */
+    public static Assessment of(Billing billing, MonthlySums sums, Proposal proposal) {
+        BankYear bank = BankYear.of(sums, proposal.bank());
+        return of(
+                billing,
+                sums.calendarMonths(),
+                proposal,
+                (month, estimate) -> bank.month(month.period()),
+                Optional.of(bank));
+    }
+
+    private static Assessment of(
+            Billing billing,
+            List<MeteredMonth> months,
+            Proposal proposal,
+            BiFunction<MeteredMonth, Estimate, MeteredMonth> bank,
+            Optional<BankYear> exact) {
         List<MeteredMonth> sorted = MonthOrder.of(months);
         List<MeteredMonth> past = sorted.subList(0, Math.max(0, sorted.size() - YEAR));
         List<MeteredMonth> year = sorted.subList(past.size(), sorted.size());
         PowerFactorCost today = PowerFactorCost.of(billing, past, year);
-        Map<Estimate, BankSavings> savings = savings(billing, today, past, year, proposal);
+        Map<Estimate, BankSavings> savings = savings(billing, today, past, year, bank);
         Set<Assumption> assumptions = new LinkedHashSet<>();
         today.months().forEach(month -> assumptions.addAll(month.asItIs().assumptions()));
         assumptions.addAll(MonthOrder.gaps(sorted));
-        assumptions.addAll(BankAssumptions.of(billing.rate(), proposal, year));
+        assumptions.addAll(BankAssumptions.of(billing.rate(), proposal, year, exact.isPresent()));
         return new Assessment(
                 billing,
                 proposal,
                 today,
                 savings,
                 appraisals(savings, proposal),
+                exact,
                 List.copyOf(assumptions),
                 BankCautions.of(proposal.bank()));
     }
@@ -88,17 +121,15 @@ public record Assessment(
             PowerFactorCost today,
             List<MeteredMonth> past,
             List<MeteredMonth> year,
-            Proposal proposal) {
+            BiFunction<MeteredMonth, Estimate, MeteredMonth> bank) {
         boolean looksBack = billing.rate().looksBack();
-        BankMonth bank =
-                new BankMonth(proposal.bank(), (month, window) -> billing.rate().hours(month.period(), window));
         List<Statement> before = looksBack && past.size() < YEAR
                 ? billing.statements(year, year)
                 : today.months().stream().map(PowerFactorCost.Month::asItIs).toList();
         Map<Estimate, BankSavings> all = new EnumMap<>(Estimate.class);
         for (Estimate estimate : Estimate.values()) {
             List<MeteredMonth> after =
-                    year.stream().map(month -> bank.with(month, estimate)).toList();
+                    year.stream().map(month -> bank.apply(month, estimate)).toList();
             List<Statement> settled = looksBack ? billing.statements(after, after) : billing.statements(after);
             List<Statement> first = looksBack ? billing.statements(year, after) : settled;
             all.put(estimate, new BankSavings(before, first, settled));

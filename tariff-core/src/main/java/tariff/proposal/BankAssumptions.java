@@ -19,30 +19,11 @@ final class BankAssumptions {
 
     private BankAssumptions() {}
 
-    static List<Assumption> of(Rate rate, Proposal proposal, List<MeteredMonth> year) {
+    static List<Assumption> of(Rate rate, Proposal proposal, List<MeteredMonth> year, boolean exact) {
         CapacitorBank bank = proposal.bank();
         List<Assumption> all = new ArrayList<>();
-        all.add(new Assumption(
-                "kvarh-spread",
-                YEAR,
-                "a month's kvarh do not say when they were drawn: the low savings take them as all drawn at the peak, the high as drawn"
-                        + " evenly, the central lie between by an assumed load curve",
-                INTERVALS));
-        if (year.stream().anyMatch(month -> !month.totals().has(PEAK_LAGGING_KVAR))) {
-            all.add(new Assumption(
-                    "highest-kvar",
-                    YEAR,
-                    year.stream().allMatch(month -> month.totals().has(PEAK_KVA))
-                            ? "the highest kvar is not on every bill; it cannot be above the highest kVA"
-                            : "neither the highest kvar nor the highest kVA is on every bill; the low savings then count no kvarh",
-                    "give peak lagging kvar"));
-        }
-        if (rate.clauses(Metered.class).anyMatch(each -> each.register() == PEAK_KVA)) {
-            all.add(new Assumption(
-                    "peaks-together",
-                    YEAR,
-                    "the central savings take the highest kW and the highest kVA to fall together; low and high do not",
-                    INTERVALS));
+        if (!exact) {
+            all.addAll(ofTotals(rate, year));
         }
         all.add(new Assumption(
                 "bank-always-on",
@@ -69,6 +50,34 @@ final class BankAssumptions {
                     YEAR,
                     "the bank goes into service on the first day of the first month; the ratchet then remembers the year before",
                     "none"));
+        }
+        return all;
+    }
+
+    /** What monthly totals leave open. */
+    private static List<Assumption> ofTotals(Rate rate, List<MeteredMonth> year) {
+        List<Assumption> all = new ArrayList<>();
+        all.add(new Assumption(
+                "kvarh-spread",
+                YEAR,
+                "a month's kvarh do not say when they were drawn: the low savings take them as all drawn at the peak, the high as drawn"
+                        + " evenly, the central lie between by an assumed load curve",
+                INTERVALS));
+        if (year.stream().anyMatch(month -> !month.totals().has(PEAK_LAGGING_KVAR))) {
+            all.add(new Assumption(
+                    "highest-kvar",
+                    YEAR,
+                    year.stream().allMatch(month -> month.totals().has(PEAK_KVA))
+                            ? "the highest kvar is not on every bill; it cannot be above the highest kVA"
+                            : "neither the highest kvar nor the highest kVA is on every bill; the low savings then count no kvarh",
+                    "give peak lagging kvar"));
+        }
+        if (rate.clauses(Metered.class).anyMatch(each -> each.register() == PEAK_KVA)) {
+            all.add(new Assumption(
+                    "peaks-together",
+                    YEAR,
+                    "the central savings take the highest kW and the highest kVA to fall together; low and high do not",
+                    INTERVALS));
         }
         return all;
     }

@@ -1,0 +1,91 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.correction;
+
+import java.math.BigDecimal;
+import java.math.RoundingMode;
+import tariff.meter.Apparent;
+import tariff.meter.DemandInterval;
+import tariff.meter.IntervalSeries;
+
+/**
+ * Counts the registers after a bank. Everything is in scaled kvar (energy of an interval × intervals per hour), where a bank of
+ * so many kvar is a whole number at any step, so that nothing rounds until the end.
+ */
+final class ReactiveTally {
+    private final IntervalSeries series;
+    private final int steps;
+    private long before;
+    private long lagging;
+    private long leading;
+    private long blockKw;
+    private long blockLagging;
+    private long blockLeading;
+    private int inBlock;
+    private boolean wholeBlock = true;
+    private long peakKw;
+    private long peakLagging;
+    private long peakLeading;
+
+    ReactiveTally(IntervalSeries series, DemandInterval demand) {
+        if (demand.sliding()) {
+            throw new IllegalArgumentException("a bank is walked through demand blocks, not sliding ones");
+        }
+        this.series = series;
+        this.steps = demand.stepsIn(series);
+    }
+
+    /** What both registers of one interval counted stays: within the interval the load swung from one side to the other. */
+    void add(int interval, long bankKvar) {
+        if (series.isAbsent(interval)) {
+            wholeBlock = false;
+        } else {
+            long lag = series.scaledLaggingKvarh(interval) * series.perHour();
+            long lead = series.scaledLeadingKvarh(interval) * series.perHour();
+            long swing = Math.min(lag, lead);
+            long net = lag - lead - bankKvar;
+            long newLag = swing + Math.max(0, net);
+            long newLead = swing + Math.max(0, -net);
+            before += lag;
+            lagging += newLag;
+            leading += newLead;
+            blockKw += series.scaledKwh(interval) * series.perHour();
+            blockLagging += newLag;
+            blockLeading += newLead;
+        }
+        if (++inBlock == steps) {
+            endBlock();
+        }
+    }
+
+    private void endBlock() {
+        if (wholeBlock) {
+            peakLagging = Math.max(peakLagging, blockLagging);
+            peakLeading = Math.max(peakLeading, blockLeading);
+            peakKw = Math.max(peakKw, Apparent.of(blockKw, blockLagging - blockLeading));
+        }
+        blockKw = 0;
+        blockLagging = 0;
+        blockLeading = 0;
+        inBlock = 0;
+        wholeBlock = true;
+    }
+
+    ReactiveOutcome outcome() {
+        return new ReactiveOutcome(
+                energy(lagging),
+                energy(leading),
+                energy(before - lagging),
+                over(peakLagging, steps),
+                over(peakLeading, steps),
+                over(peakKw, steps));
+    }
+
+    private BigDecimal energy(long scaledKvarIntervals) {
+        return over(scaledKvarIntervals, series.perHour());
+    }
+
+    /** Exact where the quotient has two decimals more than the series, else half up there. */
+    private BigDecimal over(long scaled, int divisor) {
+        return series.decimal(scaled).divide(BigDecimal.valueOf(divisor), series.scale() + 2, RoundingMode.HALF_UP);
+    }
+}

@@ -1,0 +1,31 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.intervalfile;
+
+import java.util.Map;
+
+/** The rows of a file in whole numbers, in the order of the file. */
+@SuppressWarnings("ArrayRecordComponent")
+record RawColumns(long[] stamps, int[] lines, Map<Role, long[]> figures, long rounded) {
+    int count() {
+        return stamps.length;
+    }
+
+    /** Turns a file that has its newest row first. */
+    void reverse() {
+        for (int i = 0, j = count() - 1; i < j; i++, j--) {
+            swap(stamps, i, j);
+            for (long[] each : figures.values()) {
+                swap(each, i, j);
+            }
+            int line = lines[i];
+            lines[i] = lines[j];
+            lines[j] = line;
+        }
+    }
+
+    private static void swap(long[] values, int i, int j) {
+        long value = values[i];
+        values[i] = values[j];
+        values[j] = value;
+    }
+}
