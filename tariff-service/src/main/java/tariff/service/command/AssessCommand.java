@@ -2,19 +2,19 @@
 package tariff.service.command;
 
 import java.math.BigDecimal;
-import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 import tariff.bill.Billing;
 import tariff.meter.MeteredSite;
 import tariff.proposal.Assessment;
 import tariff.proposal.Proposal;
+import tariff.rate.Rate;
 import tariff.service.request.BankTerms;
 import tariff.service.request.Declared;
 import tariff.service.request.InvestmentTerms;
@@ -33,11 +33,8 @@ final class AssessCommand implements Callable<Integer> {
     @Spec
     private CommandSpec spec;
 
-    @Parameters(index = "0", paramLabel = "RATE", description = "the rate, a JSON file")
-    private Path rate;
-
-    @Parameters(index = "1", paramLabel = "BILLS", description = "the site and its months, a JSON file")
-    private Path bills;
+    @Mixin
+    private RateAndBills given;
 
     @Option(names = "--fixed", paramLabel = "KVAR", description = "kvar that are always on", defaultValue = "0")
     private BigDecimal fixedKvar;
@@ -66,8 +63,9 @@ final class AssessCommand implements Callable<Integer> {
         Optional<InvestmentTerms> investment =
                 cost.map(money -> Declared.require(InvestmentTerms.plain(money, upkeep, lifeYears)));
         OutlookTerms outlook = Declared.require(OutlookTerms.level(discountRate));
-        MeteredSite site = Files.bills(bills);
-        Billing billing = new Billing(Files.rate(rate), site.site());
+        Rate under = given.rate();
+        MeteredSite site = given.bills(under, spec.commandLine().getErr());
+        Billing billing = new Billing(under, site.site());
         Proposal proposal = new Proposal(bank.bank(), investment.map(InvestmentTerms::investment), outlook.outlook());
         format.print(
                 new AssessmentAnswer(Assessment.of(billing, site.months(), proposal)),

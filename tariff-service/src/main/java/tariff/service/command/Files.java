@@ -4,9 +4,7 @@ package tariff.service.command;
 import java.io.IOException;
 import java.nio.file.Path;
 import java.util.function.Function;
-import tariff.json.BillsJson;
 import tariff.json.JsonTree;
-import tariff.meter.MeteredSite;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
 import tariff.rate.Rate;
@@ -16,19 +14,19 @@ final class Files {
     private Files() {}
 
     static Rate rate(Path file) {
-        return named(file, bytes -> Rate.of(JsonTree.read(bytes)));
+        return read(file, bytes -> Rate.of(JsonTree.read(bytes)));
     }
 
     static Rate.Checked check(Path file) {
-        return named(file, bytes -> Rate.check(JsonTree.read(bytes)));
+        return read(file, bytes -> Rate.check(JsonTree.read(bytes)));
     }
 
-    /** Bills of any kind of file; the one place that tells the kinds apart. */
-    static MeteredSite bills(Path file) {
-        return named(file, BillsJson::read);
-    }
-
-    private static <T> T named(Path file, Function<byte[], T> read) {
+    /**
+     * What a file holds.
+     *
+     * @throws Refusal with the file's name before every place
+     */
+    static <T> T read(Path file, Function<byte[], T> read) {
         try {
             return read.apply(java.nio.file.Files.readAllBytes(file));
         } catch (IOException e) {
@@ -36,8 +34,12 @@ final class Files {
                     .found(java.nio.file.Files.exists(file) ? "a file that cannot be opened" : "no such file"));
         } catch (Refusal refusal) {
             throw new Refusal(refusal.findings().stream()
-                    .map(finding -> finding.inside(file.getFileName() + "#"))
+                    .map(finding -> finding.inside(file.getFileName() + (isPointer(finding) ? "#" : ": ")))
                     .toList());
         }
+    }
+
+    private static boolean isPointer(Finding finding) {
+        return finding.where().isEmpty() || finding.where().startsWith("/");
     }
 }

@@ -1,12 +1,11 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.service.command;
 
-import java.nio.file.Path;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 import tariff.bill.Billing;
 import tariff.meter.MeteredSite;
@@ -22,19 +21,16 @@ final class StatementCommand implements Callable<Integer> {
     @Spec
     private CommandSpec spec;
 
-    @Parameters(index = "0", paramLabel = "RATE", description = "the rate, a JSON file")
-    private Path rate;
-
-    @Parameters(index = "1", paramLabel = "BILLS", description = "the site and its months, a JSON file")
-    private Path bills;
+    @Mixin
+    private RateAndBills given;
 
     @Option(names = "--format", description = "text, json or csv (${DEFAULT-VALUE} unless said)", defaultValue = "text")
     private Format format;
 
     @Override
     public Integer call() {
-        Rate under = Files.rate(rate);
-        MeteredSite site = Files.bills(bills);
+        Rate under = given.rate();
+        MeteredSite site = given.bills(under, spec.commandLine().getErr());
         format.print(
                 new StatementAnswer(under, new Billing(under, site.site()).statements(site.months())),
                 spec.commandLine().getOut());
