@@ -2,7 +2,6 @@
 package tariff.rate;
 
 import java.math.BigDecimal;
-import java.util.ArrayList;
 import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -14,6 +13,7 @@ import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import tariff.meter.Period;
 import tariff.notice.Finding;
+import tariff.notice.Findings;
 import tariff.notice.Refusal;
 import tariff.rate.clause.Clause;
 import tariff.rate.clause.Earlier;
@@ -44,19 +44,19 @@ public final class Rate {
      * @return everything that is wrong or doubtful, and the rate if nothing is wrong
      */
     public static Checked check(@Nullable Object file) {
-        List<Finding> findings = new ArrayList<>();
-        Written written = new Written(file, "", findings::add);
+        Findings findings = new Findings();
+        Written written = new Written(file, "", findings);
         if (!written.isObject()) {
             written.wrong("type", "must be a rate", "an object with \"name\", \"currency\" and \"lines\"");
-            return new Checked(Optional.empty(), findings);
+            return new Checked(Optional.empty(), findings.list());
         }
         RateDefinition definition = RateDefinition.read(written);
-        RateCheck.check(definition, findings::add);
-        boolean usable = findings.stream().noneMatch(Finding::isError);
+        RateCheck.check(definition, findings);
+        boolean usable = !findings.hasErrors();
         if (usable) {
-            RateDoubts.check(definition, findings::add);
+            RateDoubts.check(definition, findings);
         }
-        return new Checked(usable ? Optional.of(new Rate(definition)) : Optional.empty(), findings);
+        return new Checked(usable ? Optional.of(new Rate(definition)) : Optional.empty(), findings.list());
     }
 
     /**
