@@ -17,8 +17,8 @@ import tariff.rate.clause.Written;
 
 /** A site and its bills as JSON: {@code { "site": { … }, "months": [ … ] }}. */
 public final class BillsJson {
-    /** Twenty years of months. */
-    static final int MOST_MONTHS = 240;
+    /** Ten years of months. */
+    static final int MOST_MONTHS = 120;
 
     private BillsJson() {}
 

@@ -1,28 +1,39 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.json;
 
+import java.util.ArrayDeque;
 import java.util.Collections;
+import java.util.Deque;
 import java.util.IdentityHashMap;
 import java.util.Set;
 import tariff.meter.Unit;
 import tariff.rate.clause.Figure;
 
 /**
- * A derivation as a tree: value, unit, how, and the figures it came from. A figure that came up before in the same tree is given
- * without what it came from, so that a ratchet over many months stays readable.
+ * A derivation as a tree: value, unit, how, and the figures it came from. The steps nearest to the result are told, each once, up to
+ * 24: a ratchet that leans on its own past would double with every month.
  */
 final class FigureJson {
-    private static final int DEEPEST = 30;
+    private static final int MOST_STEPS = 24;
 
-    private final Set<Figure> explained = Collections.newSetFromMap(new IdentityHashMap<>());
+    private final Set<Figure> toTell = Collections.newSetFromMap(new IdentityHashMap<>());
 
-    private FigureJson() {}
-
-    static JsonObject write(Figure figure) {
-        return new FigureJson().write(figure, 0);
+    private FigureJson(Figure result) {
+        Deque<Figure> next = new ArrayDeque<>();
+        next.add(result);
+        while (!next.isEmpty() && toTell.size() < MOST_STEPS) {
+            Figure figure = next.remove();
+            if (!figure.from().isEmpty() && toTell.add(figure)) {
+                next.addAll(figure.from());
+            }
+        }
     }
 
-    private JsonObject write(Figure figure, int depth) {
+    static JsonObject write(Figure figure) {
+        return new FigureJson(figure).tree(figure);
+    }
+
+    private JsonObject tree(Figure figure) {
         JsonObject json = new JsonObject().with("value", figure.value());
         if (figure.unit() != Unit.NUMBER) {
             json.with("unit", figure.unit().symbol());
@@ -30,7 +41,6 @@ final class FigureJson {
         if (!figure.how().isEmpty()) {
             json.with("how", figure.working());
         }
-        boolean explain = depth < DEEPEST && !figure.from().isEmpty() && explained.add(figure);
-        return explain ? json.withAll("from", figure.from(), part -> write(part, depth + 1)) : json;
+        return toTell.remove(figure) ? json.withAll("from", figure.from(), this::tree) : json;
     }
 }

@@ -2,7 +2,6 @@
 package tariff.rate;
 
 import java.math.BigDecimal;
-import java.util.ArrayList;
 import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
@@ -17,6 +16,7 @@ import tariff.meter.Period;
 import tariff.meter.Register;
 import tariff.meter.Window;
 import tariff.notice.Finding;
+import tariff.notice.Findings;
 import tariff.notice.Refusal;
 import tariff.rate.clause.Clause;
 import tariff.rate.clause.Earlier;
@@ -51,22 +51,22 @@ public final class Rate {
      * @return everything that is wrong; or, if nothing is, the rate and everything that is doubtful
      */
     public static Checked check(@Nullable Object file) {
-        List<Finding> findings = new ArrayList<>();
-        Written written = new Written(file, "", findings::add);
+        Findings findings = new Findings();
+        Written written = new Written(file, "", findings);
         if (!written.isObject()) {
             written.wrong("type", "must be a rate", "an object with \"name\", \"currency\" and \"lines\"");
-            return new Checked(Optional.empty(), findings);
+            return new Checked(Optional.empty(), findings.list());
         }
         RateDefinition definition = RateDefinition.read(written);
-        RateCheck.check(definition, findings::add);
-        boolean usable = findings.stream().noneMatch(Finding::isError);
+        RateCheck.check(definition, findings);
+        boolean usable = !findings.hasErrors();
         if (usable) {
-            RateDoubts.check(definition, findings::add);
-        } else {
-            findings.removeIf(finding -> !finding.isError());
+            RateDoubts.check(definition, findings);
         }
-        return new Checked(
-                usable ? Optional.of(new Rate(definition, RateSource.of(file))) : Optional.empty(), findings);
+        List<Finding> found = findings.list().stream()
+                .filter(finding -> usable || finding.isError())
+                .toList();
+        return new Checked(usable ? Optional.of(new Rate(definition, RateSource.of(file))) : Optional.empty(), found);
     }
 
     /**

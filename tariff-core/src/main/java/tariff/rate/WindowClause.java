@@ -43,6 +43,9 @@ public record WindowClause(Window window, ZoneId zone) {
     }
 
     static WindowClause read(Written in, Set<LocalDate> holidays, ZoneId zone) {
+        if (!in.isObject()) {
+            in.wrong("type", "must be a window", "an object with any of: weekdays, from, to, months, holidays");
+        }
         Window window = new Window(
                 in.has("weekdays") ? weekdays(in.at("weekdays")) : EnumSet.allOf(DayOfWeek.class),
                 time(in, "from"),

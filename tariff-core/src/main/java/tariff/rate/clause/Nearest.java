@@ -11,6 +11,7 @@ import java.util.stream.Collectors;
 public final class Nearest {
     private static final int SLIP = 3;
     private static final int MOST_LISTED = 30;
+    private static final int MOST_COMPARED = 200;
 
     private Nearest() {}
 
@@ -31,6 +32,8 @@ public final class Nearest {
 
     static Optional<String> nearest(String written, Collection<String> known) {
         return known.stream()
+                .limit(MOST_COMPARED)
+                .filter(word -> Math.abs(word.length() - written.length()) <= SLIP)
                 .filter(word -> distance(written, word) <= Math.min(SLIP, Math.max(1, word.length() / 2)))
                 .min(Comparator.comparingInt((String word) -> distance(written, word))
                         .thenComparing(Comparator.naturalOrder()));

@@ -109,7 +109,7 @@ public record PowerFactorRule(From from, Optional<String> window, Leading leadin
         boolean idle = !facts.has(Register.POWER_FACTOR, window)
                 && facts.has(Register.ENERGY_KWH, window)
                 && facts.register(Register.ENERGY_KWH, window).value().signum() == 0;
-        return idle ? Optional.empty() : Optional.of(rounded(facts.register(Register.POWER_FACTOR, window)));
+        return idle ? Optional.empty() : rounded(facts.register(Register.POWER_FACTOR, window));
     }
 
     private Optional<Figure> fromEnergies(Facts facts) {
@@ -120,7 +120,7 @@ public record PowerFactorRule(From from, Optional<String> window, Leading leadin
             return Optional.empty();
         }
         BigDecimal pf = Triangle.powerFactor(active.value(), apparent);
-        return Optional.of(rounded(Figure.of(pf, Unit.NUMBER, "{} ÷ √({}² + {}²)", active, active, reactive)));
+        return rounded(Figure.of(pf, Unit.NUMBER, "{} ÷ √({}² + {}²)", active, active, reactive));
     }
 
     private Figure reactive(Facts facts) {
@@ -143,14 +143,20 @@ public record PowerFactorRule(From from, Optional<String> window, Leading leadin
             return Optional.empty();
         }
         BigDecimal pf = Triangle.powerFactor(top.value(), bottom.value());
-        return Optional.of(rounded(Figure.of(pf, Unit.NUMBER, "{} ÷ {}", top, bottom)));
+        return rounded(Figure.of(pf, Unit.NUMBER, "{} ÷ {}", top, bottom));
     }
 
-    /** A month with next to no energy would round to 0, which nothing can be divided by: it keeps the power factor it has. */
-    private Figure rounded(Figure powerFactor) {
-        return round.map(rounding -> rounding.apply(powerFactor))
-                .filter(figure -> figure.value().signum() > 0)
-                .orElse(powerFactor);
+    /** One so low that it would round to nothing stays as it is; one of nothing at all is none. */
+    private Optional<Figure> rounded(Figure powerFactor) {
+        return Optional.of(powerFactor)
+                .filter(PowerFactorRule::isAboveZero)
+                .map(figure -> round.map(rounding -> rounding.apply(figure))
+                        .filter(PowerFactorRule::isAboveZero)
+                        .orElse(figure));
+    }
+
+    private static boolean isAboveZero(Figure figure) {
+        return figure.value().signum() > 0;
     }
 
     public String words() {

@@ -14,7 +14,7 @@ final class Body {
 
     private Body() {}
 
-    static @Nullable Object read(Context ctx) throws IOException {
+    static byte[] read(Context ctx) throws IOException {
         String type = ctx.req().getContentType();
         if (type == null
                 || !type.split(";", 2)[0].strip().toLowerCase(Locale.ROOT).equals(Exchange.JSON)) {
@@ -25,6 +25,10 @@ final class Body {
         if (body.length > MOST_BYTES) {
             throw new Problem(413, "The body is larger than " + MOST_BYTES + " bytes.");
         }
+        return body;
+    }
+
+    static @Nullable Object document(byte[] body) {
         try {
             return JsonTree.read(body);
         } catch (Refusal refusal) {

@@ -4,6 +4,7 @@ package tariff.service.http;
 import io.javalin.http.Context;
 import io.javalin.http.Handler;
 import java.util.List;
+import java.util.concurrent.Semaphore;
 import org.jspecify.annotations.Nullable;
 import tariff.json.JsonObject;
 import tariff.notice.Finding;
@@ -13,12 +14,23 @@ import tariff.notice.Refusal;
 final class Exchange {
     static final String JSON = "application/json";
 
-    private Exchange() {}
+    private final Semaphore atOnce;
 
-    static Handler of(Question question) {
+    /** An exchange that works out so many answers at once; other questions wait, so that they do not share too little memory. */
+    Exchange(int atOnce) {
+        this.atOnce = new Semaphore(atOnce, true);
+    }
+
+    Handler of(Question question) {
         return ctx -> {
             Accepts.require(ctx, JSON);
-            write(ctx, ask(question, Body.read(ctx)));
+            byte[] body = Body.read(ctx);
+            atOnce.acquire();
+            try {
+                write(ctx, ask(question, Body.document(body)));
+            } finally {
+                atOnce.release();
+            }
         };
     }
 

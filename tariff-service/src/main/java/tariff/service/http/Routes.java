@@ -13,6 +13,7 @@ public final class Routes {
 
     public static List<Route> of(Shelf shelf) {
         Rates rates = new Rates(shelf);
+        Exchange exchange = new Exchange(Math.max(2, Runtime.getRuntime().availableProcessors()));
         return List.of(
                 new Route(GET, "/", Document.of("text/html", "/page/index.html")),
                 new Route(GET, "/openapi.json", Document.of("application/json", "/openapi/openapi.json")),
@@ -21,8 +22,8 @@ public final class Routes {
                 new Route(GET, "/health", new Health(shelf)),
                 new Route(GET, "/rates", rates::list),
                 new Route(GET, "/rates/{id}", rates::one),
-                new Route(POST, "/rate-checks", Exchange.of(new RateChecks())),
-                new Route(POST, "/statements", Exchange.of(new Statements(shelf))),
-                new Route(POST, "/assessments", Exchange.of(new Assessments(shelf))));
+                new Route(POST, "/rate-checks", exchange.of(new RateChecks())),
+                new Route(POST, "/statements", exchange.of(new Statements(shelf))),
+                new Route(POST, "/assessments", exchange.of(new Assessments(shelf))));
     }
 }

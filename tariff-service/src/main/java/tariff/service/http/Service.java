@@ -4,9 +4,10 @@ package tariff.service.http;
 import io.javalin.Javalin;
 import io.javalin.config.JavalinConfig;
 import java.util.List;
-import org.eclipse.jetty.server.HttpConfiguration;
+import org.eclipse.jetty.server.Connector;
 import org.eclipse.jetty.server.Server;
 import org.eclipse.jetty.server.ServerConnector;
+import org.eclipse.jetty.util.component.LifeCycle;
 import org.eclipse.jetty.util.thread.QueuedThreadPool;
 import tariff.service.shelf.Shelf;
 
@@ -45,19 +46,24 @@ public final class Service {
         config.jetty.modifyServer(server -> {
             server.setStopTimeout(stopMillis);
             server.setErrorHandler(new ProblemPages());
+            server.addEventListener(new StalledHeaders(server));
         });
-        config.jetty.addConnector(Service::connector);
         config.routes.before(RequestId::set);
         routes.forEach(route -> config.routes.addHttpHandler(route.method(), route.path(), route.handler()));
         Problems.answerWith(config.routes);
         config.requestLogger.http(RequestId::log);
     }
 
-    private static ServerConnector connector(Server server, HttpConfiguration http) {
-        ServerConnector connector =
-                new ServerConnector(server, new org.eclipse.jetty.server.HttpConnectionFactory(http));
-        connector.setIdleTimeout(IDLE_MILLIS);
-        return connector;
+    /** A stalled body times out by the HTTP configuration; a stalled header only by the connector, which exists once the server starts. */
+    private record StalledHeaders(Server server) implements LifeCycle.Listener {
+        @Override
+        public void lifeCycleStarting(LifeCycle starting) {
+            for (Connector connector : server.getConnectors()) {
+                if (connector instanceof ServerConnector tcp) {
+                    tcp.setIdleTimeout(IDLE_MILLIS);
+                }
+            }
+        }
     }
 
     /** Starts it; port 0 takes any free one. */

@@ -51,11 +51,7 @@ public final class Declared {
                         pointer + (number ? place(violation) : ""),
                         number ? "is out of range" : "does not hold together")
                 .allowed(violation.getMessage());
-        return number ? finding.found(text(value)) : finding;
-    }
-
-    private static String text(Object value) {
-        return value instanceof BigDecimal decimal ? decimal.toPlainString() : String.valueOf(value);
+        return number ? finding.found(String.valueOf(value)) : finding;
     }
 
     private static String place(ConstraintViolation<?> violation) {

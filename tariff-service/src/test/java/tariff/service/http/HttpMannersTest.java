@@ -6,12 +6,14 @@ import static org.hamcrest.Matchers.equalTo;
 import static org.hamcrest.Matchers.matchesPattern;
 
 import java.io.IOException;
+import java.net.ServerSocket;
 import java.net.Socket;
 import java.nio.charset.StandardCharsets;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
+import tariff.service.shelf.Shelf;
 
 /** RFC 9110 for status codes and headers, RFC 9457 for problems. */
 class HttpMannersTest extends Served {
@@ -94,6 +96,17 @@ class HttpMannersTest extends Served {
                 .get("/health")
                 .then()
                 .header("X-Request-Id", matchesPattern("[0-9a-f-]{36}"));
+    }
+
+    @Test
+    void theServiceListensWhereItIsTold() throws IOException {
+        int free;
+        try (ServerSocket socket = new ServerSocket(0)) {
+            free = socket.getLocalPort();
+        }
+        Service told = Service.build(Shelf.empty(), 0).start(free);
+        assertThat(told.port()).isEqualTo(free);
+        told.stop();
     }
 
     @Test

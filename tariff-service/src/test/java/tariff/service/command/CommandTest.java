@@ -1,0 +1,152 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.service.command;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.io.IOException;
+import java.io.PrintWriter;
+import java.io.StringWriter;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
+import picocli.CommandLine;
+import tariff.service.http.Examples;
+
+class CommandTest {
+    private static final String RATE =
+            Examples.path("examples/rates/millbrook-kva-service.json").toString();
+    private static final String BILLS =
+            Examples.path("examples/foundry/bills.json").toString();
+
+    @TempDir
+    private Path directory;
+
+    private record Ran(int exit, String out, String err) {}
+
+    private static Ran run(String... arguments) {
+        StringWriter out = new StringWriter();
+        StringWriter err = new StringWriter();
+        CommandLine line = Tariff.commandLine();
+        line.setOut(new PrintWriter(out)).setErr(new PrintWriter(err));
+        int exit = line.execute(arguments);
+        return new Ran(exit, out.toString(), err.toString().replace("\r", ""));
+    }
+
+    private String file(String name, String content) throws IOException {
+        return Files.writeString(directory.resolve(name), content).toString();
+    }
+
+    @Test
+    void aRateIsReadBackInWords() {
+        Ran ran = run("check", RATE);
+        assertThat(ran.exit).isEqualTo(Exit.OK);
+        assertThat(ran.err).isEmpty();
+        assertThat(ran.out)
+                .startsWith("Millbrook kVA Service, prices in EUR, from 2025-01-01\n")
+                .contains("\nEnergy: kWh, at 0.0985 per kWh.\n");
+    }
+
+    @Test
+    void whatIsWrongWithARateIsSaidOneALineWithItsPlace() throws IOException {
+        Ran ran = run(
+                "check",
+                file(
+                        "wrong.json",
+                        "{\"name\":\"A\",\"currency\":\"Eur\",\"lines\":[{\"name\":\"E\",\"quantity\":{\"energy\":\"kwh\"},\"price\":1}]}"));
+        assertThat(ran.exit).isEqualTo(Exit.FINDINGS);
+        assertThat(ran.out).isEmpty();
+        assertThat(ran.err).isEqualTo("""
+                /currency: is not a currency code; found "Eur"; allowed: three capital letters, such as EUR (ISO 4217)
+                /lines/0/quantity/energy: is not known; did you mean "kWh"?; found "kwh"; allowed: exported kWh, kVAh, kWh,\
+                 lagging kvarh, leading kvarh
+                """);
+    }
+
+    @Test
+    void aFileThatIsNoJsonIsUnusable() throws IOException {
+        String name = file("rate.json", "name: A");
+        Ran ran = run("check", name);
+        assertThat(ran.exit).isEqualTo(Exit.UNUSABLE_FILE);
+        assertThat(ran.err).startsWith("rate.json: line 1, column 1: is not valid JSON: ");
+    }
+
+    @Test
+    void aFileThatIsNotThereIsUnusable() {
+        String nowhere = directory.resolve("none.json").toString();
+        Ran ran = run("statement", RATE, nowhere);
+        assertThat(ran.exit).isEqualTo(Exit.UNUSABLE_FILE);
+        assertThat(ran.err).isEqualTo(nowhere + ": cannot be read; found no such file\n");
+    }
+
+    /** Own arithmetic: 231,900 × 0.0985 = 22,842.15; 918 × 9.80 = 8,996.40. */
+    @Test
+    void aStatementShowsItsWorkingBesideEachAmount() {
+        assertThat(run("statement", RATE, BILLS).out).startsWith("""
+                Millbrook kVA Service, amounts in EUR
+
+                2025-01
+                  Standing charge            140.00  = 1 × 140
+                  Energy                   22842.15  = 231900 kWh × 0.0985
+                  Demand                    8996.40  = 918 kVA × 9.8
+                  Primary metering credit         0  does not apply
+                  Total                    31978.55
+                """);
+    }
+
+    @Test
+    void anOptionOfTheSiteMayBeSaidBesideTheFile() {
+        // −2 % of 22,842.15 + 8,996.40, own arithmetic
+        assertThat(run("statement", RATE, BILLS, "--option", "primary metered").out)
+                .contains("  Primary metering credit   -636.77  = 31838.55 × -2 %\n");
+    }
+
+    @Test
+    void aTableOfASpreadsheetIsBilledAndSaysHowItWasRead() throws IOException {
+        Ran ran = run("statement", RATE, file("bills.csv", "Month;kWh;peak kVA\n2025-01;1000;20\n"), "--format", "csv");
+        assertThat(ran.out.lines()).contains("2025-01-01,2025-01-31,Energy,98.50,yes,EUR");
+        assertThat(ran.err).contains("Separator: semicolon\n");
+    }
+
+    @Test
+    void aTextThatASpreadsheetTakesForAFormulaStaysAText() {
+        Csv csv = new Csv(java.util.List.of("=1+1", "-2.50", "say \"so\", please"));
+        assertThat(csv.text()).isEqualTo("'=1+1,-2.50,\"say \"\"so\"\", please\"\r\n");
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"text", "json", "csv"})
+    void theSameQuestionIsPrintedTheSameWay(String format) {
+        Ran once = run("assess", RATE, BILLS, "--fixed", "300", "--cost", "20000", "--format", format);
+        assertThat(once.exit).isEqualTo(Exit.OK);
+        assertThat(run("assess", RATE, BILLS, "--fixed", "300", "--cost", "20000", "--format", format))
+                .isEqualTo(once);
+    }
+
+    @Test
+    void anAssessmentFitsInAHundredColumnsAndEndsWithItsCautions() {
+        String out = run("assess", RATE, BILLS, "--steps", "50,50,100", "--cost", "20000", "--discount", "0.08").out;
+        assertThat(out.lines())
+                .allSatisfy(line ->
+                        assertThat(line.codePointCount(0, line.length())).isLessThanOrEqualTo(100));
+        assertThat(out).contains("screening estimate", "lethal charge");
+    }
+
+    @Test
+    void aBankOutOfRangeIsAFinding() {
+        Ran ran = run("assess", RATE, BILLS, "--fixed", "1e999999999");
+        assertThat(ran.exit).isEqualTo(Exit.FINDINGS);
+        assertThat(ran.err).isEqualTo("/fixedKvar: is out of range; found 1E+999999999; allowed: 0 to 1000000 kvar\n");
+    }
+
+    @Test
+    void anUnknownUnitIsAMistakeOnTheCommandLine() {
+        Ran ran = run("statement", RATE, BILLS, "--agreed", "MW=3");
+        assertThat(ran.exit).isEqualTo(Exit.USAGE);
+        assertThat(ran.err)
+                .startsWith(
+                        "Invalid value for option '--agreed' (UNIT=NUMBER): \"MW\" is no unit; one of: kWh, kvarh,");
+    }
+}
