@@ -305,7 +305,8 @@ class RateCheckTest {
                 .hasMessageContaining("is not valid JSON: Duplicate field 'name'");
         assertThatThrownBy(() -> RateFile.parse("{ \"price\": 1." + "0".repeat(200) + " }"))
                 .isInstanceOf(Refusal.class)
-                .hasMessageContaining("is not valid JSON: Number value length (201) exceeds the maximum allowed");
+                .hasMessage(
+                        "is larger than a document can be; allowed: 60 levels, 50000 parts, numbers of 100 characters");
     }
 
     @Test
