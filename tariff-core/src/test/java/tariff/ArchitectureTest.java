@@ -30,7 +30,14 @@ class ArchitectureTest {
             knows("tariff.bill", "tariff.rate", "tariff.rate.clause", "tariff.meter", "tariff.notice");
 
     @ArchTest
+    static final ArchRule RECONCILE = knows(
+            "tariff.reconcile", "tariff.bill", "tariff.rate", "tariff.rate.clause", "tariff.meter", "tariff.notice");
+
+    @ArchTest
     static final ArchRule ELECTRICAL = knows("tariff.electrical");
+
+    @ArchTest
+    static final ArchRule CHART = knows("tariff.chart");
 
     @ArchTest
     static final ArchRule CORRECTION =

@@ -11,6 +11,8 @@ import static tariff.meter.Register.PEAK_LAGGING_KVAR;
 import static tariff.meter.Register.POWER_FACTOR;
 
 import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -18,6 +20,7 @@ import java.util.Set;
 import java.util.TreeMap;
 import java.util.function.UnaryOperator;
 import java.util.stream.Stream;
+import tariff.meter.Derivable;
 import tariff.meter.MeteredMonth;
 import tariff.meter.Readings;
 import tariff.meter.Register;
@@ -27,6 +30,8 @@ import tariff.rate.clause.Clause;
 import tariff.rate.clause.Clause.Allowance;
 import tariff.rate.clause.Metered;
 import tariff.rate.clause.PowerFactorRule;
+import tariff.rate.clause.PowerFactorRule.Leading;
+import tariff.rate.clause.Quantity;
 
 /**
  * The point from which on a rate asks no penalty for reactive load, though it may still pay a credit: the highest power factor that one
@@ -36,10 +41,13 @@ import tariff.rate.clause.PowerFactorRule;
  * @param powerFactor the highest target of any clause; empty if no clause names one
  * @param allowances the free amounts of lagging kvarh or kvar
  * @param billsApparent whether the rate bills kVA or kVAh, which fall all the way to unity
- * @param leadingAdded whether a power factor of the rate adds leading kvarh to lagging ones
+ * @param leading what leading kvarh do to the rate's power factors
  */
 public record NoPenaltyPoint(
-        Optional<BigDecimal> powerFactor, List<Allowance> allowances, boolean billsApparent, boolean leadingAdded) {
+        Optional<BigDecimal> powerFactor, List<Allowance> allowances, boolean billsApparent, Leading leading) {
+    /** Cut off, so that what is shared out never comes to more than the whole. */
+    private static final MathContext SHARING = new MathContext(30, RoundingMode.DOWN);
+
     private static final Set<Register> LAGGING = Set.of(LAGGING_KVARH, PEAK_LAGGING_KVAR);
 
     static NoPenaltyPoint of(Rate rate) {
@@ -49,13 +57,21 @@ public record NoPenaltyPoint(
                 clauses.stream()
                         .map(Clause::allowance)
                         .flatMap(Optional::stream)
-                        .filter(allowance -> LAGGING.contains(allowance.of().register()))
+                        .filter(allowance -> rate.registers(allowance.of()).stream()
+                                .anyMatch(each -> LAGGING.contains(each.register())))
                         .distinct()
                         .toList(),
                 rate.clauses(Metered.class)
                         .anyMatch(each -> each.register() == PEAK_KVA || each.register() == APPARENT_KVAH),
-                rate.definition().powerFactors().values().stream()
-                        .anyMatch(rule -> rule.leading() == PowerFactorRule.Leading.ADDED));
+                leading(rate));
+    }
+
+    private static Leading leading(Rate rate) {
+        return rate.definition().powerFactors().values().stream()
+                .map(PowerFactorRule::leading)
+                .filter(each -> each == Leading.ADDED || each == Leading.NETTED)
+                .findFirst()
+                .orElse(Leading.IGNORED);
     }
 
     /** Whether the rate itself says where penalties end; if not, unity stands in. */
@@ -85,10 +101,31 @@ public record NoPenaltyPoint(
         Reckoning facts = new Reckoning(billing, there, List.of(), 0);
         for (Allowance allowance : allowances) {
             BigDecimal free = allowance.free().value(facts).value().max(BigDecimal.ZERO);
-            Register register = allowance.of().register();
-            there = change(there, allowance.of().window(), readings -> lowered(readings, register, free));
+            there = within(free, allowance.of(), there, billing);
         }
         return inside(month, there, part -> reach(part, billing));
+    }
+
+    /** Lowers the lagging registers behind a quantity, each by the same share, until it is no more than is free. */
+    private static MeteredMonth within(BigDecimal free, Quantity of, MeteredMonth month, Billing billing) {
+        BigDecimal counted =
+                of.value(new Reckoning(billing, month, List.of(), 0)).value();
+        if (counted.compareTo(free) <= 0) {
+            return month;
+        }
+        MeteredMonth there = month;
+        for (Metered metered : billing.rate().registers(of)) {
+            if (LAGGING.contains(metered.register())) {
+                there = change(
+                        there,
+                        metered.window(),
+                        readings -> readings.get(metered.register())
+                                .map(value -> readings.with(
+                                        metered.register(), value.multiply(free).divide(counted, SHARING)))
+                                .orElse(readings));
+            }
+        }
+        return there;
     }
 
     /** The month at unity: nothing lagging, kVA equal to kW. */
@@ -111,16 +148,21 @@ public record NoPenaltyPoint(
 
     private Readings at(BigDecimal pf, Readings before) {
         BigDecimal tangent = Triangle.tangent(pf);
-        BigDecimal leading = leadingAdded ? before.get(LEADING_KVARH).orElse(BigDecimal.ZERO) : BigDecimal.ZERO;
+        BigDecimal sent = before.get(LEADING_KVARH).orElse(BigDecimal.ZERO);
         Readings after = before;
         if (before.has(ENERGY_KWH)) {
             BigDecimal kwh = before.get(ENERGY_KWH).orElseThrow();
-            BigDecimal kvarh = kwh.multiply(tangent).subtract(leading).max(BigDecimal.ZERO);
+            BigDecimal kvarh = switch (leading) {
+                case ADDED -> kwh.multiply(tangent).subtract(sent).max(BigDecimal.ZERO);
+                case NETTED -> kwh.multiply(tangent).add(sent);
+                default -> kwh.multiply(tangent);
+            };
             after = lowered(after, LAGGING_KVARH, kvarh);
             after = lowered(after, APPARENT_KVAH, kwh.divide(pf, Triangle.PRECISION));
         }
-        if (before.has(PEAK_KW)) {
-            BigDecimal kw = before.get(PEAK_KW).orElseThrow();
+        Optional<BigDecimal> demand = before.get(PEAK_KW).or(() -> Derivable.PEAK_KW.from(before));
+        if (demand.isPresent()) {
+            BigDecimal kw = demand.get();
             after = lowered(after, PEAK_KVA, kw.divide(pf, Triangle.PRECISION));
             after = lowered(after, PEAK_LAGGING_KVAR, kw.multiply(tangent));
         }

@@ -11,6 +11,7 @@ final class Combinations {
 
     private final long[] sizes;
     private final List<int[]> counts = new ArrayList<>();
+    private final long[] outputs;
 
     /** @throws IllegalArgumentException if there are more than {@value #MOST} */
     Combinations(long[] steps) {
@@ -25,6 +26,7 @@ final class Combinations {
         sizes = available.keySet().stream().mapToLong(Long::longValue).toArray();
         int[] limits = available.values().stream().mapToInt(Integer::intValue).toArray();
         add(new int[sizes.length], 0, limits);
+        outputs = counts.stream().mapToLong(this::output).toArray();
     }
 
     private void add(int[] chosen, int size, int[] limits) {
@@ -67,16 +69,15 @@ final class Combinations {
     /** The combination nearest the wanted output that the allowed operations reach; then the fewest operations, then less. */
     int[] nearest(long wanted, int[] from, int allowed) {
         int[] best = from;
-        long bestMiss = Math.abs(wanted - output(from));
+        long bestOutput = output(from);
         int bestOperations = 0;
-        for (int[] each : counts) {
-            int operations = operations(from, each);
-            long miss = Math.abs(wanted - output(each));
-            boolean less = operations == bestOperations && output(each) < output(best);
-            boolean better = miss < bestMiss || (miss == bestMiss && (operations < bestOperations || less));
-            if (operations <= allowed && better) {
-                best = each;
-                bestMiss = miss;
+        for (int i = 0; i < outputs.length; i++) {
+            long gain = Math.abs(wanted - bestOutput) - Math.abs(wanted - outputs[i]);
+            int operations = gain < 0 ? Integer.MAX_VALUE : operations(from, counts.get(i));
+            boolean less = operations == bestOperations && outputs[i] < bestOutput;
+            if (operations <= allowed && (gain > 0 || (gain == 0 && (operations < bestOperations || less)))) {
+                best = counts.get(i);
+                bestOutput = outputs[i];
                 bestOperations = operations;
             }
         }

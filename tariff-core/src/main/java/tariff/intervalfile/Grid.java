@@ -57,6 +57,7 @@ final class Grid {
             place(row, (int) ((start - first) / time.stepMinutes()));
         }
         notices.refuseIfWrong();
+        rows.figures().forEach((role, values) -> figures.put(role, placed(values)));
     }
 
     private void allocate() {
@@ -78,11 +79,6 @@ final class Grid {
         }
         rowOf = new int[(int) places];
         Arrays.fill(rowOf, -1);
-        rows.figures().keySet().forEach(role -> {
-            long[] values = new long[(int) places];
-            Arrays.fill(values, NONE);
-            figures.put(role, values);
-        });
     }
 
     private void place(int row, int slot) {
@@ -97,7 +93,14 @@ final class Grid {
             return;
         }
         rowOf[slot] = row;
-        rows.figures().forEach((role, values) -> figures.getOrDefault(role, values)[slot] = values[row]);
+    }
+
+    private long[] placed(long[] values) {
+        long[] placed = new long[rowOf.length];
+        for (int slot = 0; slot < placed.length; slot++) {
+            placed[slot] = rowOf[slot] < 0 ? NONE : values[rowOf[slot]];
+        }
+        return placed;
     }
 
     int size() {

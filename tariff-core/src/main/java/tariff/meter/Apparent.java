@@ -8,7 +8,7 @@ public final class Apparent {
     /**
      * S = √(P² + Q²), rounded half up to a whole unit; exact to that rounding.
      *
-     * @param active P in any unit, such as 10<sup>−6</sup> kW, below 2<sup>59</sup> in size
+     * @param active P in any unit, such as 10<sup>−6</sup> kW, below 2<sup>55</sup> in size
      * @param reactive Q in the same unit and range, of either sign
      */
     public static long of(long active, long reactive) {

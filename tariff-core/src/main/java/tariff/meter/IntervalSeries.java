@@ -21,6 +21,8 @@ public final class IntervalSeries {
     private static final Set<Integer> STEPS = Set.of(5, 10, 15, 30, 60);
     /** So large a total still fits a long after it is multiplied by the twelve five-minute intervals of an hour. */
     private static final long LARGEST_TOTAL = 1L << 59;
+    /** So large a figure stays in the range of {@link Apparent} as the power of a five-minute interval. */
+    private static final long LARGEST = 1L << 51;
 
     private final Instant start;
     private final int stepMinutes;
@@ -42,8 +44,8 @@ public final class IntervalSeries {
      * @param leadingKvarh as long as {@code kwh}
      * @param exportedKwh as long as {@code kwh}, if the meter has the register
      * @param absent the intervals that were not recorded
-     * @throws IllegalArgumentException if the arrays differ in length or are empty, an energy is below zero, a total is beyond
-     *     2<sup>59</sup>, or start, step or scale is not as said
+     * @throws IllegalArgumentException if the arrays differ in length or are empty, an energy is below zero, one is beyond
+     *     2<sup>51</sup>, a total beyond 2<sup>59</sup>, or start, step or scale is not as said
      */
     public IntervalSeries(
             Instant start,
@@ -214,9 +216,13 @@ public final class IntervalSeries {
             if (absent.get(i)) {
                 copy[i] = 0;
             }
-            require(copy[i] >= 0, name + " of the interval from " + startOf(i) + " is below zero");
+            if (copy[i] < 0) {
+                throw new IllegalArgumentException(name + " of the interval from " + startOf(i) + " is below zero");
+            }
             total += copy[i];
-            require(total >= 0 && total <= LARGEST_TOTAL, name + " add up to more than can be held");
+            if (copy[i] > LARGEST || total > LARGEST_TOTAL) {
+                throw new IllegalArgumentException(name + " add up to more than can be held");
+            }
         }
         return copy;
     }

@@ -13,14 +13,16 @@ public final class Triangle {
     /** For divisions and roots; wider than any bill, so that what a rate rounds is never decided by it. */
     public static final MathContext PRECISION = MathContext.DECIMAL128;
 
-    /** Beyond any meter; keeps a power factor that is exactly 0.8 from becoming 0.7999… on the way through a root. */
+    /** Beyond any meter: a power factor this near to one of so many decimals is that one. */
     private static final int POWER_FACTOR_DECIMALS = 20;
 
-    private static final MathContext ROOT = new MathContext(30, RoundingMode.HALF_EVEN);
+    private static final BigDecimal NEAR = new BigDecimal("1e-28");
+
+    private static final MathContext ROOT = new MathContext(40, RoundingMode.HALF_EVEN);
 
     private Triangle() {}
 
-    /** √(active² + reactive²), the apparent side; 30 digits. */
+    /** √(active² + reactive²), the apparent side; 40 digits. */
     public static BigDecimal apparent(BigDecimal active, BigDecimal reactive) {
         if (reactive.signum() == 0) {
             return active.abs();
@@ -29,12 +31,15 @@ public final class Triangle {
     }
 
     /**
-     * active ÷ apparent to 20 decimals.
+     * active ÷ apparent to 34 digits, so that kW × 0.95 ÷ (kW ÷ kVA) is still 0.95 kVA to the cent; one that is exactly 0.8 does not
+     * become 0.7999… on the way through a root.
      *
      * @param apparent above zero
      */
     public static BigDecimal powerFactor(BigDecimal active, BigDecimal apparent) {
-        return active.divide(apparent, POWER_FACTOR_DECIMALS, RoundingMode.HALF_UP);
+        BigDecimal exact = active.divide(apparent, PRECISION);
+        BigDecimal near = exact.setScale(POWER_FACTOR_DECIMALS, RoundingMode.HALF_UP);
+        return exact.subtract(near).abs().compareTo(NEAR) < 0 ? near : exact;
     }
 
     /** √(apparent² − active²), or zero where the apparent side is the smaller one. */

@@ -29,4 +29,8 @@ public final class Findings implements Consumer<Finding> {
     public List<Finding> list() {
         return List.copyOf(kept);
     }
+
+    public List<Finding> errors() {
+        return kept.stream().filter(Finding::isError).toList();
+    }
 }

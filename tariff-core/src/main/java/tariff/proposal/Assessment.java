@@ -25,6 +25,7 @@ import tariff.notice.Refusal;
 import tariff.payback.Appraisal;
 import tariff.payback.Savings;
 import tariff.payback.Venture;
+import tariff.reconcile.Agreement;
 
 /**
  * A bank held against a year of bills: what low power factor costs today, what the bank would save, when it pays back, and on what all
@@ -99,6 +100,7 @@ public record Assessment(
         Set<Assumption> assumptions = new LinkedHashSet<>();
         today.months().forEach(month -> assumptions.addAll(month.asItIs().assumptions()));
         assumptions.addAll(MonthOrder.gaps(sorted));
+        Agreement.of(billing, past, year).assumption().ifPresent(assumptions::add);
         assumptions.addAll(BankAssumptions.of(billing.rate(), proposal, year, exact.isPresent()));
         return new Assessment(
                 billing,
@@ -111,12 +113,19 @@ public record Assessment(
                 BankCautions.of(proposal.bank()));
     }
 
+    /** The same answer, with what reading the files took to be so said first. */
+    public Assessment with(List<Assumption> more) {
+        List<Assumption> all =
+                Stream.concat(more.stream(), assumptions.stream()).toList();
+        return new Assessment(billing, proposal, today, savings, appraisals, exact, all, cautions);
+    }
+
     /** The bank's savings month by month; the estimate between the bounds unless another is asked for. */
     public BankSavings savings(Estimate estimate) {
         return savings.getOrDefault(estimate, new BankSavings(List.of(), List.of(), List.of()));
     }
 
-    private static Map<Estimate, BankSavings> savings(
+    static Map<Estimate, BankSavings> savings(
             Billing billing,
             PowerFactorCost today,
             List<MeteredMonth> past,

@@ -4,6 +4,7 @@ package tariff.rate;
 import java.math.BigDecimal;
 import java.util.Collections;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
@@ -12,23 +13,29 @@ import java.util.Set;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import tariff.meter.Period;
+import tariff.meter.Register;
+import tariff.meter.Window;
 import tariff.notice.Finding;
 import tariff.notice.Findings;
 import tariff.notice.Refusal;
 import tariff.rate.clause.Clause;
 import tariff.rate.clause.Earlier;
 import tariff.rate.clause.Line;
+import tariff.rate.clause.Metered;
+import tariff.rate.clause.Named;
 import tariff.rate.clause.Scope;
 import tariff.rate.clause.Written;
 
 /** A rate that has been checked: one that exists can be billed with. */
 public final class Rate {
     private final RateDefinition definition;
+    private final RateSource source;
     private final Map<String, Line> lines;
     private final List<Clause> clauses;
 
-    private Rate(RateDefinition definition) {
+    private Rate(RateDefinition definition, RateSource source) {
         this.definition = definition;
+        this.source = source;
         Map<String, Line> byName = new LinkedHashMap<>();
         definition.lines().forEach(line -> byName.put(line.name(), line));
         this.lines = Collections.unmodifiableMap(byName);
@@ -41,7 +48,7 @@ public final class Rate {
      * Checks a rate as it stands in a file.
      *
      * @param file maps, lists, texts, decimals, true and false, as a JSON document holds them
-     * @return everything that is wrong or doubtful, and the rate if nothing is wrong
+     * @return everything that is wrong; or, if nothing is, the rate and everything that is doubtful
      */
     public static Checked check(@Nullable Object file) {
         Findings findings = new Findings();
@@ -56,7 +63,9 @@ public final class Rate {
         if (usable) {
             RateDoubts.check(definition, findings);
         }
-        return new Checked(usable ? Optional.of(new Rate(definition)) : Optional.empty(), findings.list());
+        return usable
+                ? new Checked(Optional.of(new Rate(definition, RateSource.of(file))), findings.list())
+                : new Checked(Optional.empty(), findings.errors());
     }
 
     /**
@@ -71,6 +80,11 @@ public final class Rate {
 
     public RateDefinition definition() {
         return definition;
+    }
+
+    /** The rate as it was written, to write it otherwise. */
+    public RateSource source() {
+        return source;
     }
 
     public String name() {
@@ -100,6 +114,40 @@ public final class Rate {
         return clauses(Earlier.class).findAny().isPresent();
     }
 
+    /** The registers that a clause counts in this month, through the quantities it names; the past is left out. */
+    public Set<Metered> registers(Clause clause) {
+        Set<Metered> registers = new LinkedHashSet<>();
+        collect(clause, registers);
+        return registers;
+    }
+
+    private void collect(@Nullable Clause clause, Set<Metered> registers) {
+        if (clause == null || clause instanceof Earlier) {
+            return;
+        }
+        if (clause instanceof Metered metered) {
+            registers.add(metered);
+        }
+        if (clause instanceof Named named) {
+            collect(definition.quantities().get(named.name()), registers);
+        }
+        clause.parts().forEach(part -> collect(part, registers));
+    }
+
+    /** The rate's windows by name. */
+    public Map<String, Window> windows() {
+        Map<String, Window> windows = new LinkedHashMap<>();
+        definition.windows().forEach((name, clause) -> windows.put(name, clause.window()));
+        return windows;
+    }
+
+    /** Whether a bill under this rate looks at a register, directly or through a power factor. */
+    public boolean reads(Register register) {
+        return clauses(Metered.class).anyMatch(each -> each.register() == register)
+                || definition.powerFactors().values().stream()
+                        .anyMatch(rule -> rule.registers().contains(register));
+    }
+
     /** The hours of one of the rate's windows in a period; empty if the rate does not define it. */
     public Optional<BigDecimal> hours(Period period, String window) {
         return Optional.ofNullable(definition.windows().get(window)).map(each -> each.hours(period));
@@ -116,7 +164,7 @@ public final class Rate {
      * What a check found.
      *
      * @param rate the rate, if there is no error
-     * @param findings errors and warnings in the order of the file
+     * @param findings errors, or warnings if there is no error
      */
     public record Checked(Optional<Rate> rate, List<Finding> findings) {
         public Checked {

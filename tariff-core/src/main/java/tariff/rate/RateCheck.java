@@ -19,6 +19,9 @@ import tariff.rate.clause.Season;
 
 /** Finds everything that is wrong with a rate at once. */
 final class RateCheck {
+    /** Sets the names of lines apart from those of quantities. */
+    private static final String LINE = "line ";
+
     private RateCheck() {}
 
     static void check(RateDefinition rate, Consumer<Finding> findings) {
@@ -54,6 +57,13 @@ final class RateCheck {
             leansOn(rate, rate.quantities().get(named.name()), names);
         }
         clause.parts().forEach(part -> leansOn(rate, part, names));
+        for (String base : clause.bases()) {
+            if (names.add(LINE + base)) {
+                rate.lines().stream()
+                        .filter(line -> line.name().equals(base))
+                        .forEach(line -> leansOn(rate, line, names));
+            }
+        }
         return names;
     }
 
@@ -89,20 +99,29 @@ final class RateCheck {
             return;
         }
         for (LocalDate day = LocalDate.of(2028, 1, 1); day.getYear() == 2028; day = day.plusDays(1)) {
+            if (seasonsOn(rate, day) == 1) {
+                continue;
+            }
             LocalDate today = day;
             List<String> holding = rate.seasons().entrySet().stream()
                     .filter(season -> season.getValue().holds(today))
                     .map(Map.Entry<String, Season>::getKey)
                     .toList();
-            if (holding.size() != 1) {
-                String date = String.format("%02d-%02d", day.getMonthValue(), day.getDayOfMonth());
-                scope.error(
-                        "seasons",
-                        holding.isEmpty()
-                                ? "leave a gap: " + date + " lies in none"
-                                : "overlap: " + date + " lies in " + String.join(" and ", holding));
-                return;
-            }
+            String date = String.format("%02d-%02d", day.getMonthValue(), day.getDayOfMonth());
+            scope.error(
+                    "seasons",
+                    holding.isEmpty()
+                            ? "leave a gap: " + date + " lies in none"
+                            : "overlap: " + date + " lies in " + String.join(" and ", holding));
+            return;
         }
+    }
+
+    private static int seasonsOn(RateDefinition rate, LocalDate day) {
+        int holding = 0;
+        for (Season season : rate.seasons().values()) {
+            holding += season.holds(day) ? 1 : 0;
+        }
+        return holding;
     }
 }

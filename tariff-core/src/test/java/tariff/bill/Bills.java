@@ -49,6 +49,11 @@ public final class Bills {
         return new Billing(RateFile.parse(rate), site).statements(months);
     }
 
+    /** A month of April 2026 that gives kWh and lagging kvarh alone. */
+    public static MeteredMonth energies(String kwh, String laggingKvarh) {
+        return MeteredMonth.of("2026-04").with(ENERGY_KWH, kwh).with(LAGGING_KVARH, laggingKvarh);
+    }
+
     public static Site agreed(Unit unit, String value) {
         return new Site("a site", Map.of(unit, new java.math.BigDecimal(value)), Set.of());
     }

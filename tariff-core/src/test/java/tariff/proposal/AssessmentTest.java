@@ -24,8 +24,10 @@ import tariff.bill.Bills;
 import tariff.correction.CapacitorBank;
 import tariff.correction.Estimate;
 import tariff.json.RateFile;
+import tariff.meter.Charged;
 import tariff.meter.MeteredMonth;
 import tariff.meter.Site;
+import tariff.notice.Assumption;
 import tariff.notice.Refusal;
 import tariff.payback.Investment;
 import tariff.payback.Outlook;
@@ -185,5 +187,22 @@ class AssessmentTest {
                         .optional())
                 .contains(10);
         assertThat(assessment.whyNoPayback()).isEmpty();
+    }
+
+    /** 500 kVA × 10 = 5,000.00 a month; two of the twelve bills say 5,100.00 and 4,950.00: 150.00 of 60,050.00. Own arithmetic. */
+    @Test
+    void savingsRestOnBillsThatDoNotReconcile() {
+        List<MeteredMonth> months = new ArrayList<>();
+        year().forEach(month -> months.add(month.withCharged(Charged.total("5000.00"))));
+        months.set(3, months.get(3).withCharged(Charged.total("5100.00")));
+        months.set(8, months.get(8).withCharged(Charged.total("4950.00")));
+        assertThat(assess(KVA, months, CapacitorBank.fixed("150")).assumptions())
+                .contains(new Assumption(
+                        "bills-not-reconciled",
+                        "the bills",
+                        "2 of 12 bills do not agree with this rate; the difference is 150.00 in all, 0.2 % of what was charged",
+                        "reconcile the bills, and correct the rate or the readings"));
+        assertThat(assess(KVA, year(), CapacitorBank.fixed("150")).assumptions())
+                .noneMatch(assumption -> assumption.code().equals("bills-not-reconciled"));
     }
 }

@@ -45,7 +45,7 @@ record AllOnceAbove(Quantity of, Quantity limit) implements Quantity {
 
     @Override
     public Optional<Allowance> allowance() {
-        return Allowance.on(of, limit);
+        return Optional.of(new Allowance(of, limit));
     }
 
     @Override

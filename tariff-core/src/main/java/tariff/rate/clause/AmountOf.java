@@ -31,6 +31,11 @@ record AmountOf(List<String> lines) implements Quantity {
     }
 
     @Override
+    public List<String> bases() {
+        return lines;
+    }
+
+    @Override
     public String words() {
         return "the amount of " + String.join(" and ", lines);
     }

@@ -29,8 +29,8 @@ record Bands(String powerFactor, List<Band> bands, Limits limits) implements Sch
     static Bands read(Written in, String powerFactor, Limits limits) {
         List<Band> bands = new ArrayList<>();
         for (Written each : in.list("bands")) {
-            Optional<BigDecimal> below = each.optionalNumber("below");
-            Optional<BigDecimal> upTo = each.optionalNumber("upTo");
+            Optional<BigDecimal> below = edge(each, "below");
+            Optional<BigDecimal> upTo = edge(each, "upTo");
             if (below.isPresent() && upTo.isPresent()) {
                 each.wrong("band", "says both \"below\" and \"upTo\"", "one of the two");
             }
@@ -38,6 +38,10 @@ record Bands(String powerFactor, List<Band> bands, Limits limits) implements Sch
             each.refuseOtherKeys();
         }
         return new Bands(powerFactor, List.copyOf(bands), limits);
+    }
+
+    private static Optional<BigDecimal> edge(Written in, String key) {
+        return in.has(key) ? Optional.of(Schedule.edge(in, key)) : Optional.empty();
     }
 
     @Override
@@ -94,10 +98,11 @@ record Bands(String powerFactor, List<Band> bands, Limits limits) implements Sch
         List<String> phrases = new ArrayList<>();
         for (Band band : bands) {
             String value = Decimals.plain(band.value()) + " " + unit;
+            String where = phrases.isEmpty() ? " where the " + powerFactor + " power factor is" : "";
             phrases.add(band.edge()
-                    .map(end -> value + (band.holdsEdge() ? " up to and at " : " below ") + Decimals.plain(end))
-                    .orElse("else " + value));
+                    .map(end -> value + where + (band.holdsEdge() ? " at most " : " below ") + Decimals.plain(end))
+                    .orElse(phrases.isEmpty() ? value : "else " + value));
         }
-        return "by the " + powerFactor + " power factor: " + String.join(", ", phrases) + limits.words(unit);
+        return String.join(", ", phrases) + limits.words(unit);
     }
 }

@@ -6,6 +6,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import tariff.meter.Unit;
+import tariff.notice.Assumption;
 
 /**
  * A price for each part of a quantity. A block's upper edge is itself a quantity, so that kvarh above a share of the kWh, energy by
@@ -63,7 +64,17 @@ record Blocks(List<Block> blocks) implements Price {
             }
             block.upTo().filter(edge -> !isBareNumber(edge)).ifPresent(edge -> checkEdge(edge, here.at("upTo"), unit));
             block.price().check(here.at("price"), unit);
+            if (i > 0 && samePrice(blocks.get(i - 1).price(), block.price())) {
+                here.at("price")
+                        .warn("same-price", "is the price of the block before; the edge between them changes nothing");
+            }
         }
+    }
+
+    private static boolean samePrice(Price before, Price price) {
+        return before instanceof FixedPrice a
+                && price instanceof FixedPrice b
+                && a.each().compareTo(b.each()) == 0;
     }
 
     private static boolean isBareNumber(Quantity edge) {
@@ -94,6 +105,7 @@ record Blocks(List<Block> blocks) implements Price {
             Figure edge = null;
             if (block.upTo().isPresent()) {
                 edge = block.upTo().get().value(facts);
+                noticeFall(lower, edge, quantity, facts);
                 slice = rest.min(edge.value().subtract(lower).max(BigDecimal.ZERO));
                 lower = lower.max(edge.value());
             }
@@ -111,6 +123,18 @@ record Blocks(List<Block> blocks) implements Price {
             return Figure.of(money, Unit.MONEY, "{}", quantity);
         }
         return new Figure(money, Unit.MONEY, "{}" + " + {}".repeat(charges.size() - 1), charges);
+    }
+
+    private static void noticeFall(BigDecimal lower, Figure edge, Figure quantity, Facts facts) {
+        if (edge.value().compareTo(lower) < 0) {
+            String unit = quantity.unit().symbol();
+            facts.assume(new Assumption(
+                    "block-edge-falls",
+                    facts.period().toString(),
+                    "a block of " + unit + " ends at " + Decimals.shown(edge.value()) + " " + unit
+                            + ", before it begins at " + Decimals.shown(lower) + " " + unit + "; it is taken as empty",
+                    "check the edges of the rate's blocks"));
+        }
     }
 
     @Override

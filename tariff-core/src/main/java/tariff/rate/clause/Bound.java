@@ -4,6 +4,8 @@ package tariff.rate.clause;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import java.util.Set;
 import tariff.meter.Unit;
 
 /**
@@ -23,8 +25,7 @@ record Bound(Heading heading, BaseLines of, Quantity limit, boolean floor) imple
     @Override
     public void check(Scope scope) {
         of.check(scope.at("of"));
-        scope.at(floor ? "atLeast" : "atMost")
-                .expect(limit, java.util.Optional.of(Unit.MONEY), "it bounds an amount of");
+        scope.at(floor ? "atLeast" : "atMost").expect(limit, Optional.of(Unit.MONEY), "it bounds an amount of");
     }
 
     @Override
@@ -39,6 +40,13 @@ record Bound(Heading heading, BaseLines of, Quantity limit, boolean floor) imple
     @Override
     public String words(Scope scope) {
         return "brings " + of.words() + (floor ? " up to at least " : " down to at most ") + limit.words();
+    }
+
+    @Override
+    public Optional<String> asksNothing(Set<String> nothing) {
+        return floor && limit instanceof Constant constant && constant.number().signum() <= 0
+                ? Optional.of("asks nothing: a floor of " + Decimals.plain(constant.number()) + " is always reached")
+                : Optional.empty();
     }
 
     @Override

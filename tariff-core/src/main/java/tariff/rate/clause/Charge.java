@@ -4,6 +4,7 @@ package tariff.rate.clause;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import tariff.meter.Unit;
 
 /** Quantity × price: {@code { "name": "Energy", "quantity": { "energy": "kWh" }, "price": 0.11 }}, or {@code "blocks"} for a price. */
@@ -46,13 +47,13 @@ record Charge(Heading heading, Quantity quantity, Price price) implements Line {
     }
 
     @Override
-    public List<String> bases() {
-        return List.of();
+    public Optional<String> asksNothing(Set<String> nothing) {
+        return price.isFree() ? Optional.of("asks nothing: it has no price but 0") : Optional.empty();
     }
 
     @Override
     public Optional<Allowance> allowance() {
-        return price.freeUpTo().flatMap(free -> Allowance.on(quantity, free));
+        return price.freeUpTo().map(free -> new Allowance(quantity, free));
     }
 
     @Override

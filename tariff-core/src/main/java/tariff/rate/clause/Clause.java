@@ -12,6 +12,16 @@ public interface Clause {
     /** The clauses written directly inside this one. */
     List<? extends Clause> parts();
 
+    /** The lines of the same month whose amounts this clause itself is worked out from. */
+    default List<String> bases() {
+        return List.of();
+    }
+
+    /** Whether this clause itself depends on the season. */
+    default boolean looksAtSeasons() {
+        return false;
+    }
+
     /** The power factor from which on this clause itself asks no penalty; empty if it knows none. */
     default Optional<BigDecimal> target() {
         return Optional.empty();
@@ -28,20 +38,10 @@ public interface Clause {
     }
 
     /**
-     * How much of a register is free.
+     * How much of a quantity is free.
      *
-     * @param of the register that is counted
+     * @param of what is counted
      * @param free up to which nothing is asked for it
      */
-    record Allowance(Metered of, Quantity free) {
-
-        /** The allowance on the first register that a quantity counts; empty if it counts none. */
-        static Optional<Allowance> on(Quantity quantity, Quantity free) {
-            return quantity.all()
-                    .filter(Metered.class::isInstance)
-                    .map(Metered.class::cast)
-                    .findFirst()
-                    .map(metered -> new Allowance(metered, free));
-        }
-    }
+    record Allowance(Quantity of, Quantity free) {}
 }

@@ -41,6 +41,6 @@ record Constant(BigDecimal number, Unit of) implements Quantity {
 
     @Override
     public String words() {
-        return Decimals.plain(number) + (of.symbol().isEmpty() ? "" : " " + of.symbol());
+        return Decimals.plain(number) + (of.symbol().isEmpty() || of == Unit.MONEY ? "" : " " + of.symbol());
     }
 }

@@ -58,12 +58,7 @@ public record Earlier(Take take, Quantity of, int months, Optional<Month> since,
         Set<Month> onlyIn = new TreeSet<>();
         if (in.has("onlyIn")) {
             for (Written month : in.list("onlyIn")) {
-                int number = month.number().intValue();
-                if (number < 1 || number > 12) {
-                    month.wrong("month", "is not a month", "1 (January) to 12");
-                } else {
-                    onlyIn.add(Month.of(number));
-                }
+                onlyIn.add(Month.of(month.wholeNumber(1, 12)));
             }
         }
         return new Earlier(take, of, months, since, onlyIn);

@@ -22,6 +22,11 @@ record InSeason(String season) implements Condition {
     }
 
     @Override
+    public boolean looksAtSeasons() {
+        return true;
+    }
+
+    @Override
     public String words() {
         return "most of the period lies in " + season;
     }

@@ -2,6 +2,8 @@
 package tariff.rate.clause;
 
 import java.util.List;
+import java.util.Optional;
+import java.util.Set;
 
 /** A line of a bill: quantity × price, a percentage of other lines, or a floor or cap under a group of lines. */
 public sealed interface Line extends Clause permits Charge, Percentage, Bound {
@@ -17,8 +19,12 @@ public sealed interface Line extends Clause permits Charge, Percentage, Bound {
     /** What it says, without its name and condition. */
     String words(Scope scope);
 
-    /** The lines whose amounts this line is worked out from; none for quantity × price. */
-    List<String> bases();
+    /**
+     * Why the line asks nothing in any month; empty if it may ask something.
+     *
+     * @param nothing the lines above that ask nothing
+     */
+    Optional<String> asksNothing(Set<String> nothing);
 
     default String name() {
         return heading().name();

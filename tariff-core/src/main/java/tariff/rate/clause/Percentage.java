@@ -5,6 +5,7 @@ import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import tariff.meter.Unit;
 
 /**
@@ -43,10 +44,19 @@ record Percentage(Heading heading, BaseLines of, Optional<BigDecimal> percent, O
 
     @Override
     public String words(Scope scope) {
-        return percent.map(number -> Decimals.plain(number) + " %")
-                        .or(() -> schedule.map(each -> each.words("%")))
-                        .orElse("")
-                + " of " + of.words();
+        return percent.map(number -> Decimals.plain(number) + " % of " + of.words())
+                .or(() -> schedule.map(each -> "on " + of.words() + ", " + each.words("%")))
+                .orElse("");
+    }
+
+    @Override
+    public Optional<String> asksNothing(Set<String> nothing) {
+        if (percent.isPresent() && percent.get().signum() == 0) {
+            return Optional.of("asks nothing: it takes 0 %");
+        }
+        return nothing.containsAll(of.lines())
+                ? Optional.of("asks nothing: it is a percentage of lines that ask nothing (" + of.words() + ")")
+                : Optional.empty();
     }
 
     @Override

@@ -5,6 +5,7 @@ import java.math.BigDecimal;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import tariff.meter.Register;
 import tariff.meter.Triangle;
 import tariff.meter.Unit;
@@ -23,20 +24,22 @@ public record PowerFactorRule(From from, Optional<String> window, Leading leadin
     /** The registers a power factor is worked out from. */
     public enum From {
         /** kWh ÷ √(kWh² + kvarh²) of the period. */
-        ENERGIES("energies", "from the period's kWh and kvarh"),
+        ENERGIES("energies", "from the period's kWh and kvarh", Register.ENERGY_KWH, Register.LAGGING_KVARH),
         /** kWh ÷ kVAh; never above the one from energies. */
-        APPARENT("kVAh", "kWh ÷ kVAh"),
+        APPARENT("kVAh", "kWh ÷ kVAh", Register.ENERGY_KWH, Register.APPARENT_KVAH),
         /** Highest kW ÷ highest kVA. */
-        PEAK("peak", "highest kW ÷ highest kVA"),
+        PEAK("peak", "highest kW ÷ highest kVA", Register.PEAK_KW, Register.PEAK_KVA),
         /** As printed on the bill. */
-        PRINTED("printed", "as printed on the bill");
+        PRINTED("printed", "as printed on the bill", Register.POWER_FACTOR);
 
         private final String key;
         private final String words;
+        private final Set<Register> registers;
 
-        From(String key, String words) {
+        From(String key, String words, Register... registers) {
             this.key = key;
             this.words = words;
+            this.registers = Set.of(registers);
         }
     }
 
@@ -78,6 +81,11 @@ public record PowerFactorRule(From from, Optional<String> window, Leading leadin
         return rule;
     }
 
+    /** The registers it is worked out from, leading kvarh aside. */
+    public Set<Register> registers() {
+        return from.registers;
+    }
+
     public void check(Scope scope) {
         scope.checkWindow(window);
         if (from != From.ENERGIES && leading != Leading.IGNORED) {
@@ -92,11 +100,18 @@ public record PowerFactorRule(From from, Optional<String> window, Leading leadin
             case ENERGIES -> fromEnergies(facts);
             case APPARENT -> ratio(facts, Register.ENERGY_KWH, Register.APPARENT_KVAH);
             case PEAK -> ratio(facts, Register.PEAK_KW, Register.PEAK_KVA);
-            case PRINTED -> Optional.of(facts.register(Register.POWER_FACTOR, window));
+            case PRINTED -> printed(facts);
         };
     }
 
-    /** The power factor of a month that gives only the printed one is that one: working it out again could move its last digit. */
+    /** A bill for a month without energy prints no power factor, and none may be asked for. */
+    private Optional<Figure> printed(Facts facts) {
+        boolean idle = !facts.has(Register.POWER_FACTOR, window)
+                && facts.has(Register.ENERGY_KWH, window)
+                && facts.register(Register.ENERGY_KWH, window).value().signum() == 0;
+        return idle ? Optional.empty() : rounded(facts.register(Register.POWER_FACTOR, window));
+    }
+
     private Optional<Figure> fromEnergies(Facts facts) {
         Figure active = facts.register(Register.ENERGY_KWH, window);
         Figure reactive = reactive(facts);
@@ -131,7 +146,7 @@ public record PowerFactorRule(From from, Optional<String> window, Leading leadin
         return rounded(Figure.of(pf, Unit.NUMBER, "{} ÷ {}", top, bottom));
     }
 
-    /** One so low that it would round to nothing stays as it is; one of nothing at all is none. */
+    /** One so low that it would round to nothing stays as it is, since things are divided by it; one of nothing at all is none. */
     private Optional<Figure> rounded(Figure powerFactor) {
         return Optional.of(powerFactor)
                 .filter(PowerFactorRule::isAboveZero)

@@ -33,6 +33,7 @@ public sealed interface Price extends Clause permits Blocks, DatedPrice, FixedPr
     static Price read(Written parent, String key) {
         if (!parent.has(key)) {
             parent.number(key);
+            return new FixedPrice(java.math.BigDecimal.ONE);
         }
         return read(parent.at(key));
     }

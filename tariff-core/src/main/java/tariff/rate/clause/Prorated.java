@@ -25,10 +25,7 @@ record Prorated(Quantity of, int perDays, int leastDays, int mostDays) implement
             return new Prorated(of, perDays, 0, 0);
         }
         return new Prorated(
-                of,
-                perDays,
-                unless.get(0).number().intValue(),
-                unless.get(1).number().intValue());
+                of, perDays, unless.get(0).wholeNumber(1, 366), unless.get(1).wholeNumber(1, 366));
     }
 
     @Override

@@ -26,20 +26,15 @@ record RatioTo(
     static RatioTo read(Written in, String powerFactor, Limits limits) {
         return new RatioTo(
                 powerFactor,
-                in.number("ratioTo"),
+                Schedule.edge(in, "ratioTo"),
                 in.optionalNumber("below").orElse(BigDecimal.valueOf(100)),
                 in.optionalNumber("above").orElse(BigDecimal.ZERO),
-                in.optionalNumber("onlyBelow"),
+                in.has("onlyBelow") ? Optional.of(Schedule.edge(in, "onlyBelow")) : Optional.empty(),
                 limits);
     }
 
     @Override
-    public void checkKind(Scope scope) {
-        if (ratioTo.signum() <= 0 || ratioTo.compareTo(BigDecimal.ONE) > 0) {
-            scope.at("ratioTo")
-                    .error("power-factor", "must be a power factor", Decimals.plain(ratioTo), "above 0, at most 1");
-        }
-    }
+    public void checkKind(Scope scope) {}
 
     @Override
     public BigDecimal plain(BigDecimal pf) {

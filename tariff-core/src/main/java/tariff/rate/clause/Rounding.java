@@ -14,6 +14,9 @@ import java.util.Optional;
  * @param mode where a value between two steps goes
  */
 public record Rounding(BigDecimal to, RoundingMode mode) {
+    /** Finer than anything billed, coarser than what a division or a root leaves behind: an exact half must still be one. */
+    private static final int EXACT_DECIMALS = 20;
+
     private static final Map<String, RoundingMode> MODES = new LinkedHashMap<>();
 
     static {
@@ -58,10 +61,12 @@ public record Rounding(BigDecimal to, RoundingMode mode) {
     }
 
     public BigDecimal apply(BigDecimal value) {
+        BigDecimal exact =
+                value.scale() > EXACT_DECIMALS ? value.setScale(EXACT_DECIMALS, RoundingMode.HALF_EVEN) : value;
         if (to.unscaledValue().equals(java.math.BigInteger.ONE)) {
-            return value.setScale(to.scale(), mode);
+            return exact.setScale(to.scale(), mode);
         }
-        return value.divide(to, 0, mode).multiply(to);
+        return exact.divide(to, 0, mode).multiply(to);
     }
 
     public Figure apply(Figure figure) {

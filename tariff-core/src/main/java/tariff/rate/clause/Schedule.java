@@ -36,6 +36,7 @@ public sealed interface Schedule extends Clause permits Bands, RatioTo, Slopes {
         }
         checkKind(scope);
         limits().check(scope);
+        ScheduleDoubts.check(this, scope);
     }
 
     /** The value at a power factor, with floor, cap and rounding. */
@@ -52,6 +53,15 @@ public sealed interface Schedule extends Clause permits Bands, RatioTo, Slopes {
     @Override
     default List<? extends Clause> parts() {
         return List.of();
+    }
+
+    /** A power factor at which a schedule changes its course; 85 for 0.85 is a common slip. */
+    static BigDecimal edge(Written in, String key) {
+        BigDecimal edge = in.number(key);
+        if (edge.signum() <= 0 || edge.compareTo(BigDecimal.ONE) > 0) {
+            in.at(key).wrong("power-factor", "is not a power factor", "above 0, at most 1, such as 0.85");
+        }
+        return edge;
     }
 
     static Schedule read(Written parent, String key) {

@@ -59,6 +59,11 @@ record SeasonPrice(Map<String, BigDecimal> prices) implements Price {
     }
 
     @Override
+    public boolean looksAtSeasons() {
+        return true;
+    }
+
+    @Override
     public boolean isFree() {
         return prices.values().stream().allMatch(price -> price.signum() == 0);
     }

@@ -26,10 +26,10 @@ record Slopes(String powerFactor, List<Slope> below, List<Slope> above, Points p
 
     /** How a broken point counts. */
     enum Points {
-        EXACT("exact", "each point, parts in proportion,"),
-        STARTED("started", "each point or part of one"),
-        COMPLETED("completed", "each full point"),
-        MAJOR_FRACTION("majorFraction", "each point, or more than half of one,");
+        EXACT("exact", "each 0.01 (parts in proportion)"),
+        STARTED("started", "each 0.01 or part of it"),
+        COMPLETED("completed", "each full 0.01"),
+        MAJOR_FRACTION("majorFraction", "each 0.01, or more than half of it,");
 
         private final String key;
         private final String words;
@@ -66,9 +66,9 @@ record Slopes(String powerFactor, List<Slope> below, List<Slope> above, Points p
             if (each.has("above") == each.has("below")) {
                 each.wrong("slope", "must say either \"below\" or \"above\"", "{ \"below\": 0.90, \"perPoint\": 1 }");
             } else if (each.has("below")) {
-                below.add(new Slope(each.number("below"), perPoint));
+                below.add(new Slope(Schedule.edge(each, "below"), perPoint));
             } else {
-                above.add(new Slope(each.number("above"), perPoint));
+                above.add(new Slope(Schedule.edge(each, "above"), perPoint));
             }
             each.refuseOtherKeys();
         }
@@ -80,6 +80,8 @@ record Slopes(String powerFactor, List<Slope> below, List<Slope> above, Points p
 
     @Override
     public void checkKind(Scope scope) {
+        twice(below, "below", scope);
+        twice(above, "above", scope);
         if (!below.isEmpty()
                 && !above.isEmpty()
                 && above.get(0).edge().compareTo(below.get(0).edge()) < 0) {
@@ -89,6 +91,14 @@ record Slopes(String powerFactor, List<Slope> below, List<Slope> above, Points p
                             "overlap: one counts below "
                                     + Decimals.plain(below.get(0).edge()) + ", another above "
                                     + Decimals.plain(above.get(0).edge()));
+        }
+    }
+
+    private static void twice(List<Slope> slopes, String side, Scope scope) {
+        for (int i = 1; i < slopes.size(); i++) {
+            if (slopes.get(i).edge().compareTo(slopes.get(i - 1).edge()) == 0) {
+                scope.at("slopes").error("slopes", "has two slopes " + side + " " + edge(slopes.get(i)));
+            }
         }
     }
 
@@ -141,8 +151,8 @@ record Slopes(String powerFactor, List<Slope> below, List<Slope> above, Points p
     }
 
     private String phrase(Slope slope, String side, String until, String unit) {
-        return Decimals.plain(slope.perPoint()) + " " + unit + " for " + points.words + " (0.01) that the "
-                + powerFactor + " power factor is " + side + " " + edge(slope) + until;
+        return Decimals.plain(slope.perPoint()) + " " + unit + " for " + points.words + " that the " + powerFactor
+                + " power factor is " + side + " " + edge(slope) + until;
     }
 
     private static String edge(Slope slope) {

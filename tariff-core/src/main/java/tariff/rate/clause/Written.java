@@ -80,14 +80,19 @@ public final class Written {
     }
 
     public int wholeNumber(String key, int least, int most) {
-        if (!present(key)) {
+        return present(key) ? at(key).wholeNumber(least, most) : least;
+    }
+
+    public int wholeNumber(int least, int most) {
+        if (!isNumber()) {
+            number();
             return least;
         }
-        BigDecimal number = at(key).number();
+        BigDecimal number = number();
         if (number.stripTrailingZeros().scale() > 0
                 || number.compareTo(BigDecimal.valueOf(least)) < 0
                 || number.compareTo(BigDecimal.valueOf(most)) > 0) {
-            at(key).wrong("number", "must be a whole number", "a whole number from " + least + " to " + most);
+            wrong("number", "must be a whole number", "a whole number from " + least + " to " + most);
             return least;
         }
         return number.intValueExact();

@@ -24,9 +24,13 @@ final class Assumed {
         }
         return first.entrySet().stream()
                 .map(each -> places(List.copyOf(places.getOrDefault(each.getKey(), Set.of()))) + ": "
-                        + each.getValue().message() + " (to remove it: "
-                        + each.getValue().remedy() + ")")
+                        + each.getValue().message()
+                        + remedy(each.getValue().remedy()))
                 .toList();
+    }
+
+    private static String remedy(String remedy) {
+        return remedy.startsWith("none") ? "" : " (to remove it: " + remedy + ")";
     }
 
     private static String places(List<String> all) {

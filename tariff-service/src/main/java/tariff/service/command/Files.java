@@ -3,35 +3,71 @@ package tariff.service.command;
 
 import java.io.IOException;
 import java.nio.file.Path;
+import java.util.Optional;
 import java.util.function.Function;
+import tariff.csv.BillsFile;
+import tariff.csv.BillsRead;
+import tariff.csv.ReadingChoices;
+import tariff.intervalfile.IntervalFile;
+import tariff.intervalfile.IntervalFileOptions;
+import tariff.intervalfile.IntervalReading;
+import tariff.json.BillsJson;
 import tariff.json.JsonTree;
+import tariff.meter.MeteredSite;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
+import tariff.proposal.Proposal;
 import tariff.rate.Rate;
+import tariff.service.request.Request;
 
 /** The files that commands are given; what is wrong with one is said with its name. */
 final class Files {
     private Files() {}
 
     static Rate rate(Path file) {
-        return read(file, bytes -> Rate.of(JsonTree.read(bytes)));
+        return named(file, bytes -> Rate.of(JsonTree.read(bytes)));
     }
 
     static Rate.Checked check(Path file) {
-        return read(file, bytes -> Rate.check(JsonTree.read(bytes)));
+        return named(file, bytes -> Rate.check(JsonTree.read(bytes)));
     }
 
-    /**
-     * What a file holds.
-     *
-     * @throws Refusal with the file's name before every place
-     */
-    static <T> T read(Path file, Function<byte[], T> read) {
+    static MeteredSite bills(Path file) {
+        return named(file, BillsJson::read);
+    }
+
+    /** Bills as a spreadsheet exports them. */
+    static BillsRead spreadsheet(Path file, ReadingChoices choices) {
+        return named(file, bytes -> BillsFile.read(bytes, choices));
+    }
+
+    static IntervalReading intervals(Path file, IntervalFileOptions choices) {
+        try {
+            return IntervalFile.read(file, choices);
+        } catch (IOException e) {
+            throw unreadable(file);
+        }
+    }
+
+    static Proposal proposal(Path file) {
+        return named(file, bytes -> {
+            Request request = new Request(JsonTree.read(bytes));
+            Optional<Proposal> proposal = request.proposal();
+            request.refuseIfWrong();
+            return proposal.orElseThrow();
+        });
+    }
+
+    private static Refusal unreadable(Path file) {
+        return new Refusal(Finding.error("unreadable", file.toString(), "cannot be read")
+                .found(java.nio.file.Files.exists(file) ? "a file that cannot be opened" : "no such file"));
+    }
+
+    private static <T> T named(Path file, Function<byte[], T> read) {
         try {
             return read.apply(java.nio.file.Files.readAllBytes(file));
         } catch (IOException e) {
-            throw new Refusal(Finding.error("unreadable", file.toString(), "cannot be read")
-                    .found(java.nio.file.Files.exists(file) ? "a file that cannot be opened" : "no such file"));
+            throw unreadable(file);
         } catch (Refusal refusal) {
             throw new Refusal(refusal.findings().stream()
                     .map(finding -> finding.inside(file.getFileName() + (isPointer(finding) ? "#" : ": ")))

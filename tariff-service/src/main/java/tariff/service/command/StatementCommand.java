@@ -7,9 +7,6 @@ import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
-import tariff.bill.Billing;
-import tariff.meter.MeteredSite;
-import tariff.rate.Rate;
 
 /** Bills months under a rate. */
 @Command(
@@ -22,17 +19,16 @@ final class StatementCommand implements Callable<Integer> {
     private CommandSpec spec;
 
     @Mixin
-    private RateAndBills given;
+    private MeterFile meter;
 
     @Option(names = "--format", description = "text, json or csv (${DEFAULT-VALUE} unless said)", defaultValue = "text")
     private Format format;
 
     @Override
     public Integer call() {
-        Rate under = given.rate();
-        MeteredSite site = given.bills(under, spec.commandLine().getErr());
+        Metered metered = meter.read(spec.commandLine().getErr());
         format.print(
-                new StatementAnswer(under, new Billing(under, site.site()).statements(site.months())),
+                new StatementAnswer(metered.rate(), metered.billing().statements(metered.months())),
                 spec.commandLine().getOut());
         return Exit.OK;
     }

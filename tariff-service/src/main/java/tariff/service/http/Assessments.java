@@ -10,9 +10,6 @@ import tariff.meter.MeteredSite;
 import tariff.proposal.Assessment;
 import tariff.proposal.Proposal;
 import tariff.rate.Rate;
-import tariff.service.request.BankTerms;
-import tariff.service.request.InvestmentTerms;
-import tariff.service.request.OutlookTerms;
 import tariff.service.request.Request;
 import tariff.service.shelf.Shelf;
 
@@ -24,13 +21,9 @@ record Assessments(Shelf shelf) implements Question {
         Request request = new Request(document);
         Optional<Rate> rate = request.rate(shelf);
         Optional<MeteredSite> bills = request.bills();
-        Optional<BankTerms> bank = request.bank();
-        Optional<InvestmentTerms> investment = request.investment();
-        OutlookTerms outlook = request.outlook();
+        Optional<Proposal> proposal = request.proposal();
         request.refuseIfWrong();
-        Proposal proposal =
-                new Proposal(bank.orElseThrow().bank(), investment.map(InvestmentTerms::investment), outlook.outlook());
         Billing billing = new Billing(rate.orElseThrow(), bills.orElseThrow().site());
-        return AssessmentJson.write(Assessment.of(billing, bills.orElseThrow().months(), proposal));
+        return AssessmentJson.write(Assessment.of(billing, bills.orElseThrow().months(), proposal.orElseThrow()));
     }
 }

@@ -10,6 +10,7 @@ import tariff.json.BillsJson;
 import tariff.meter.MeteredSite;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
+import tariff.proposal.Proposal;
 import tariff.rate.Rate;
 import tariff.rate.clause.Nearest;
 import tariff.rate.clause.Written;
@@ -68,7 +69,7 @@ public final class Request {
     }
 
     /** The bank under {@code "bank"}. */
-    public Optional<BankTerms> bank() {
+    private Optional<BankTerms> bank() {
         if (!written.has("bank")) {
             findings.add(Finding.error("missing-key", "", "\"bank\" is missing")
                     .allowed("an object with \"fixedKvar\", \"stepsKvar\" or both"));
@@ -78,17 +79,26 @@ public final class Request {
     }
 
     /** What the bank costs, under {@code "investment"}; empty if nothing is said of it. */
-    public Optional<InvestmentTerms> investment() {
+    private Optional<InvestmentTerms> investment() {
         return written.has("investment")
                 ? declared(InvestmentTerms.read(written.at("investment")), "/investment")
                 : Optional.empty();
     }
 
     /** What is expected of the years ahead, under {@code "outlook"}. */
-    public OutlookTerms outlook() {
+    private OutlookTerms outlook() {
         return written.has("outlook")
                 ? declared(OutlookTerms.read(written.at("outlook")), "/outlook").orElseGet(OutlookTerms::level)
                 : OutlookTerms.level();
+    }
+
+    /** Bank, investment and outlook together; empty if the bank or what it costs cannot be read. */
+    public Optional<Proposal> proposal() {
+        Optional<BankTerms> bank = bank();
+        Optional<InvestmentTerms> investment = investment();
+        OutlookTerms outlook = outlook();
+        return bank.map(
+                terms -> new Proposal(terms.bank(), investment.map(InvestmentTerms::investment), outlook.outlook()));
     }
 
     private <T> Optional<T> declared(T terms, String pointer) {
