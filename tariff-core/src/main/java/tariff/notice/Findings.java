@@ -29,8 +29,4 @@ public final class Findings implements Consumer<Finding> {
     public List<Finding> list() {
         return List.copyOf(kept);
     }
-
-    public List<Finding> errors() {
-        return kept.stream().filter(Finding::isError).toList();
-    }
 }

@@ -63,9 +63,10 @@ public final class Rate {
         if (usable) {
             RateDoubts.check(definition, findings);
         }
-        return usable
-                ? new Checked(Optional.of(new Rate(definition, RateSource.of(file))), findings.list())
-                : new Checked(Optional.empty(), findings.errors());
+        List<Finding> found = findings.list().stream()
+                .filter(finding -> usable || finding.isError())
+                .toList();
+        return new Checked(usable ? Optional.of(new Rate(definition, RateSource.of(file))) : Optional.empty(), found);
     }
 
     /**

@@ -206,9 +206,13 @@ final class RandomRates {
                         + rounding(List.of("1", "0.1", "5")).substring(2);
             case 7 -> "{ 'raised': " + first + ", 'by': " + schedule(true) + " }";
             case 8 ->
-                "{ 'earlier': '" + pick("highest", "lowest", "sum", "mean") + "', 'of': " + first + ", "
-                        + (chance(3) ? "'since': " + (1 + random.nextInt(12)) : "'months': " + (1 + random.nextInt(4)))
-                        + (chance(3) ? ", 'onlyIn': [1, 2, 3, 5, 6]" : "") + " }";
+                first.contains("'earlier'")
+                        ? first
+                        : "{ 'earlier': '" + pick("highest", "lowest", "sum", "mean") + "', 'of': " + first + ", "
+                                + (chance(3)
+                                        ? "'since': " + (1 + random.nextInt(12))
+                                        : "'months': " + (1 + random.nextInt(4)))
+                                + (chance(3) ? ", 'onlyIn': [1, 2, 3, 5, 6]" : "") + " }";
             case 9 ->
                 "{ 'prorated': " + first + ", 'perDays': " + pick("1", "30", "31")
                         + (chance(2) ? ", 'unlessDays': [28, 30]" : "") + " }";

@@ -204,4 +204,23 @@ class ReactiveEnergyBillsTest {
                         + " 'of': { 'energy': 'kWh' } } }, 'price': 1 }");
         assertThat(last(bill(rate, energies(kwh, "120000")))).isEqualTo(excess);
     }
+
+    /**
+     * Rules that count hour by hour are not to be had from monthly figures: Brazil (ANEEL Res. 414/2010) and Colombia (CREG 015 of 2018,
+     * ch. 12) by the hour, Flanders (art. 6.1.8) by the quarter-hour, Portugal at medium voltage (ERSE) by the day.
+     */
+    @ParameterizedTest
+    @CsvSource({"hour, hour", "quarterHour, quarter-hour", "day, day"})
+    void aMonthOfTotalsCannotFeedARuleByTheHour(String each, String words) {
+        String rate = rate("""
+                { 'name': 'Excess', 'quantity': { 'each': '%s', 'take': 'sum', 'of': { 'excess': { 'energy': 'lagging kvarh' }, 'over': {
+                  'share': 0.5, 'of': { 'energy': 'kWh' } } } }, 'price': 1 }""".formatted(each));
+        assertThat(tariff.json.RateFile.parse(rate).words().lines())
+                .containsExactly("Excess: sum, over each " + words
+                        + ", of the lagging kvarh above 50 % of the kWh, at 1 per kvarh.");
+        org.assertj.core.api.Assertions.assertThatThrownBy(() -> bill(rate, energies("160000", "120000")))
+                .isInstanceOf(tariff.notice.Refusal.class)
+                .hasMessage("2026-04: the rate counts by the " + words
+                        + "; the bill gives only totals of the period, so give interval data");
+    }
 }

@@ -146,7 +146,7 @@ public record PowerFactorRule(From from, Optional<String> window, Leading leadin
         return rounded(Figure.of(pf, Unit.NUMBER, "{} ÷ {}", top, bottom));
     }
 
-    /** One so low that it would round to nothing stays as it is, since things are divided by it; one of nothing at all is none. */
+    /** One so low that it would round to nothing stays as it is; one of nothing at all is none. */
     private Optional<Figure> rounded(Figure powerFactor) {
         return Optional.of(powerFactor)
                 .filter(PowerFactorRule::isAboveZero)

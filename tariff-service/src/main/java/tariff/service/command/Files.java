@@ -5,15 +5,10 @@ import java.io.IOException;
 import java.nio.file.Path;
 import java.util.Optional;
 import java.util.function.Function;
-import tariff.csv.BillsFile;
-import tariff.csv.BillsRead;
-import tariff.csv.ReadingChoices;
 import tariff.intervalfile.IntervalFile;
 import tariff.intervalfile.IntervalFileOptions;
 import tariff.intervalfile.IntervalReading;
-import tariff.json.BillsJson;
 import tariff.json.JsonTree;
-import tariff.meter.MeteredSite;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
 import tariff.proposal.Proposal;
@@ -25,20 +20,11 @@ final class Files {
     private Files() {}
 
     static Rate rate(Path file) {
-        return named(file, bytes -> Rate.of(JsonTree.read(bytes)));
+        return read(file, bytes -> Rate.of(JsonTree.read(bytes)));
     }
 
     static Rate.Checked check(Path file) {
-        return named(file, bytes -> Rate.check(JsonTree.read(bytes)));
-    }
-
-    static MeteredSite bills(Path file) {
-        return named(file, BillsJson::read);
-    }
-
-    /** Bills as a spreadsheet exports them. */
-    static BillsRead spreadsheet(Path file, ReadingChoices choices) {
-        return named(file, bytes -> BillsFile.read(bytes, choices));
+        return read(file, bytes -> Rate.check(JsonTree.read(bytes)));
     }
 
     static IntervalReading intervals(Path file, IntervalFileOptions choices) {
@@ -50,7 +36,7 @@ final class Files {
     }
 
     static Proposal proposal(Path file) {
-        return named(file, bytes -> {
+        return read(file, bytes -> {
             Request request = new Request(JsonTree.read(bytes));
             Optional<Proposal> proposal = request.proposal();
             request.refuseIfWrong();
@@ -63,7 +49,12 @@ final class Files {
                 .found(java.nio.file.Files.exists(file) ? "a file that cannot be opened" : "no such file"));
     }
 
-    private static <T> T named(Path file, Function<byte[], T> read) {
+    /**
+     * What a file holds.
+     *
+     * @throws Refusal with the file's name before every place
+     */
+    static <T> T read(Path file, Function<byte[], T> read) {
         try {
             return read.apply(java.nio.file.Files.readAllBytes(file));
         } catch (IOException e) {

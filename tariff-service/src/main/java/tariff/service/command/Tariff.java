@@ -4,12 +4,19 @@ package tariff.service.command;
 import java.io.UncheckedIOException;
 import java.util.Objects;
 import java.util.Set;
+import java.util.function.Function;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Spec;
+import picocli.CommandLine.TypeConversionException;
+import tariff.csv.DateOrder;
+import tariff.csv.DecimalMark;
+import tariff.meter.Unit;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
 
@@ -37,11 +44,25 @@ public final class Tariff implements Runnable {
     public static CommandLine commandLine() {
         CommandLine line = new CommandLine(new Tariff());
         line.setCaseInsensitiveEnumValuesAllowed(true);
+        line.registerConverter(Unit.class, word -> one("unit", Unit.values(), Unit::symbol, word));
+        line.registerConverter(DateOrder.class, word -> one("order", DateOrder.values(), DateOrder::word, word));
+        line.registerConverter(DecimalMark.class, word -> one("mark", DecimalMark.values(), DecimalMark::word, word));
         line.setUsageHelpWidth(Wrapped.WIDTH);
         line.setExecutionExceptionHandler(Tariff::explain);
         line.getSubcommands().values().forEach(each -> each.getCommandSpec().exitCodeOnInvalidInput(Exit.USAGE));
         line.getCommandSpec().exitCodeOnInvalidInput(Exit.USAGE);
         return line;
+    }
+
+    private static <T> T one(String what, T[] values, Function<T, String> name, String word) {
+        return Stream.of(values)
+                .filter(each -> name.apply(each).equals(word))
+                .findFirst()
+                .orElseThrow(() -> new TypeConversionException("\"" + word + "\" is no " + what + "; one of: "
+                        + Stream.of(values)
+                                .map(name)
+                                .filter(each -> !each.isEmpty())
+                                .collect(Collectors.joining(", "))));
     }
 
     @Override
