@@ -55,7 +55,7 @@ public record RateWords(String heading, List<String> definitions, List<String> l
     private static String sentence(Line line, Scope scope) {
         String when = line.heading()
                 .when()
-                .map(condition -> ", only if " + condition.words())
+                .map(condition -> ", " + condition.ending())
                 .orElse("");
         String round =
                 line.heading().round().map(rounding -> "; " + rounding.words()).orElse("");

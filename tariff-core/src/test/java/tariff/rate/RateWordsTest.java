@@ -79,8 +79,7 @@ class RateWordsTest {
                 "'blocks': [ { 'upTo': 50, 'price': 1 }, { 'upTo': 90, 'price': 2 }, { 'price': 3 } ] | kWh: up to 50 kWh at 1 per kWh, then"
                         + " up to 90 kWh at 2 per kWh, the rest at 3 per kWh",
                 "'price': 1, 'when': { 'option': 'primary metered' } | kWh, at 1 per kWh, only if the site is marked \"primary metered\"",
-                "'price': 1, 'when': { 'not': { 'season': 'summer' } } | kWh, at 1 per kWh, only if it is not so that most of the period"
-                        + " lies in summer",
+                "'price': 1, 'when': { 'not': { 'season': 'summer' } } | kWh, at 1 per kWh, unless most of the period lies in summer",
                 "'price': 1, 'when': { 'quantity': { 'peak': 'kW' }, 'reaches': { 'constant': 15, 'unit': 'kW' } } | kWh, at 1 per kWh,"
                         + " only if the highest kW is at least 15 kW",
                 "'price': 1, 'when': { 'quantity': { 'peak': 'kW' }, 'exceeds': { 'constant': 15, 'unit': 'kW' } } | kWh, at 1 per kWh,"

@@ -107,14 +107,14 @@ class RateSchemaMutationsTest {
         List<Object> shelf = shelf();
         Map<String, List<Object>> parts = parts(shelf);
         int usable = 0;
-        for (int i = 0; i < 150; i++) {
+        for (int i = 0; i < 60; i++) {
             Object rate = shelf.get(random.nextInt(shelf.size()));
             for (int change = 0; change < 4; change++) {
                 rate = changed(rate, random, (key, value) -> pick(parts.get(key), random));
             }
             usable += assertAgreed(rate) ? 1 : 0;
         }
-        assertThat(usable).isGreaterThan(40);
+        assertThat(usable).isGreaterThan(15);
     }
 
     @ParameterizedTest
@@ -123,14 +123,14 @@ class RateSchemaMutationsTest {
         Random random = new Random(seed);
         List<Object> shelf = shelf();
         int refused = 0;
-        for (int i = 0; i < 150; i++) {
+        for (int i = 0; i < 60; i++) {
             Object rate = changed(
                     shelf.get(random.nextInt(shelf.size())),
                     random,
                     (key, value) -> SLIPS[random.nextInt(SLIPS.length)]);
             refused += assertAgreed(rate) ? 0 : 1;
         }
-        assertThat(refused).isGreaterThan(40);
+        assertThat(refused).isGreaterThan(15);
     }
 
     @ParameterizedTest
@@ -141,7 +141,7 @@ class RateSchemaMutationsTest {
         Map<String, List<Object>> parts = parts(shelf);
         List<String> keys = List.copyOf(parts.keySet());
         int refused = 0;
-        for (int i = 0; i < 150; i++) {
+        for (int i = 0; i < 60; i++) {
             Object rate = changed(shelf.get(random.nextInt(shelf.size())), random, (key, value) -> {
                 if (!(value instanceof Map<?, ?> map) || map.isEmpty()) {
                     return value;
@@ -157,7 +157,7 @@ class RateSchemaMutationsTest {
             });
             refused += assertAgreed(rate) ? 0 : 1;
         }
-        assertThat(refused).isGreaterThan(20);
+        assertThat(refused).isGreaterThan(8);
     }
 
     @Test
