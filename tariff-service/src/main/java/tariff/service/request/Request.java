@@ -164,6 +164,19 @@ public final class Request {
                 terms.bank(), Optional.empty(), OutlookTerms.level().outlook(), atSite));
     }
 
+    /** The same of a document that may also be an offer: its other parts are read too. */
+    public Optional<Proposal> screenedOffer() {
+        if (!written.has("network")) {
+            return screened();
+        }
+        return written.has("claims") ? offer().map(Offer::proposal) : proposal();
+    }
+
+    /** A document that is a list of prices. */
+    public Optional<PriceTerms> prices() {
+        return declared(PriceTerms.read(written), "");
+    }
+
     /** Under {@code "prices"}, {@code "outlook"}, {@code "choice"} and {@code "basis"}: what a sizing is asked with. */
     public Optional<SizeTerms> sizing() {
         int before = findings.size();
