@@ -19,9 +19,7 @@ record ReviewAnswer(ClaimReview review) implements Format.Printable {
         StringBuilder out = new StringBuilder("What the offer promises\n");
         for (Reviewed claim : review.claims()) {
             out.append('\n').append(Wrapped.text("The offer " + said(claim)));
-            out.append(Wrapped.text("  "
-                    + claim.verdict().kind().replace('-', ' ').toUpperCase(Locale.ROOT) + ": "
-                    + claim.verdict().words() + "."));
+            out.append(Wrapped.text("  " + capital(claim.verdict().words()) + "."));
             claim.slips().forEach(slip -> out.append(Wrapped.text("  Slip: " + slip.words() + ".")));
             claim.working().forEach(each -> out.append(Wrapped.text("    " + each.what() + ": " + each.figure())));
         }
@@ -33,6 +31,10 @@ record ReviewAnswer(ClaimReview review) implements Format.Printable {
     /** A claim speaks of the bank; one that nobody wrote down is made by every plain bank. */
     private static String said(Reviewed claim) {
         return "says that the bank " + claim.claim().words();
+    }
+
+    private static String capital(String words) {
+        return words.substring(0, 1).toUpperCase(Locale.ROOT) + words.substring(1);
     }
 
     @Override

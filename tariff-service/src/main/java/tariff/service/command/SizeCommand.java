@@ -44,7 +44,7 @@ final class SizeCommand implements Callable<Integer> {
                 .map(sums -> Sizing.of(billing, sums, terms))
                 .orElseGet(() -> Sizing.of(billing, metered.months(), terms));
         format.print(
-                new SizingAnswer(billing, sizing.with(metered.assumptions())),
+                new SizingAnswer(billing, asked.basis(), sizing.with(metered.assumptions())),
                 spec.commandLine().getOut());
         return Exit.OK;
     }

@@ -60,7 +60,7 @@ final class SizeOptions {
             names = "--step-count",
             paramLabel = "STEPS",
             description = "equal switched steps of a bank of any size; ${DEFAULT-VALUE} unless said",
-            defaultValue = "6")
+            defaultValue = "5")
     private int steps;
 
     @Option(
@@ -93,7 +93,7 @@ final class SizeOptions {
             names = "--units",
             paramLabel = "UNITS",
             description = "units that a bank has room for; ${DEFAULT-VALUE} unless said",
-            defaultValue = "8")
+            defaultValue = "6")
     private int units;
 
     @Option(

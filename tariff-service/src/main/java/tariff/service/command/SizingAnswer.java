@@ -17,8 +17,12 @@ import tariff.payback.Answer;
 import tariff.proposal.SizedBank;
 import tariff.proposal.Sizing;
 
-/** A sizing, printed. */
-record SizingAnswer(Billing billing, Sizing sizing) implements Format.Printable {
+/**
+ * A sizing, printed.
+ *
+ * @param basis the estimate that answers rest on unless they name another
+ */
+record SizingAnswer(Billing billing, Estimate basis, Sizing sizing) implements Format.Printable {
 
     @Override
     public String text() {
@@ -53,46 +57,53 @@ record SizingAnswer(Billing billing, Sizing sizing) implements Format.Printable 
                 + billing.rate().currency();
     }
 
-    /** The named answers, in the order of what to follow. */
-    private Map<String, Answer<SizedBank>> named() {
-        Map<String, Answer<SizedBank>> all = new java.util.LinkedHashMap<>();
-        all.put("Worth most", sizing.highestValue());
-        all.put("Paid back soonest", sizing.shortestPayback());
-        all.put("Smallest without penalty", sizing.smallestWithoutPenalty());
+    /** An answer under its name, with the estimate that it rests on. */
+    private record Named(String name, Estimate estimate, Answer<SizedBank> answer) {}
+
+    /** In the order of what to follow. */
+    private List<Named> named() {
+        List<Named> all = new ArrayList<>(List.of(
+                new Named("Worth most", basis, sizing.highestValue()),
+                new Named("Paid back soonest", basis, sizing.shortestPayback()),
+                new Named("Smallest without penalty", basis, sizing.smallestWithoutPenalty())));
         for (Estimate estimate : Estimate.values()) {
-            all.put("Worth most by the " + word(estimate) + " estimate", sizing.bestFor(estimate));
+            all.add(new Named("Worth most, " + word(estimate), estimate, sizing.bestFor(estimate)));
         }
-        all.put("Least regret", sizing.leastRegret());
+        all.add(new Named("Least regret", basis, sizing.leastRegret()));
         return all;
     }
 
     private String answers() {
-        Table table = new Table()
-                .row("", "kvar", "cost", "saved a year", "low to high", "net present value", "years to pay back");
-        named().forEach((name, answer) -> table.row(answer.<String[]>fold(
-                sized -> row(name, sized), reason -> new String[] {"  " + name, "no bank", "", "", "", "", ""})));
+        Table table = new Table().row("", "kvar", "cost", "saved, low", "central", "high", "worth today", "years");
+        for (Named each : named()) {
+            table.row(each.answer().<String[]>fold(sized -> row(each, sized), reason ->
+                    new String[] {"  " + each.name(), "none"}));
+        }
         return table.text();
     }
 
-    private static String[] row(String name, SizedBank sized) {
-        SizedBank.Gain central = sized.gain(Estimate.CENTRAL);
-        return new String[] {
-            "  " + name,
-            sized.kvar().stripTrailingZeros().toPlainString(),
-            money(sized.investment().netCost()),
-            money(central.settledYear()),
-            money(sized.gain(Estimate.LOW).settledYear()) + " to "
-                    + money(sized.gain(Estimate.HIGH).settledYear()),
-            money(central.netPresentValue()),
-            central.paybackYears().<String>fold(SizingAnswer::money, reason -> "n/a")
-        };
+    private static String[] row(Named named, SizedBank sized) {
+        SizedBank.Gain gain = sized.gain(named.estimate());
+        List<String> cells = new ArrayList<>(List.of(
+                "  " + named.name(),
+                plain(sized.kvar()),
+                money(sized.investment().netCost())));
+        for (Estimate estimate : Estimate.values()) {
+            cells.add(money(sized.gain(estimate).settledYear()));
+        }
+        cells.add(money(gain.netPresentValue()));
+        cells.add(gain.paybackYears().<String>fold(SizingAnswer::money, reason -> "n/a"));
+        return cells.toArray(String[]::new);
     }
 
     private void reasons(StringBuilder out) {
-        named().forEach((name, answer) -> answer.<String>fold(
-                        sized -> name + ": " + divided(sized.bank()), reason -> name + ": " + reason)
-                .lines()
-                .forEach(line -> out.append(Wrapped.text("  " + line + "."))));
+        out.append(Wrapped.text(
+                "  Saved is a settled year's saving; worth today (net present value) and years to pay back are by the "
+                        + word(basis) + " estimate, unless the row names another."));
+        for (Named each : named()) {
+            out.append(Wrapped.text("  " + each.name() + ": "
+                    + each.answer().<String>fold(sized -> divided(sized.bank()), reason -> reason) + "."));
+        }
         out.append(Wrapped.text("  At worst the choice of least regret turns out " + money(sizing.worstRegret())
                 + " short of the best."));
     }

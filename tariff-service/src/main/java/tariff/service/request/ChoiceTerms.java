@@ -53,9 +53,9 @@ public record ChoiceTerms(
         int mostUnits,
 
         BankTerms make) {
-    static final int USUAL_STEPS = 6;
+    static final int USUAL_STEPS = 5;
     static final BigDecimal USUAL_SHARE = new BigDecimal("0.3");
-    static final int USUAL_UNITS = 8;
+    static final int USUAL_UNITS = 6;
     private static final String STEPS = "1 to 24 steps";
     private static final String UNITS = "1 to 24 units";
     private static final String SHARE = "above 0, below 1";
