@@ -19,18 +19,19 @@ import tariff.correction.Estimate;
 import tariff.meter.MeteredMonth;
 import tariff.meter.MonthOrder;
 import tariff.meter.Period;
+import tariff.notice.Assumption;
 import tariff.notice.Refusal;
 
 /**
  * Which clause bites: what each line costs because of reactive load, and what the next point of power factor or the next few kvar would
  * take off the bills.
  *
- * @param currency ISO 4217 code
+ * @param assessment the next few kvar, held against the months
  * @param bankKvar the size of the next few kvar, a fixed bank
  * @param lines each line over all months, in the rate's order
  * @param months the months in order
  */
-public record ClauseEffects(String currency, BigDecimal bankKvar, List<LineCost> lines, List<Month> months) {
+public record ClauseEffects(Assessment assessment, BigDecimal bankKvar, List<LineCost> lines, List<Month> months) {
     /** The usual size of the next few kvar. Common practice, no source. */
     public static final BigDecimal USUAL_KVAR = BigDecimal.valueOf(50);
 
@@ -78,7 +79,12 @@ public record ClauseEffects(String currency, BigDecimal bankKvar, List<LineCost>
             }
             all.add(new Month(month.asItIs().month().period(), LineCost.of(month), ahead.get(i), nextBank));
         }
-        return new ClauseEffects(billing.rate().currency(), bankKvar, LineCost.of(today), all);
+        return new ClauseEffects(assessment, bankKvar, LineCost.of(today), all);
+    }
+
+    /** The same answer, with what reading the files took to be so said first. */
+    public ClauseEffects with(List<Assumption> more) {
+        return new ClauseEffects(assessment.with(more), bankKvar, lines, months);
     }
 
     /** What the next 0.01 of power factor takes off all months together. */

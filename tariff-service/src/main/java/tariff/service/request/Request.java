@@ -101,6 +101,11 @@ public final class Request {
                 terms -> new Proposal(terms.bank(), investment.map(InvestmentTerms::investment), outlook.outlook()));
     }
 
+    /** The next few kvar under {@code "kvar"}, and whether {@code "charts"} are wanted. */
+    public Optional<ClauseTerms> clauses() {
+        return declared(ClauseTerms.read(written), "");
+    }
+
     private <T> Optional<T> declared(T terms, String pointer) {
         List<Finding> found = Declared.check(terms, pointer);
         findings.addAll(found);
