@@ -93,7 +93,7 @@ record ClauseEffectsAnswer(ClauseEffects effects) implements Format.Printable {
                 + money(effects.nextBank(Estimate.HIGH)) + " in a settled year, by estimate "
                 + money(effects.nextBank(Estimate.CENTRAL)) + "."
                 + effects.lastToFlatten()
-                        .map(month -> " Savings end last in " + month.period() + ".")
+                        .map(month -> " " + month.period() + " needs most kvar until nothing more is saved.")
                         .orElse(" Nothing more can be saved.");
     }
 

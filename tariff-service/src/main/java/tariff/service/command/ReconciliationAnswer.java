@@ -34,7 +34,7 @@ record ReconciliationAnswer(Billing billing, Reconciliation reconciliation) impl
                         .append(lines(month)));
         section(
                 out,
-                "What would make them agree, the likeliest first; found by trying, so ask the utility",
+                "What would make them agree, the best match first; found by trying, so ask the utility",
                 reconciliation.explanations().stream().map(Explanation::message).toList());
         section(
                 out,
