@@ -67,7 +67,7 @@ class ReconcileCommandTest {
     }
 
     @Test
-    void doubtsComeFirstAndWhatNothingExplainsIsNamed() throws IOException {
+    void doubtsComeBeforeAnythingWorkedOut() throws IOException {
         String bills = file("""
                 { "site": { "agreed": { "kW": 420 } }, "months": [
                   { "month": "2025-01", "energyKwh": 118400, "laggingKvarh": 82880, "peakKw": 90, "charged": { "total": 12345.67 } } ] }
@@ -76,7 +76,15 @@ class ReconcileCommandTest {
         assertThat(out.indexOf("Doubtful in the readings\n- 2025-01: "))
                 .isPositive()
                 .isLessThan(out.indexOf("\nMonth "));
-        assertThat(out).contains("Nothing was found that would make these agree\n- 2025-01: ");
+    }
+
+    /** February's energy as 10,304.10 in place of 12,304.10: no digits of a reading and no change of the rate do that. */
+    @Test
+    void aMonthThatNothingExplainsIsNamed() throws IOException {
+        String bills = file(Examples.text("examples/paid/harbourside.json").replace("12304.10", "10304.10"));
+        assertThat(Printed.by("reconcile", RATE, bills).fits().out())
+                .contains("\n- the power factor rounded half up to 0.01 would make 10 of 12 months agree to the cent;")
+                .contains("\nNothing was found that would make these agree\n- 2025-02: +51.19\n");
     }
 
     @Test
