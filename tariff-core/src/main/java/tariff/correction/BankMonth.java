@@ -67,7 +67,10 @@ public record BankMonth(CapacitorBank bank, WindowHours windowHours) {
             BigDecimal left = laggingLeft(load, known, hours, estimate);
             BigDecimal sent = leadingAfter(load, known.get(LEADING_KVARH).orElse(BigDecimal.ZERO), hours, estimate);
             after = after.with(LAGGING_KVARH, left).with(LEADING_KVARH, sent);
-            after = energies(known, after, hours, left, sent);
+            BigDecimal switched = lagging.get()
+                    .subtract(laggingLeft(load, known, hours, estimate.opposite()))
+                    .max(BigDecimal.ZERO);
+            after = energies(known, after, ownLosses(hours, switched), left, sent);
         }
         return peaks(known, after, estimate);
     }
@@ -120,20 +123,20 @@ public record BankMonth(CapacitorBank bank, WindowHours windowHours) {
         return before.add(created.max(BigDecimal.ZERO)).add(hunting);
     }
 
-    private Readings energies(Readings known, Readings after, BigDecimal hours, BigDecimal left, BigDecimal sent) {
+    /** kWh of the bank itself, which is dearest where the steps work most: so least in the high estimate, most in the low. */
+    private BigDecimal ownLosses(BigDecimal hours, BigDecimal switchedKvarh) {
+        BigDecimal delivered = bank.effectiveFixedKvar().multiply(hours);
+        if (bank.isAutomatic()) {
+            delivered = delivered.add(switchedKvarh);
+        }
+        return delivered.multiply(bank.wattsPerKvar()).divide(WATTS_A_KILOWATT, Triangle.PRECISION);
+    }
+
+    private static Readings energies(
+            Readings known, Readings after, BigDecimal lost, BigDecimal left, BigDecimal sent) {
         Readings result = after;
         Optional<BigDecimal> kwh = known.get(ENERGY_KWH);
         if (kwh.isPresent()) {
-            BigDecimal delivered = bank.effectiveFixedKvar()
-                    .multiply(hours)
-                    .add(
-                            bank.isAutomatic()
-                                    ? known.get(LAGGING_KVARH)
-                                            .orElse(left)
-                                            .subtract(left)
-                                            .max(BigDecimal.ZERO)
-                                    : BigDecimal.ZERO);
-            BigDecimal lost = delivered.multiply(bank.wattsPerKvar()).divide(WATTS_A_KILOWATT, Triangle.PRECISION);
             BigDecimal active = kwh.get().add(lost);
             result = result.with(ENERGY_KWH, active);
             if (known.has(POWER_FACTOR) && active.signum() > 0) {

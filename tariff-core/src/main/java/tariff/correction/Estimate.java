@@ -11,5 +11,10 @@ public enum Estimate {
     /** An estimate between the bounds, resting on an assumed load curve. */
     CENTRAL,
     /** The most a bank can save: kvarh were drawn evenly. */
-    HIGH
+    HIGH;
+
+    /** The other side: what is least in one is most in the other. */
+    Estimate opposite() {
+        return this == LOW ? HIGH : this == HIGH ? LOW : CENTRAL;
+    }
 }

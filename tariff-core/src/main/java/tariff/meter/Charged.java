@@ -22,6 +22,10 @@ public record Charged(Optional<BigDecimal> total, Map<String, BigDecimal> lines)
         return new Charged(Optional.empty(), Map.of());
     }
 
+    public boolean isKnown() {
+        return total.isPresent() || !lines.isEmpty();
+    }
+
     public static Charged total(String amount) {
         return new Charged(Optional.of(new BigDecimal(amount)), Map.of());
     }

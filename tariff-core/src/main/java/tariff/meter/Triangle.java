@@ -18,8 +18,6 @@ public final class Triangle {
 
     private static final BigDecimal NEAR = new BigDecimal("1e-28");
 
-    private static final MathContext ROOT = new MathContext(40, RoundingMode.HALF_EVEN);
-
     private Triangle() {}
 
     /** √(active² + reactive²), the apparent side; 40 digits. */
@@ -27,7 +25,7 @@ public final class Triangle {
         if (reactive.signum() == 0) {
             return active.abs();
         }
-        return active.multiply(active).add(reactive.multiply(reactive)).sqrt(ROOT);
+        return SquareRoot.of(active.multiply(active).add(reactive.multiply(reactive)));
     }
 
     /**
@@ -45,7 +43,7 @@ public final class Triangle {
     /** √(apparent² − active²), or zero where the apparent side is the smaller one. */
     public static BigDecimal reactive(BigDecimal active, BigDecimal apparent) {
         BigDecimal square = apparent.multiply(apparent).subtract(active.multiply(active));
-        return square.signum() <= 0 ? BigDecimal.ZERO : square.sqrt(ROOT);
+        return square.signum() <= 0 ? BigDecimal.ZERO : SquareRoot.of(square);
     }
 
     /**

@@ -29,8 +29,9 @@ final class BankAssumptions {
                 "bank-always-on",
                 YEAR,
                 bank.isAutomatic()
-                        ? "the fixed kvar are on in every hour; the steps follow the load and send nothing back but for two thirds of the"
-                                + " smallest step, which the low savings count against the bank"
+                        ? (bank.fixedKvar().signum() > 0 ? "the fixed kvar are on in every hour; " : "")
+                                + "the steps follow the load and send nothing back but for two thirds of the smallest step, which"
+                                + " the low savings count against the bank"
                         : "the bank is on in every hour of the year",
                 "switch it by time, and say in which hours"));
         all.add(new Assumption(
@@ -38,9 +39,12 @@ final class BankAssumptions {
                 YEAR,
                 "the bank gives its rated kvar at the stated voltage; new capacitors may differ by −5 to +10 % (IEC 60831-1:2014, from memory)",
                 "give the measured kvar"));
-        if (bank.wattsPerKvar().signum() == 0) {
+        if (exact || bank.wattsPerKvar().signum() == 0) {
             all.add(new Assumption(
-                    "bank-losses", YEAR, "the bank's own losses are left out", "give its losses in W per kvar"));
+                    "bank-losses",
+                    YEAR,
+                    "the bank's own losses are left out",
+                    exact ? "none" : "give its losses in W per kvar"));
         }
         all.add(new Assumption(
                 "year-repeats", YEAR, "every later year has the same load as the year of the bills", "none"));

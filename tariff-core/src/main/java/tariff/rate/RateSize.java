@@ -17,7 +17,6 @@ import tariff.rate.clause.Quantity;
 final class RateSize {
     private static final long MOST_CLAUSES = 200_000;
     private static final int DEEPEST = 400;
-    private static final int MOST_MONTHS_BACK = 60;
 
     private final RateDefinition rate;
     private final Map<String, Size> named = new HashMap<>();
@@ -76,7 +75,14 @@ final class RateSize {
         for (Clause part : clause.parts()) {
             size = size.and(of(part, depth + 1));
         }
-        return clause instanceof Earlier ? size.times(MOST_MONTHS_BACK) : size;
+        return clause instanceof Earlier past ? size.times(monthsOf(past)) : size;
+    }
+
+    /** A named quantity is worked out once for each month and kept, so looking back on it costs nothing more. */
+    private static int monthsOf(Earlier past) {
+        return past.of() instanceof Named
+                ? 1
+                : Math.max(past.months(), past.since().isPresent() ? 12 : 1);
     }
 
     /** A name met inside its own definition counts once: its past is kept, not worked out again. */

@@ -30,6 +30,9 @@ public record Agreement(List<ReconciledMonth> months) {
      * @throws Refusal naming every month that lacks what the rate bills
      */
     public static Agreement of(Billing billing, List<MeteredMonth> past, List<MeteredMonth> months) {
+        if (months.stream().noneMatch(month -> month.charged().isKnown())) {
+            return new Agreement(List.of());
+        }
         List<MeteredMonth> chain = new ArrayList<>(past);
         chain.addAll(months);
         List<Statement> statements = billing.statements(past, months);

@@ -135,6 +135,29 @@ class AssessmentTest {
                 .isEqualTo(assess(RATCHET, year(), bank));
     }
 
+    /** The bank's own 10 W per kvar are dearest where its steps work most; that must not turn the estimates round. */
+    @Test
+    void theBanksOwnLossesKeepTheEstimatesInOrder() {
+        CapacitorBank lossy = new CapacitorBank(
+                BigDecimal.ZERO,
+                List.of(new BigDecimal("150"), new BigDecimal("150")),
+                Optional.of(new BigDecimal("0.98")),
+                Optional.empty(),
+                Optional.empty(),
+                BigDecimal.ZERO,
+                BigDecimal.TEN);
+        Assessment assessment = assess(EXCESS, year(), lossy);
+        assertThat(assessment.savings(Estimate.LOW).settledYearTotal())
+                .isLessThan(assessment.savings(Estimate.CENTRAL).settledYearTotal());
+        assertThat(assessment.savings(Estimate.CENTRAL).settledYearTotal())
+                .isLessThanOrEqualTo(assessment.savings(Estimate.HIGH).settledYearTotal());
+        // April, high: all 67,200 kvarh above the free share saved at 0.04; own arithmetic on the least kvarh
+        // delivered: the target leaves
+        // 160,000 × tan(acos 0.98) = 32,489 kvarh and the dead band 72,000, so at least 120,000 − 104,489 = 15,511
+        // kvarh × 10 W = 155 kWh
+        assertThat(assessment.savings(Estimate.HIGH).settledYearMonths().get(3)).isEqualByComparingTo("2672.49");
+    }
+
     @Test
     void lowNeverSavesMoreThanCentralNorCentralMoreThanHigh() {
         Random random = new Random(20260103);
