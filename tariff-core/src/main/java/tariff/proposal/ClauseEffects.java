@@ -18,6 +18,7 @@ import tariff.correction.CapacitorBank;
 import tariff.correction.Estimate;
 import tariff.meter.MeteredMonth;
 import tariff.meter.MonthOrder;
+import tariff.meter.MonthlySums;
 import tariff.meter.Period;
 import tariff.notice.Assumption;
 import tariff.notice.Refusal;
@@ -63,7 +64,24 @@ public record ClauseEffects(Assessment assessment, BigDecimal bankKvar, List<Lin
      * @throws Refusal naming every month that lacks what the rate bills
      */
     public static ClauseEffects of(Billing billing, List<MeteredMonth> months, BigDecimal bankKvar) {
-        Assessment assessment = Assessment.of(billing, months, Proposal.of(CapacitorBank.fixed(bankKvar)));
+        return of(billing, months, bankKvar, Assessment.of(billing, months, next(bankKvar)));
+    }
+
+    /**
+     * The same on interval data, where all three estimates are the same.
+     *
+     * @throws Refusal naming every month that lacks what the rate bills
+     */
+    public static ClauseEffects of(Billing billing, MonthlySums sums, BigDecimal bankKvar) {
+        return of(billing, sums.calendarMonths(), bankKvar, Assessment.of(billing, sums, next(bankKvar)));
+    }
+
+    private static Proposal next(BigDecimal bankKvar) {
+        return Proposal.of(CapacitorBank.fixed(bankKvar));
+    }
+
+    private static ClauseEffects of(
+            Billing billing, List<MeteredMonth> months, BigDecimal bankKvar, Assessment assessment) {
         PowerFactorCost today = assessment.today();
         List<MeteredMonth> sorted = MonthOrder.of(months);
         int first = sorted.size() - today.months().size();

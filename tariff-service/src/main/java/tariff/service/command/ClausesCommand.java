@@ -48,7 +48,9 @@ final class ClausesCommand implements Callable<Integer> {
     public Integer call() {
         ClauseTerms terms = Declared.require(new ClauseTerms(kvar, false));
         Metered metered = meter.read(spec.commandLine().getErr());
-        ClauseEffects effects = ClauseEffects.of(metered.billing(), metered.months(), terms.kvar());
+        ClauseEffects effects = metered.sums()
+                .map(sums -> ClauseEffects.of(metered.billing(), sums, terms.kvar()))
+                .orElseGet(() -> ClauseEffects.of(metered.billing(), metered.months(), terms.kvar()));
         format.print(
                 new ClauseEffectsAnswer(effects.with(metered.assumptions())),
                 spec.commandLine().getOut());
