@@ -31,7 +31,7 @@ record AssessmentAnswer(Assessment assessment) implements Format.Printable {
 
     @Override
     public String text() {
-        StringBuilder out = new StringBuilder(Wrapped.text(title()));
+        StringBuilder out = new StringBuilder(Wrapped.text(Title.of(assessment.billing())));
         out.append('\n').append(months());
         out.append('\n')
                 .append(Wrapped.text("The rate's own point without penalty: "
@@ -52,13 +52,6 @@ record AssessmentAnswer(Assessment assessment) implements Format.Printable {
         return out.append('\n')
                 .append(ScreensAnswer.cautions(assessment.cautions()))
                 .toString();
-    }
-
-    private String title() {
-        String site = assessment.billing().site().name();
-        return (site.isEmpty() ? "" : site + " under ")
-                + assessment.billing().rate().name() + ", amounts in "
-                + assessment.billing().rate().currency();
     }
 
     private String months() {

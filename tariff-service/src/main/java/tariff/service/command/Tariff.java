@@ -27,6 +27,8 @@ import tariff.notice.Refusal;
         subcommands = {
             CheckCommand.class,
             StatementCommand.class,
+            ReconcileCommand.class,
+            ClausesCommand.class,
             AssessCommand.class,
             SizeCommand.class,
             ReviewCommand.class,
@@ -38,12 +40,12 @@ import tariff.notice.Refusal;
         exitCodeListHeading = "%nExit codes:%n",
         exitCodeList = {
             "0:answered",
-            "1:a file cannot be read, or is not what it should be at all",
+            "1:a file cannot be read or written, or is not what it should be at all",
             "2:there are findings, one a line on the standard error",
             "64:the command line itself is wrong"
         })
 public final class Tariff implements Runnable {
-    private static final Set<String> NO_DOCUMENT = Set.of("not-json", "not-text", "unreadable");
+    private static final Set<String> NO_DOCUMENT = Set.of("not-json", "not-text", "unreadable", "unwritable");
 
     @Spec
     private @Nullable CommandSpec spec;

@@ -27,6 +27,8 @@ public final class Routes {
                 new Route(POST, "/reviews", exchange.of(new Reviews(shelf))),
                 new Route(POST, "/screenings", exchange.of(new Screenings())),
                 new Route(POST, "/statements", exchange.of(new Statements(shelf))),
-                new Route(POST, "/assessments", exchange.of(new Assessments(shelf))));
+                new Route(POST, "/assessments", exchange.of(new Assessments(shelf))),
+                new Route(POST, "/reconciliations", exchange.of(new Reconciliations(shelf))),
+                new Route(POST, "/clause-effects", exchange.of(new Clauses(shelf))));
     }
 }

@@ -201,6 +201,11 @@ public final class Request {
                 : Optional.empty();
     }
 
+    /** The next few kvar under {@code "kvar"}, and whether {@code "charts"} are wanted. */
+    public Optional<ClauseTerms> clauses() {
+        return declared(ClauseTerms.read(written), "");
+    }
+
     private <T> Optional<T> declared(T terms, String pointer) {
         List<Finding> found = Declared.check(terms, pointer);
         findings.addAll(found);
