@@ -28,14 +28,15 @@ public final class AssessmentJson {
         assessment.savings().forEach((estimate, bank) -> savings.with(key(estimate), savings(bank)));
         JsonObject payback = new JsonObject();
         assessment.appraisals().forEach((estimate, appraisal) -> payback.with(key(estimate), payback(appraisal)));
-        return new JsonObject()
+        JsonObject json = new JsonObject()
                 .with("rate", assessment.billing().rate().name())
                 .with("currency", assessment.billing().rate().currency())
                 .with("today", today(assessment.today()))
                 .with("savings", savings)
                 .withUnlessEmpty("payback", payback)
-                .withIf("whyNoPayback", assessment.whyNoPayback())
-                .withAll("assumptions", assessment.assumptions(), NoticeJson::write)
+                .withIf("whyNoPayback", assessment.whyNoPayback());
+        assessment.inService().ifPresent(year -> json.with("inService", YearInServiceJson.write(year)));
+        return json.withAll("assumptions", assessment.assumptions(), NoticeJson::write)
                 .withAll("cautions", assessment.cautions(), NoticeJson::write);
     }
 

@@ -43,6 +43,7 @@ record AssessmentAnswer(Assessment assessment) implements Format.Printable {
         out.append("\nThe proposal: ").append(bank()).append("\n\n").append(savings());
         assessment.whyNoPayback().ifPresent(why -> out.append(Wrapped.text("  No payback: " + why + ".")));
         reasons().forEach(reason -> out.append(Wrapped.text("  " + reason + ".")));
+        assessment.inService().ifPresent(year -> out.append('\n').append(InServiceText.of(year)));
         out.append("\nTaken to be so\n");
         Assumed.text(assessment.assumptions()).forEach(each -> out.append(Wrapped.text("- " + each)));
         out.append("\nBefore anybody acts on this\n");
