@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.benchmark;
 
+import java.nio.charset.StandardCharsets;
 import java.time.Instant;
 import java.time.ZoneOffset;
 import java.util.BitSet;
@@ -40,5 +41,18 @@ final class YearOfIntervals {
                 leading,
                 Optional.empty(),
                 new BitSet());
+    }
+
+    /** The series as a meter's file. */
+    static byte[] file(IntervalSeries series) {
+        StringBuilder rows = new StringBuilder("from,kWh,lagging kvarh,leading kvarh\n");
+        for (int i = 0; i < series.size(); i++) {
+            rows.append(series.startOf(i).toString().substring(0, 16).replace('T', ' '));
+            rows.append(',').append(series.decimal(series.scaledKwh(i)).toPlainString());
+            rows.append(',').append(series.decimal(series.scaledLaggingKvarh(i)).toPlainString());
+            rows.append(',').append(series.decimal(series.scaledLeadingKvarh(i)).toPlainString());
+            rows.append('\n');
+        }
+        return rows.toString().getBytes(StandardCharsets.UTF_8);
     }
 }

@@ -12,6 +12,9 @@ import tariff.meter.IntervalSeries;
  * so many kvar is a whole number at any step, so that nothing rounds until the end.
  */
 final class ReactiveTally {
+    /** Below this the squares of two numbers add up within a long. */
+    private static final long SQUARES_FIT = 1L << 31;
+
     private final IntervalSeries series;
     private final int steps;
     private long before;
@@ -22,7 +25,8 @@ final class ReactiveTally {
     private long blockLeading;
     private int inBlock;
     private boolean wholeBlock = true;
-    private long peakKw;
+    private long peakKva;
+    private long peakSquared;
     private long peakLagging;
     private long peakLeading;
 
@@ -61,13 +65,25 @@ final class ReactiveTally {
         if (wholeBlock) {
             peakLagging = Math.max(peakLagging, blockLagging);
             peakLeading = Math.max(peakLeading, blockLeading);
-            peakKw = Math.max(peakKw, Apparent.of(blockKw, blockLagging - blockLeading));
+            apparent(blockKw, blockLagging - blockLeading);
         }
         blockKw = 0;
         blockLagging = 0;
         blockLeading = 0;
         inBlock = 0;
         wholeBlock = true;
+    }
+
+    /** A root is drawn only where the squares are the highest so far. */
+    private void apparent(long kw, long kvar) {
+        if (kw < SQUARES_FIT && Math.abs(kvar) < SQUARES_FIT) {
+            long squared = kw * kw + kvar * kvar;
+            if (squared <= peakSquared) {
+                return;
+            }
+            peakSquared = squared;
+        }
+        peakKva = Math.max(peakKva, Apparent.of(kw, kvar));
     }
 
     ReactiveOutcome outcome() {
@@ -77,7 +93,7 @@ final class ReactiveTally {
                 energy(before - lagging),
                 over(peakLagging, steps),
                 over(peakLeading, steps),
-                over(peakKw, steps));
+                over(peakKva, steps));
     }
 
     private BigDecimal energy(long scaledKvarIntervals) {

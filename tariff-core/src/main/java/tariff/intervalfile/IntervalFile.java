@@ -37,13 +37,24 @@ public final class IntervalFile {
      * @throws IOException if it cannot be read at all
      */
     public static IntervalReading read(Path file, IntervalFileOptions options) throws IOException {
-        try (InputStream bytes = new BufferedInputStream(Files.newInputStream(file), 1 << 16)) {
-            bytes.mark(2);
-            int mark = bytes.read() << 8 | bytes.read();
-            bytes.reset();
-            Charset charset = mark == 0xFEFF || mark == 0xFFFE ? StandardCharsets.UTF_16 : StandardCharsets.UTF_8;
-            return read(new InputStreamReader(bytes, charset), options);
+        try (InputStream bytes = Files.newInputStream(file)) {
+            return read(bytes, options);
         }
+    }
+
+    /**
+     * Reads bytes as they come, without holding them: UTF-8, or UTF-16 with a byte order mark. The caller closes the stream.
+     *
+     * @throws Refusal with everything that is wrong with the file
+     * @throws IOException if it cannot be read at all
+     */
+    public static IntervalReading read(InputStream file, IntervalFileOptions options) throws IOException {
+        BufferedInputStream bytes = new BufferedInputStream(file, 1 << 16);
+        bytes.mark(2);
+        int mark = bytes.read() << 8 | bytes.read();
+        bytes.reset();
+        Charset charset = mark == 0xFEFF || mark == 0xFFFE ? StandardCharsets.UTF_16 : StandardCharsets.UTF_8;
+        return read(new InputStreamReader(bytes, charset), options);
     }
 
     /**

@@ -40,6 +40,7 @@ public final class AssessmentJson {
         if (!screens.isEmpty()) {
             json.withAll("screens", screens, ScreeningsJson::write);
         }
+        assessment.inService().ifPresent(year -> json.with("inService", YearInServiceJson.write(year)));
         return json.withAll("assumptions", assessment.assumptions(), NoticeJson::write)
                 .withAll("cautions", assessment.cautions(), NoticeJson::write);
     }

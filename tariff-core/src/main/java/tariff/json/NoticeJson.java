@@ -22,7 +22,7 @@ public final class NoticeJson {
                 .withIf("allowed", finding.allowed());
     }
 
-    static JsonObject write(Assumption assumption) {
+    public static JsonObject write(Assumption assumption) {
         return new JsonObject()
                 .with("code", assumption.code())
                 .with("where", assumption.where())

@@ -11,11 +11,13 @@ import java.util.Set;
 import java.util.function.BiFunction;
 import java.util.stream.Stream;
 import tariff.bill.Billing;
+import tariff.bill.ByTheTotals;
 import tariff.bill.PowerFactorCost;
 import tariff.bill.Statement;
 import tariff.correction.BankMonth;
 import tariff.correction.BankYear;
 import tariff.correction.Estimate;
+import tariff.correction.YearInService;
 import tariff.meter.MeteredMonth;
 import tariff.meter.MonthOrder;
 import tariff.meter.MonthlySums;
@@ -100,6 +102,7 @@ public record Assessment(
         Set<Assumption> assumptions = new LinkedHashSet<>();
         today.months().forEach(month -> assumptions.addAll(month.asItIs().assumptions()));
         assumptions.addAll(MonthOrder.gaps(sorted));
+        exact.flatMap(walked -> ByTheTotals.note(billing, statements(today))).ifPresent(assumptions::add);
         Agreement.of(billing, past, year).assumption().ifPresent(assumptions::add);
         assumptions.addAll(BankAssumptions.of(billing.rate(), proposal, year, exact.isPresent()));
         return new Assessment(
@@ -120,6 +123,15 @@ public record Assessment(
         return new Assessment(billing, proposal, today, savings, appraisals, exact, all, cautions);
     }
 
+    /** What the bank does to the meter month by month, where interval data say it. */
+    public Optional<YearInService> inService() {
+        return exact.map(bank -> YearInService.of(
+                bank,
+                today.months().stream()
+                        .map(month -> month.asItIs().month().period())
+                        .toList()));
+    }
+
     /** The bank's savings month by month; the estimate between the bounds unless another is asked for. */
     public BankSavings savings(Estimate estimate) {
         return savings.getOrDefault(estimate, new BankSavings(List.of(), List.of(), List.of()));
@@ -132,9 +144,7 @@ public record Assessment(
             List<MeteredMonth> year,
             BiFunction<MeteredMonth, Estimate, MeteredMonth> bank) {
         boolean looksBack = billing.rate().looksBack();
-        List<Statement> before = looksBack && past.size() < YEAR
-                ? billing.statements(year, year)
-                : today.months().stream().map(PowerFactorCost.Month::asItIs).toList();
+        List<Statement> before = looksBack && past.size() < YEAR ? billing.statements(year, year) : statements(today);
         Map<Estimate, BankSavings> all = new EnumMap<>(Estimate.class);
         for (Estimate estimate : Estimate.values()) {
             List<MeteredMonth> after =
@@ -144,6 +154,10 @@ public record Assessment(
             all.put(estimate, new BankSavings(before, first, settled));
         }
         return all;
+    }
+
+    private static List<Statement> statements(PowerFactorCost today) {
+        return today.months().stream().map(PowerFactorCost.Month::asItIs).toList();
     }
 
     private static Map<Estimate, Appraisal> appraisals(Map<Estimate, BankSavings> savings, Proposal proposal) {

@@ -2,6 +2,7 @@
 package tariff.service.command;
 
 import java.math.BigDecimal;
+import java.nio.file.Path;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
@@ -10,7 +11,11 @@ import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
 import tariff.bill.Billing;
+import tariff.meter.MonthlySums;
+import tariff.notice.Finding;
+import tariff.notice.Refusal;
 import tariff.proposal.Assessment;
+import tariff.proposal.DurationOfDemand;
 import tariff.proposal.Proposal;
 import tariff.proposal.ProposalCharts;
 
@@ -39,6 +44,13 @@ final class AssessCommand implements Callable<Integer> {
     @Option(names = "--format", description = "text, json or csv (${DEFAULT-VALUE} unless said)", defaultValue = "text")
     private Format format;
 
+    @Option(
+            names = "--duration-chart",
+            paramLabel = "FILE",
+            description =
+                    "with --intervals: the reactive demand as a duration curve with the bank drawn in, an SVG file")
+    private Optional<Path> durationChart;
+
     @Override
     public Integer call() {
         Proposal proposal = bank.proposal();
@@ -47,6 +59,7 @@ final class AssessCommand implements Callable<Integer> {
         Assessment assessment = metered.sums()
                 .map(sums -> Assessment.of(billing, sums, proposal))
                 .orElseGet(() -> Assessment.of(billing, metered.months(), proposal));
+        durationChart.ifPresent(file -> Files.write(file, curve(metered, proposal)));
         format.print(
                 new AssessmentAnswer(assessment.with(metered.assumptions())),
                 spec.commandLine().getOut());
@@ -55,5 +68,14 @@ final class AssessCommand implements Callable<Integer> {
                 () -> ProposalCharts.documents(assessment, metered.savingsBySize(), proposed),
                 spec.commandLine().getErr());
         return Exit.OK;
+    }
+
+    private static String curve(Metered metered, Proposal proposal) {
+        MonthlySums sums = metered.sums()
+                .orElseThrow(() -> new Refusal(
+                        Finding.error("no-intervals", "--duration-chart", "can be drawn from interval data only")
+                                .allowed("--intervals FILE")));
+        return DurationOfDemand.chart(metered.rate().name(), sums.series(), proposal.bank())
+                .svg();
     }
 }

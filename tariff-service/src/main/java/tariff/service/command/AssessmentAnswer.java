@@ -47,6 +47,7 @@ record AssessmentAnswer(Assessment assessment) implements Format.Printable {
             out.append("\nThe bank at its place, screened\n")
                     .append(ScreensAnswer.text(assessment.proposal().screens()));
         }
+        assessment.inService().ifPresent(year -> out.append('\n').append(InServiceText.of(year)));
         out.append("\nTaken to be so\n");
         Assumed.text(assessment.assumptions()).forEach(each -> out.append(Wrapped.text("- " + each)));
         return out.append('\n')

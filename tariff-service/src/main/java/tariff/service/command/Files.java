@@ -63,6 +63,14 @@ final class Files {
         });
     }
 
+    static void write(Path file, String text) {
+        try {
+            java.nio.file.Files.writeString(file, text);
+        } catch (IOException e) {
+            throw new Refusal(Finding.error("unwritable", file.toString(), "cannot be written"));
+        }
+    }
+
     private static Refusal unreadable(Path file) {
         return new Refusal(Finding.error("unreadable", file.toString(), "cannot be read")
                 .found(java.nio.file.Files.exists(file) ? "a file that cannot be opened" : "no such file"));

@@ -34,9 +34,16 @@ final class ServeCommand implements Callable<Integer> {
             description = "a directory of rates, each served under its file name")
     private Optional<Path> shelf;
 
+    @Option(
+            names = "--most-upload",
+            paramLabel = "BYTES",
+            description = "how long uploaded interval data may be; ${DEFAULT-VALUE} unless said",
+            defaultValue = "" + Service.MOST_UPLOAD_BYTES)
+    private long mostUploadBytes;
+
     @Override
     public Integer call() throws InterruptedException {
-        Service service = Service.build(shelf.map(Shelf::read).orElseGet(Shelf::empty), STOP_MILLIS)
+        Service service = Service.build(shelf.map(Shelf::read).orElseGet(Shelf::empty), STOP_MILLIS, mostUploadBytes)
                 .start(port);
         CountDownLatch ended = new CountDownLatch(1);
         Runtime.getRuntime().addShutdownHook(new Thread(() -> {

@@ -3,15 +3,22 @@ package tariff.service.command;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.Stream;
 import tariff.bill.Statement;
 import tariff.bill.StatementLine;
 import tariff.json.JsonObject;
+import tariff.json.NoticeJson;
 import tariff.json.StatementsJson;
+import tariff.notice.Assumption;
 import tariff.rate.Rate;
 import tariff.rate.clause.Figure;
 
-/** Statements, printed. */
-record StatementAnswer(Rate rate, List<Statement> statements) implements Format.Printable {
+/**
+ * Statements, printed.
+ *
+ * @param more what was taken to be so besides what the statements say
+ */
+record StatementAnswer(Rate rate, List<Statement> statements, List<Assumption> more) implements Format.Printable {
 
     @Override
     public String text() {
@@ -20,7 +27,8 @@ record StatementAnswer(Rate rate, List<Statement> statements) implements Format.
             out.append('\n').append(statement.month().period()).append('\n').append(month(statement));
         }
         List<String> assumptions = Assumed.text(
-                statements.stream().flatMap(each -> each.assumptions().stream()).toList());
+                Stream.concat(more.stream(), statements.stream().flatMap(each -> each.assumptions().stream()))
+                        .toList());
         if (!assumptions.isEmpty()) {
             out.append("\nTaken to be so\n");
             assumptions.forEach(each -> out.append(Wrapped.text("- " + each)));
@@ -53,7 +61,8 @@ record StatementAnswer(Rate rate, List<Statement> statements) implements Format.
 
     @Override
     public JsonObject json() {
-        return StatementsJson.write(rate, statements);
+        JsonObject json = StatementsJson.write(rate, statements);
+        return more.isEmpty() ? json : json.withAll("assumptions", more, NoticeJson::write);
     }
 
     @Override

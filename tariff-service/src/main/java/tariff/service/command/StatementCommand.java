@@ -1,12 +1,17 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.service.command;
 
+import java.util.ArrayList;
+import java.util.List;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
+import tariff.bill.ByTheTotals;
+import tariff.bill.Statement;
+import tariff.notice.Assumption;
 
 /** Bills months under a rate. */
 @Command(
@@ -27,8 +32,13 @@ final class StatementCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         Metered metered = meter.read(spec.commandLine().getErr());
+        List<Statement> statements = metered.billing().statements(metered.months());
+        List<Assumption> more = new ArrayList<>(metered.assumptions());
+        metered.sums()
+                .flatMap(sums -> ByTheTotals.note(metered.billing(), statements))
+                .ifPresent(more::add);
         format.print(
-                new StatementAnswer(metered.rate(), metered.billing().statements(metered.months())),
+                new StatementAnswer(metered.rate(), statements, more),
                 spec.commandLine().getOut());
         return Exit.OK;
     }

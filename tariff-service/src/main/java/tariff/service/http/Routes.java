@@ -11,7 +11,10 @@ import tariff.service.shelf.Shelf;
 public final class Routes {
     private Routes() {}
 
-    public static List<Route> of(Shelf shelf) {
+    /** The route table over a shelf; uploaded interval data may be so many bytes long. */
+    public static List<Route> of(Shelf shelf, long mostUploadBytes) {
+        Intervals intervals = new Intervals(shelf);
+        Uploads uploads = new Uploads(mostUploadBytes);
         Rates rates = new Rates(shelf);
         Exchange exchange = new Exchange(Math.max(2, Runtime.getRuntime().availableProcessors()));
         return List.of(
@@ -29,6 +32,8 @@ public final class Routes {
                 new Route(POST, "/statements", exchange.of(new Statements(shelf))),
                 new Route(POST, "/assessments", exchange.of(new Assessments(shelf))),
                 new Route(POST, "/reconciliations", exchange.of(new Reconciliations(shelf))),
-                new Route(POST, "/clause-effects", exchange.of(new Clauses(shelf))));
+                new Route(POST, "/clause-effects", exchange.of(new Clauses(shelf))),
+                new Route(POST, "/interval-statements", uploads.of(intervals::statements)),
+                new Route(POST, "/interval-assessments", uploads.of(intervals::assessment)));
     }
 }

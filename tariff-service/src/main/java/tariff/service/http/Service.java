@@ -13,6 +13,7 @@ import tariff.service.shelf.Shelf;
 
 /** The service: built from a shelf of rates, and started on a port apart from that. */
 public final class Service {
+    public static final long MOST_UPLOAD_BYTES = 64_000_000;
     private static final int IDLE_MILLIS = 30_000;
     private static final int MOST_THREADS = 24;
 
@@ -28,7 +29,12 @@ public final class Service {
      * @param stopMillis how long a request under way may take to finish once the service is stopped
      */
     public static Service build(Shelf shelf, long stopMillis) {
-        List<Route> routes = Routes.of(shelf);
+        return build(shelf, stopMillis, MOST_UPLOAD_BYTES);
+    }
+
+    /** The same with another limit of uploaded interval data, in bytes. */
+    public static Service build(Shelf shelf, long stopMillis, long mostUploadBytes) {
+        List<Route> routes = Routes.of(shelf, mostUploadBytes);
         return new Service(Javalin.create(config -> configure(config, routes, stopMillis)));
     }
 

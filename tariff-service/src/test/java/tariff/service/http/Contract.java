@@ -81,12 +81,33 @@ final class Contract implements Filter {
                             response.asString()))
                     .isEmpty();
         }
-        if (method.equals("post") && response.statusCode() == 200) {
+        if (response.statusCode() == 200) {
+            assertThat(undocumented(map(map(paths.get(path.get())).get(method)), request.getQueryParams()))
+                    .as("parameters of a request that was answered")
+                    .isEmpty();
+        }
+        if (method.equals("post")
+                && response.statusCode() == 200
+                && !request.getContentType().startsWith(Uploads.CSV)) {
             assertThat(errors(operation + "/requestBody/content/" + escaped(JSON) + "/schema", bodyOf(request)))
                     .as("a request that was answered")
                     .isEmpty();
         }
         return response;
+    }
+
+    /** Parameters that the contract does not know, and those it requires that are missing. */
+    private static List<String> undocumented(Map<?, ?> operation, Map<String, String> given) {
+        List<String> wrong = new ArrayList<>(given.keySet());
+        Object documented = operation.get("parameters");
+        for (Object each : documented instanceof List<?> list ? list : List.of()) {
+            String name = String.valueOf(map(each).get("name"));
+            boolean query = "query".equals(map(each).get("in"));
+            if (query && !wrong.remove(name) && Boolean.TRUE.equals(map(each).get("required"))) {
+                wrong.add(name + " is missing");
+            }
+        }
+        return wrong;
     }
 
     static String bodyOf(FilterableRequestSpecification request) {

@@ -19,7 +19,7 @@ class ContractTest extends Served {
     @Test
     void everythingServedIsDocumentedAndEverythingDocumentedIsServed() {
         assertThat(CONTRACT.operations())
-                .containsExactlyInAnyOrderElementsOf(Routes.of(Shelf.empty()).stream()
+                .containsExactlyInAnyOrderElementsOf(Routes.of(Shelf.empty(), Service.MOST_UPLOAD_BYTES).stream()
                         .map(route -> route.method().name() + " " + route.path())
                         .toList());
     }

@@ -1,0 +1,82 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.service.request;
+
+import java.time.DateTimeException;
+import java.time.ZoneId;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import tariff.intervalfile.DateOrder;
+import tariff.intervalfile.GapRule;
+import tariff.intervalfile.IntervalFileOptions;
+import tariff.intervalfile.StampAt;
+import tariff.meter.DemandInterval;
+import tariff.meter.IntervalSeries;
+import tariff.meter.MonthlySums;
+import tariff.meter.Register;
+import tariff.meter.WindowCalendar;
+import tariff.notice.Finding;
+import tariff.notice.Refusal;
+import tariff.rate.Rate;
+import tariff.rate.clause.Written;
+
+/**
+ * What is said of interval data beside them.
+ *
+ * @param file how the rows are read
+ * @param demandMinutes what a peak is averaged over; one interval unless said
+ */
+public record IntervalTerms(IntervalFileOptions file, Optional<Integer> demandMinutes) {
+    private static final Map<String, StampAt> STAMPS = Map.of("start", StampAt.START, "end", StampAt.END);
+    private static final Map<String, DateOrder> DATES =
+            Map.of("day-first", DateOrder.DAY_FIRST, "month-first", DateOrder.MONTH_FIRST);
+    private static final Map<String, GapRule> GAPS =
+            Map.of("refuse", GapRule.REFUSE, "leave-out", GapRule.LEAVE_OUT, "interpolate", GapRule.INTERPOLATE);
+
+    static IntervalTerms read(Written in, List<Finding> findings) {
+        IntervalFileOptions file = IntervalFileOptions.defaults().gaps(in.word("gaps", GAPS, GapRule.REFUSE));
+        Optional<ZoneId> zone = in.has("zone") ? zone(in.at("zone"), findings) : Optional.empty();
+        if (zone.isPresent()) {
+            file = file.zone(zone.get());
+        }
+        if (in.has("stamps")) {
+            file = file.stampAt(in.word("stamps", STAMPS, StampAt.START));
+        }
+        if (in.has("dates")) {
+            file = file.dateOrder(in.word("dates", DATES, DateOrder.DAY_FIRST));
+        }
+        return new IntervalTerms(
+                file, in.has("demandMinutes") ? Optional.of(in.wholeNumber("demandMinutes", 5, 60)) : Optional.empty());
+    }
+
+    private static Optional<ZoneId> zone(Written in, List<Finding> findings) {
+        try {
+            return Optional.of(ZoneId.of(in.text()));
+        } catch (DateTimeException unknown) {
+            findings.add(Finding.error("zone", in.pointer(), "is not a time zone")
+                    .found(in.text())
+                    .allowed("a name such as Europe/Berlin, or a fixed offset such as +01:00"));
+            return Optional.empty();
+        }
+    }
+
+    /**
+     * The series as the rate's bill will see it.
+     *
+     * @throws Refusal if peaks cannot be averaged over so many minutes
+     */
+    public MonthlySums sums(IntervalSeries series, Rate rate) {
+        try {
+            return new MonthlySums(
+                    series,
+                    new WindowCalendar(series, rate.windows()),
+                    DemandInterval.block(demandMinutes.orElse(series.stepMinutes())),
+                    rate.reads(Register.APPARENT_KVAH));
+        } catch (IllegalArgumentException step) {
+            throw new Refusal(Finding.error(
+                            "demand", "/demandMinutes", "is not a time that peaks of these data can be averaged over")
+                    .found(demandMinutes.map(String::valueOf).orElse("nothing"))
+                    .allowed("a multiple of " + series.stepMinutes() + " minutes that divides an hour"));
+        }
+    }
+}
