@@ -18,19 +18,21 @@ import tariff.correction.CapacitorBank;
 import tariff.correction.Estimate;
 import tariff.meter.MeteredMonth;
 import tariff.meter.MonthOrder;
+import tariff.meter.MonthlySums;
 import tariff.meter.Period;
+import tariff.notice.Assumption;
 import tariff.notice.Refusal;
 
 /**
  * Which clause bites: what each line costs because of reactive load, and what the next point of power factor or the next few kvar would
  * take off the bills.
  *
- * @param currency ISO 4217 code
+ * @param assessment the next few kvar, held against the months
  * @param bankKvar the size of the next few kvar, a fixed bank
  * @param lines each line over all months, in the rate's order
  * @param months the months in order
  */
-public record ClauseEffects(String currency, BigDecimal bankKvar, List<LineCost> lines, List<Month> months) {
+public record ClauseEffects(Assessment assessment, BigDecimal bankKvar, List<LineCost> lines, List<Month> months) {
     /** The usual size of the next few kvar. Common practice, no source. */
     public static final BigDecimal USUAL_KVAR = BigDecimal.valueOf(50);
 
@@ -62,7 +64,24 @@ public record ClauseEffects(String currency, BigDecimal bankKvar, List<LineCost>
      * @throws Refusal naming every month that lacks what the rate bills
      */
     public static ClauseEffects of(Billing billing, List<MeteredMonth> months, BigDecimal bankKvar) {
-        Assessment assessment = Assessment.of(billing, months, Proposal.of(CapacitorBank.fixed(bankKvar)));
+        return of(billing, months, bankKvar, Assessment.of(billing, months, next(bankKvar)));
+    }
+
+    /**
+     * The same on interval data, where all three estimates are the same.
+     *
+     * @throws Refusal naming every month that lacks what the rate bills
+     */
+    public static ClauseEffects of(Billing billing, MonthlySums sums, BigDecimal bankKvar) {
+        return of(billing, sums.calendarMonths(), bankKvar, Assessment.of(billing, sums, next(bankKvar)));
+    }
+
+    private static Proposal next(BigDecimal bankKvar) {
+        return Proposal.of(CapacitorBank.fixed(bankKvar));
+    }
+
+    private static ClauseEffects of(
+            Billing billing, List<MeteredMonth> months, BigDecimal bankKvar, Assessment assessment) {
         PowerFactorCost today = assessment.today();
         List<MeteredMonth> sorted = MonthOrder.of(months);
         int first = sorted.size() - today.months().size();
@@ -78,7 +97,12 @@ public record ClauseEffects(String currency, BigDecimal bankKvar, List<LineCost>
             }
             all.add(new Month(month.asItIs().month().period(), LineCost.of(month), ahead.get(i), nextBank));
         }
-        return new ClauseEffects(billing.rate().currency(), bankKvar, LineCost.of(today), all);
+        return new ClauseEffects(assessment, bankKvar, LineCost.of(today), all);
+    }
+
+    /** The same answer, with what reading the files took to be so said first. */
+    public ClauseEffects with(List<Assumption> more) {
+        return new ClauseEffects(assessment.with(more), bankKvar, lines, months);
     }
 
     /** What the next 0.01 of power factor takes off all months together. */

@@ -5,6 +5,8 @@ import java.math.BigDecimal;
 import java.time.format.TextStyle;
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Collections;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
@@ -27,6 +29,21 @@ public final class ProposalCharts {
     private static final double KINK = 0.25;
 
     private ProposalCharts() {}
+
+    /**
+     * All of them as SVG documents by name: {@code bill}, {@code savings}, and {@code cash} where there is a payback to speak of.
+     *
+     * @param proposedKvar marked among the sizes, if it lies within them
+     */
+    public static Map<String, String> documents(
+            Assessment assessment, SavingsBySize bySize, Optional<BigDecimal> proposedKvar) {
+        Map<String, String> all = new LinkedHashMap<>();
+        all.put("bill", bill(assessment).svg());
+        String title = titled(assessment, "Savings by size of the bank");
+        all.put("savings", savings(title, bySize, proposedKvar).svg());
+        cash(assessment).ifPresent(chart -> all.put("cash", chart.svg()));
+        return Collections.unmodifiableMap(all);
+    }
 
     /** The bills as they are, by line, with what each pays for being short of unity. */
     public static BillChart bill(Assessment assessment) {

@@ -31,11 +31,16 @@ public record Reconciliation(
      * Reconciles months; those without anything charged only serve as the past of the others.
      *
      * @param months in any order
-     * @throws Refusal naming the months that overlap, or every month that lacks what the rate bills
+     * @throws Refusal naming the months that overlap, or every month that lacks what the rate bills; or if nothing was charged at all
      */
     public static Reconciliation of(Billing billing, List<MeteredMonth> months) {
         List<MeteredMonth> sorted = MonthOrder.of(months);
         Agreement agreement = Agreement.of(billing, List.of(), sorted);
+        if (agreement.months().isEmpty()) {
+            throw new Refusal(Finding.error("nothing-charged", "the bills", "no month says what was charged")
+                    .allowed("\"charged\" with \"total\", \"lines\" or both in at least one month, or a column of a"
+                            + " table with the amounts"));
+        }
         List<Explanation> explanations = Search.of(new Case(billing, sorted, agreement));
         List<ReconciledMonth> unexplained = agreement.differing().stream()
                 .filter(month -> explanations.stream().noneMatch(each -> each.explains(month.period())))

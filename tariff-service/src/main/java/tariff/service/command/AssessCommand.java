@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.service.command;
 
+import java.math.BigDecimal;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -10,6 +12,7 @@ import picocli.CommandLine.Spec;
 import tariff.bill.Billing;
 import tariff.proposal.Assessment;
 import tariff.proposal.Proposal;
+import tariff.proposal.ProposalCharts;
 
 /** Holds a bank against a year of bills. */
 @Command(
@@ -30,6 +33,9 @@ final class AssessCommand implements Callable<Integer> {
     @Mixin
     private BankOptions bank;
 
+    @Mixin
+    private ChartFiles charts;
+
     @Option(names = "--format", description = "text, json or csv (${DEFAULT-VALUE} unless said)", defaultValue = "text")
     private Format format;
 
@@ -44,6 +50,10 @@ final class AssessCommand implements Callable<Integer> {
         format.print(
                 new AssessmentAnswer(assessment.with(metered.assumptions())),
                 spec.commandLine().getOut());
+        Optional<BigDecimal> proposed = Optional.of(proposal.bank().ratedKvar());
+        charts.write(
+                () -> ProposalCharts.documents(assessment, metered.savingsBySize(), proposed),
+                spec.commandLine().getErr());
         return Exit.OK;
     }
 }

@@ -8,6 +8,7 @@ import tariff.meter.MeteredMonth;
 import tariff.meter.MonthlySums;
 import tariff.meter.Site;
 import tariff.notice.Assumption;
+import tariff.proposal.SavingsBySize;
 import tariff.rate.Rate;
 
 /**
@@ -24,5 +25,10 @@ record Metered(
 
     Billing billing() {
         return new Billing(rate, site);
+    }
+
+    SavingsBySize savingsBySize() {
+        return sums.map(intervals -> SavingsBySize.of(billing(), intervals, SavingsBySize.USUAL_STEPS))
+                .orElseGet(() -> SavingsBySize.of(billing(), months, SavingsBySize.USUAL_STEPS));
     }
 }

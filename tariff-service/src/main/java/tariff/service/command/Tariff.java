@@ -24,18 +24,28 @@ import tariff.notice.Refusal;
 @Command(
         name = "tariff-service",
         description = "What low power factor costs under your own rate, and what a capacitor bank would save.",
-        subcommands = {CheckCommand.class, StatementCommand.class, AssessCommand.class, ServeCommand.class},
+        subcommands = {
+            CheckCommand.class,
+            StatementCommand.class,
+            ReconcileCommand.class,
+            ClausesCommand.class,
+            AssessCommand.class,
+            SizeCommand.class,
+            ReviewCommand.class,
+            ScreenCommand.class,
+            ServeCommand.class
+        },
         mixinStandardHelpOptions = true,
         version = "tariff-service 0.1.0-SNAPSHOT",
         exitCodeListHeading = "%nExit codes:%n",
         exitCodeList = {
             "0:answered",
-            "1:a file cannot be read, or is not what it should be at all",
+            "1:a file cannot be read or written, or is not what it should be at all",
             "2:there are findings, one a line on the standard error",
             "64:the command line itself is wrong"
         })
 public final class Tariff implements Runnable {
-    private static final Set<String> NO_DOCUMENT = Set.of("not-json", "not-text", "unreadable");
+    private static final Set<String> NO_DOCUMENT = Set.of("not-json", "not-text", "unreadable", "unwritable");
 
     @Spec
     private @Nullable CommandSpec spec;

@@ -45,7 +45,13 @@ class MutatedRequestsTest extends Served {
     };
 
     @ParameterizedTest
-    @CsvSource({"statement, /statements, 100", "assessment, /assessments, 100", "rate-check, /rate-checks, 100"})
+    @CsvSource({
+        "statement, /statements, 100",
+        "assessment, /assessments, 100",
+        "reconciliation, /reconciliations, 40",
+        "clause-effects, /clause-effects, 10",
+        "rate-check, /rate-checks, 100"
+    })
     void aChangedRequestNeverFailsTheService(String example, String path, int times) {
         Object valid = inline(JsonTree.read(
                 Examples.text("examples/requests/" + example + ".json").getBytes(StandardCharsets.UTF_8)));
