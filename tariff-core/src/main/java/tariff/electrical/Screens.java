@@ -8,6 +8,9 @@ import java.util.List;
  * design.
  */
 public final class Screens {
+    private static final List<Screen> HARMONICS =
+            List.of(new ResonanceScreen(), new DetuningScreen(), new HarmonicDutyScreen(), new DistortionScreen());
+
     private static final List<Screen> ALL = List.of(
             new StoredEnergyScreen(),
             new ResonanceScreen(),
@@ -27,6 +30,11 @@ public final class Screens {
             new LossScreen());
 
     private Screens() {}
+
+    /** The answers of those that look at harmonics: resonance, detuning, duty and distortion. */
+    static List<Screening> harmonics(SiteData site, BankData bank) {
+        return HARMONICS.stream().map(screen -> screen.ask(site, bank)).toList();
+    }
 
     /** The answer of every screen, always all of them, in a fixed order. Missing data give {@link Verdict#NOT_SCREENED}. */
     public static List<Screening> all(SiteData site, BankData bank) {

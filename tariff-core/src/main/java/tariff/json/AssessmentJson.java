@@ -10,6 +10,7 @@ import tariff.bill.PowerFactorCost;
 import tariff.bill.Statement;
 import tariff.bill.StatementLine;
 import tariff.correction.Estimate;
+import tariff.electrical.Screening;
 import tariff.payback.Answer;
 import tariff.payback.Appraisal;
 import tariff.payback.Recovery;
@@ -28,22 +29,26 @@ public final class AssessmentJson {
         assessment.savings().forEach((estimate, bank) -> savings.with(key(estimate), savings(bank)));
         JsonObject payback = new JsonObject();
         assessment.appraisals().forEach((estimate, appraisal) -> payback.with(key(estimate), payback(appraisal)));
-        return new JsonObject()
+        JsonObject json = new JsonObject()
                 .with("rate", assessment.billing().rate().name())
                 .with("currency", assessment.billing().rate().currency())
                 .with("today", today(assessment.today()))
                 .with("savings", savings)
                 .withUnlessEmpty("payback", payback)
-                .withIf("whyNoPayback", assessment.whyNoPayback())
-                .withAll("assumptions", assessment.assumptions(), NoticeJson::write)
+                .withIf("whyNoPayback", assessment.whyNoPayback());
+        List<Screening> screens = assessment.proposal().screens();
+        if (!screens.isEmpty()) {
+            json.withAll("screens", screens, ScreeningsJson::write);
+        }
+        return json.withAll("assumptions", assessment.assumptions(), NoticeJson::write)
                 .withAll("cautions", assessment.cautions(), NoticeJson::write);
     }
 
-    private static String key(Estimate estimate) {
+    static String key(Estimate estimate) {
         return estimate.name().toLowerCase(Locale.ROOT);
     }
 
-    private static JsonObject today(PowerFactorCost cost) {
+    static JsonObject today(PowerFactorCost cost) {
         return new JsonObject()
                 .with("billed", cost.billed())
                 .with("penalty", cost.penalty())
@@ -100,6 +105,10 @@ public final class AssessmentJson {
     /** The month from whose end on the cost is recovered for good. */
     private static void recovery(JsonObject json, String key, Answer<Recovery> recovery) {
         measure(json, key, recovery.flatMap(Recovery::lasting).map(BigDecimal::valueOf), 0);
+    }
+
+    static void measure(JsonObject json, String key, Answer<BigDecimal> answer) {
+        measure(json, key, answer, RATE_DECIMALS);
     }
 
     private static void measure(JsonObject json, String key, Answer<BigDecimal> answer, int decimals) {

@@ -15,11 +15,15 @@ import java.math.BigDecimal;
 public record AnnualCost(BigDecimal investment, BigDecimal everything) {
 
     public static Answer<AnnualCost> of(Venture venture) {
+        return of(venture, CashFlow.of(venture));
+    }
+
+    static Answer<AnnualCost> of(Venture venture, CashFlow flow) {
         Investment bank = venture.investment();
         return venture.outlook().discounting().map(rate -> {
             BigDecimal recovery = Factors.ucr(rate, bank.lifeYears());
-            BigDecimal present = PresentValue.of(
-                    CashFlow.of(venture).yearly(month -> month.capital().add(month.upkeep())), rate);
+            BigDecimal present =
+                    PresentValue.of(flow.yearly(month -> month.capital().add(month.upkeep())), rate);
             return new AnnualCost(
                     bank.netCost().multiply(recovery, DECIMAL128), present.multiply(recovery, DECIMAL128));
         });

@@ -35,18 +35,22 @@ public record Appraisal(
 
     public static Appraisal of(Venture venture) {
         CashFlow flow = CashFlow.of(venture);
+        Outlook outlook = venture.outlook();
+        Answer<BigDecimal> ratio = SavingsRatio.of(flow, outlook);
         return new Appraisal(
                 flow,
                 SimplePayback.years(venture),
                 Recovery.ofMonths(flow.monthly()),
-                Recovery.discounted(venture),
-                PresentValue.netOfYears(venture),
-                PresentValue.netOfMonths(venture),
+                Recovery.discounted(flow, outlook),
+                PresentValue.netOfYears(flow, outlook),
+                PresentValue.netOfMonths(flow, outlook),
                 InternalReturn.ofYears(flow.yearly()),
                 InternalReturn.ofMonths(flow.monthly()),
-                venture.outlook().discounting().flatMap(rate -> ModifiedReturn.of(flow.yearly(), rate, rate)),
-                SavingsRatio.of(venture),
-                SavingsRatio.adjustedReturn(venture),
-                AnnualCost.of(venture));
+                outlook.discounting().flatMap(rate -> ModifiedReturn.of(flow.yearly(), rate, rate)),
+                ratio,
+                outlook.discounting()
+                        .flatMap(rate -> ratio.flatMap(sir -> SavingsRatio.adjustedReturn(
+                                sir, rate, venture.investment().lifeYears()))),
+                AnnualCost.of(venture, flow));
     }
 }

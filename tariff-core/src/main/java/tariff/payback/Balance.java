@@ -30,13 +30,30 @@ final class Balance {
                 .toList();
     }
 
-    /** Lowest first. */
+    /** Lowest first. Flows that change sign once have one rate (Descartes' rule of signs), and no scan is needed to find it. */
     List<Double> rates(double[] flows) {
+        if (signChanges(flows) == 1) {
+            return zeros(List.of(LOWEST, HIGHEST), flows).stream()
+                    .map(Math::expm1)
+                    .toList();
+        }
         double[] slopes =
                 IntStream.range(0, flows.length).mapToDouble(t -> t * flows[t]).toArray();
         TreeSet<Double> points = new TreeSet<>(grid);
         points.addAll(zeros(grid, slopes));
         return zeros(List.copyOf(points), flows).stream().map(Math::expm1).toList();
+    }
+
+    private static int signChanges(double[] flows) {
+        int changes = 0;
+        double before = 0;
+        for (double flow : flows) {
+            if (flow != 0) {
+                changes += before * flow < 0 ? 1 : 0;
+                before = flow;
+            }
+        }
+        return changes;
     }
 
     private List<Double> zeros(List<Double> points, double[] flows) {

@@ -24,33 +24,43 @@ public record CashFlow(List<Month> months) {
         BigDecimal zero = BigDecimal.ZERO;
         List<Month> months = new ArrayList<>();
         months.add(new Month(0, venture.investment().netCost(), zero, zero, zero, zero, zero));
-        for (int number = 1; number <= 12 * venture.investment().lifeYears(); number++) {
-            months.add(tax.on(untaxed(venture, number)));
+        for (int year = 1; year <= venture.investment().lifeYears(); year++) {
+            untaxed(venture, year).forEach(month -> months.add(tax.on(month)));
         }
         return new CashFlow(months);
     }
 
-    private static Month untaxed(Venture venture, int number) {
+    private static List<Month> untaxed(Venture venture, int year) {
         Investment investment = venture.investment();
         Outlook outlook = venture.outlook();
-        int year = (number - 1) / 12 + 1;
-        int place = (number - 1) % 12;
         List<BigDecimal> fresh =
                 year == 1 ? venture.savings().firstYear() : venture.savings().settledYear();
-        BigDecimal yearly = BigDecimal.ONE
+        BigDecimal growth = BigDecimal.ONE
                 .add(outlook.savingsEscalation())
-                .multiply(BigDecimal.ONE.subtract(outlook.savingsDegradation()));
-        BigDecimal savings = fresh.get(place).multiply(yearly.pow(year - 1, DECIMAL128), DECIMAL128);
+                .multiply(BigDecimal.ONE.subtract(outlook.savingsDegradation()))
+                .pow(year - 1, DECIMAL128);
         BigDecimal upkeep = investment
                 .yearlyUpkeep()
                 .multiply(BigDecimal.ONE.add(outlook.upkeepEscalation()).pow(year - 1, DECIMAL128))
                 .divide(BigDecimal.valueOf(12), DECIMAL128);
         BigDecimal replacements = investment.replacements().stream()
-                .filter(replacement -> number == 12 * replacement.year())
+                .filter(replacement -> replacement.year() == year)
                 .map(Replacement::cost)
                 .reduce(BigDecimal.ZERO, BigDecimal::add);
-        BigDecimal residual = number == 12 * investment.lifeYears() ? investment.residual() : BigDecimal.ZERO;
-        return new Month(number, BigDecimal.ZERO, savings, upkeep, replacements, residual, BigDecimal.ZERO);
+        BigDecimal residual = year == investment.lifeYears() ? investment.residual() : BigDecimal.ZERO;
+        List<Month> months = new ArrayList<>();
+        for (int place = 1; place <= 12; place++) {
+            boolean last = place == 12;
+            months.add(new Month(
+                    12 * (year - 1) + place,
+                    BigDecimal.ZERO,
+                    fresh.get(place - 1).multiply(growth, DECIMAL128),
+                    upkeep,
+                    last ? replacements : BigDecimal.ZERO,
+                    last ? residual : BigDecimal.ZERO,
+                    BigDecimal.ZERO));
+        }
+        return months;
     }
 
     /** Net flow of each month, month 0 first. */

@@ -30,23 +30,29 @@ public final class PresentValue {
     public static List<BigDecimal> each(List<BigDecimal> flows, BigDecimal rate) {
         BigDecimal growth = BigDecimal.ONE.add(rate);
         List<BigDecimal> discounted = new ArrayList<>();
-        for (int t = 0; t < flows.size(); t++) {
-            discounted.add(flows.get(t).divide(growth.pow(t, DECIMAL128), DECIMAL128));
+        BigDecimal grown = BigDecimal.ONE;
+        for (BigDecimal flow : flows) {
+            discounted.add(flow.divide(grown, DECIMAL128));
+            grown = grown.multiply(growth, DECIMAL128);
         }
         return discounted;
     }
 
     /** Net present value of yearly flows, each at the end of its year: the figure usually compared. */
     public static Answer<BigDecimal> netOfYears(Venture venture) {
-        return venture.outlook()
-                .discounting()
-                .map(rate -> of(CashFlow.of(venture).yearly(), rate));
+        return netOfYears(CashFlow.of(venture), venture.outlook());
+    }
+
+    static Answer<BigDecimal> netOfYears(CashFlow flow, Outlook outlook) {
+        return outlook.discounting().map(rate -> of(flow.yearly(), rate));
     }
 
     /** Net present value of monthly flows, each at the end of its month and at {@link Factors#monthlyRate}. */
     public static Answer<BigDecimal> netOfMonths(Venture venture) {
-        return venture.outlook()
-                .discounting()
-                .map(rate -> of(CashFlow.of(venture).monthly(), Factors.monthlyRate(rate)));
+        return netOfMonths(CashFlow.of(venture), venture.outlook());
+    }
+
+    static Answer<BigDecimal> netOfMonths(CashFlow flow, Outlook outlook) {
+        return outlook.discounting().map(rate -> of(flow.monthly(), Factors.monthlyRate(rate)));
     }
 }

@@ -30,9 +30,12 @@ public record Recovery(Answer<Integer> first, Answer<Integer> lasting) {
 
     /** Over monthly flows brought to today's worth at the discount rate. */
     public static Answer<Recovery> discounted(Venture venture) {
-        return venture.outlook()
-                .discounting()
-                .map(rate -> ofMonths(PresentValue.each(CashFlow.of(venture).monthly(), Factors.monthlyRate(rate))));
+        return discounted(CashFlow.of(venture), venture.outlook());
+    }
+
+    static Answer<Recovery> discounted(CashFlow flow, Outlook outlook) {
+        return outlook.discounting()
+                .map(rate -> ofMonths(PresentValue.each(flow.monthly(), Factors.monthlyRate(rate))));
     }
 
     /**

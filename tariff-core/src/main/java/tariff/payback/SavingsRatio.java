@@ -15,8 +15,11 @@ public final class SavingsRatio {
      * pays (10 CFR 436.18 and 436.21).
      */
     public static Answer<BigDecimal> of(Venture venture) {
-        CashFlow flow = CashFlow.of(venture);
-        return venture.outlook().discounting().flatMap(rate -> {
+        return of(CashFlow.of(venture), venture.outlook());
+    }
+
+    static Answer<BigDecimal> of(CashFlow flow, Outlook outlook) {
+        return outlook.discounting().flatMap(rate -> {
             BigDecimal capital = PresentValue.of(flow.yearly(Month::capital), rate);
             return capital.signum() > 0
                     ? Answer.known(

@@ -21,6 +21,9 @@ final class Tax {
     }
 
     Month on(Month month) {
+        if (taxation.rate().signum() == 0) {
+            return month;
+        }
         BigDecimal gain = month.savings()
                 .add(month.residual())
                 .subtract(month.upkeep())

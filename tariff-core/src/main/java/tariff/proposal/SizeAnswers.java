@@ -4,16 +4,19 @@ package tariff.proposal;
 import java.math.BigDecimal;
 import java.util.Comparator;
 import java.util.EnumMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
+import java.util.Set;
 import java.util.stream.Stream;
 import tariff.bill.Billing;
 import tariff.bill.PowerFactorCost;
 import tariff.correction.CapacitorBank;
 import tariff.correction.Estimate;
 import tariff.meter.MeteredMonth;
+import tariff.notice.Assumption;
 import tariff.payback.Answer;
 
 /** Puts the answers of a sizing together. */
@@ -35,7 +38,13 @@ final class SizeAnswers {
         this.weighing = new Weighing(repeated, terms.prices(), terms.outlook());
     }
 
-    Sizing all() {
+    /**
+     * All of them.
+     *
+     * @param gaps what is assumed of days without a bill
+     * @param exact whether interval data stand behind the months
+     */
+    Sizing all(List<Assumption> gaps, boolean exact) {
         Map<Estimate, CapacitorBank> best = new EnumMap<>(Estimate.class);
         Map<Estimate, Answer<SizedBank>> bestFor = new EnumMap<>(Estimate.class);
         Map<Estimate, BigDecimal> values = new EnumMap<>(Estimate.class);
@@ -66,7 +75,17 @@ final class SizeAnswers {
                 curve(alike, basis, lines),
                 lines,
                 basis.ratedKvar().compareTo(terms.choice().mostKvar()) >= 0,
-                Undecided.of(bestFor, year));
+                Undecided.of(bestFor, year),
+                assumptions(basis, gaps, exact),
+                BankCautions.of(basis));
+    }
+
+    private List<Assumption> assumptions(CapacitorBank bank, List<Assumption> gaps, boolean exact) {
+        Set<Assumption> all = new LinkedHashSet<>();
+        today.months().forEach(month -> all.addAll(month.asItIs().assumptions()));
+        all.addAll(gaps);
+        all.addAll(BankAssumptions.of(billing.rate(), Proposal.of(bank), year, exact));
+        return List.copyOf(all);
     }
 
     /** Even points, the best size, and the sizes at which a line stops paying. */

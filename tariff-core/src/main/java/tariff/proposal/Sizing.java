@@ -8,12 +8,15 @@ import java.util.List;
 import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
+import java.util.stream.Stream;
 import tariff.bill.Billing;
 import tariff.bill.PowerFactorCost;
 import tariff.correction.Estimate;
 import tariff.meter.MeteredMonth;
 import tariff.meter.MonthOrder;
 import tariff.meter.MonthlySums;
+import tariff.notice.Assumption;
+import tariff.notice.Caution;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
 import tariff.payback.Answer;
@@ -33,6 +36,8 @@ import tariff.payback.Answer;
  * @param lines where each line of the bill stops paying, in the order of the bill
  * @param roomLimits whether the best size is the largest in the choice, so that a larger one might be better
  * @param undecided what in the answer depends on data that the bills do not hold
+ * @param assumptions what was taken to be so
+ * @param cautions what a person must know before buying the bank of the highest value
  */
 public record Sizing(
         PowerFactorCost today,
@@ -45,13 +50,17 @@ public record Sizing(
         List<SizedBank> curve,
         List<LineReach> lines,
         boolean roomLimits,
-        Optional<Undecided> undecided) {
+        Optional<Undecided> undecided,
+        List<Assumption> assumptions,
+        List<Caution> cautions) {
     private static final int YEAR = 12;
 
     public Sizing {
         bestFor = Collections.unmodifiableMap(new EnumMap<>(bestFor));
         curve = List.copyOf(curve);
         lines = List.copyOf(lines);
+        assumptions = List.copyOf(assumptions);
+        cautions = List.copyOf(cautions);
     }
 
     /**
@@ -86,11 +95,30 @@ public record Sizing(
         List<MeteredMonth> year = sorted.subList(past.size(), sorted.size());
         PowerFactorCost today = PowerFactorCost.of(billing, past, year);
         RepeatedYear repeated = new RepeatedYear(billing, today, year, past.size() >= YEAR, exact);
-        return new SizeAnswers(billing, today, year, repeated, terms).all();
+        List<Assumption> gaps = MonthOrder.gaps(sorted);
+        return new SizeAnswers(billing, today, year, repeated, terms).all(gaps, exact.isPresent());
     }
 
     /** The best for an estimate, or why no bank is. */
     public Answer<SizedBank> bestFor(Estimate estimate) {
         return Objects.requireNonNull(bestFor.get(estimate));
+    }
+
+    /** The same answer, with what reading the files took to be so said first. */
+    public Sizing with(List<Assumption> more) {
+        return new Sizing(
+                today,
+                highestValue,
+                shortestPayback,
+                smallestWithoutPenalty,
+                bestFor,
+                leastRegret,
+                worstRegret,
+                curve,
+                lines,
+                roomLimits,
+                undecided,
+                Stream.concat(more.stream(), assumptions.stream()).toList(),
+                cautions);
     }
 }

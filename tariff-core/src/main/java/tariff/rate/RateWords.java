@@ -1,9 +1,12 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.rate;
 
+import java.time.MonthDay;
+import java.time.format.TextStyle;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.stream.Collectors;
 import tariff.rate.clause.Line;
@@ -25,8 +28,7 @@ public record RateWords(String heading, List<String> definitions, List<String> l
                 .forEach((name, rule) -> definitions.add("Power factor \"" + name + "\": " + rule.words() + "."));
         rate.windows().forEach((name, window) -> definitions.add("Window \"" + name + "\": " + window.words() + "."));
         if (!rate.seasons().isEmpty()) {
-            definitions.add("Seasons: " + seasons(rate) + "; a period's season is told "
-                    + rate.seasonBy().words() + ".");
+            definitions.add("Seasons: " + seasons(rate) + "; " + rate.seasonBy().words() + ".");
         }
         rate.quantities()
                 .forEach((name, quantity) -> definitions.add("Quantity \"" + name + "\": " + quantity.words() + "."));
@@ -53,7 +55,7 @@ public record RateWords(String heading, List<String> definitions, List<String> l
     private static String sentence(Line line, Scope scope) {
         String when = line.heading()
                 .when()
-                .map(condition -> ", only if " + condition.words())
+                .map(condition -> ", " + condition.ending())
                 .orElse("");
         String round =
                 line.heading().round().map(rounding -> "; " + rounding.words()).orElse("");
@@ -73,8 +75,8 @@ public record RateWords(String heading, List<String> definitions, List<String> l
                 .collect(Collectors.joining(", "));
     }
 
-    private static String day(java.time.MonthDay day) {
-        return String.format("%02d-%02d", day.getMonthValue(), day.getDayOfMonth());
+    private static String day(MonthDay day) {
+        return day.getDayOfMonth() + " " + day.getMonth().getDisplayName(TextStyle.FULL, Locale.ENGLISH);
     }
 
     private static String closing(RateDefinition rate) {

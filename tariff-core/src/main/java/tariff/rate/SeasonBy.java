@@ -7,10 +7,10 @@ import java.util.Map;
 /** What decides the season of a billing period. */
 public enum SeasonBy {
     /** Each season counts for its share of the period's days. */
-    DAYS("days", "by its days"),
-    FIRST_DAY("firstDay", "by its first day"),
-    LAST_DAY("lastDay", "by its last day"),
-    STATEMENT_DATE("statementDate", "by the date of the statement");
+    DAYS("days", "a period that lies in two is split by days"),
+    FIRST_DAY("firstDay", "a period's first day decides"),
+    LAST_DAY("lastDay", "a period's last day decides"),
+    STATEMENT_DATE("statementDate", "the date of the statement decides");
 
     static final Map<String, SeasonBy> WORDS = new LinkedHashMap<>();
 

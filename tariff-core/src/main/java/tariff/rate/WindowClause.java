@@ -9,6 +9,7 @@ import java.time.LocalTime;
 import java.time.Month;
 import java.time.ZoneId;
 import java.time.format.TextStyle;
+import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -126,16 +127,37 @@ public record WindowClause(Window window, ZoneId zone) {
                                 .collect(Collectors.joining(", "));
         String holidays = switch (window.holidayRule()) {
             case AS_ITS_WEEKDAY -> "";
-            case AS_SUNDAY -> ", holidays as Sundays";
-            case EXCLUDED -> ", not on holidays";
+            case AS_SUNDAY -> ", " + holidays() + " as Sundays";
+            case EXCLUDED -> ", not on " + holidays();
         };
-        return days + " " + hours + months + holidays;
+        return days + " " + hours + " (" + zone.getId() + " time)" + months + holidays;
     }
 
+    private String holidays() {
+        int count = window.holidays().size();
+        return "holidays (" + (count == 0 ? "none" : count) + " given)";
+    }
+
+    /** Three days or more in a row are a range. */
     private static String names(Set<DayOfWeek> days) {
-        List<DayOfWeek> sorted = days.stream().sorted().toList();
-        return sorted.stream()
-                .map(day -> day.getDisplayName(TextStyle.SHORT, Locale.ENGLISH))
-                .collect(Collectors.joining(", "));
+        List<String> names = new ArrayList<>();
+        List<DayOfWeek> run = new ArrayList<>();
+        for (DayOfWeek day : DayOfWeek.values()) {
+            if (days.contains(day)) {
+                run.add(day);
+            }
+            if (!run.isEmpty() && (!days.contains(day) || day == DayOfWeek.SUNDAY)) {
+                names.add(
+                        run.size() < 3
+                                ? run.stream().map(WindowClause::name).collect(Collectors.joining(", "))
+                                : name(run.get(0)) + " to " + name(run.get(run.size() - 1)));
+                run.clear();
+            }
+        }
+        return String.join(", ", names);
+    }
+
+    private static String name(DayOfWeek day) {
+        return day.getDisplayName(TextStyle.SHORT, Locale.ENGLISH);
     }
 }

@@ -172,7 +172,7 @@ class FloorsAndRatchetsTest {
                         .assumptions())
                 .extracting("message")
                 .containsExactly(
-                        "the highest of the highest kW in the previous 11 months: only 1 of 11 earlier months are given;"
+                        "the highest value of the highest kW in the previous 11 months: only 1 of 11 earlier months are given;"
                                 + " the others are taken not to matter");
     }
 }

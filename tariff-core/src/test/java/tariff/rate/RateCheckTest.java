@@ -56,11 +56,11 @@ class RateCheckTest {
                 "{ 'hours': 200, 'of': { 'energy': 'kWh' } } | /lines/0/quantity/of: is in kWh; hours are counted of kW, kVA or kvar",
                 "{ 'energy': 'kwh' } | /lines/0/quantity/energy: is not known; did you mean \"kWh\"?; found \"kwh\"; allowed: exported"
                         + " kWh, kVAh, kWh, lagging kvarh, leading kvarh",
-                "{ 'peek': 'kW' } | /lines/0/quantity: says no kind of quantity; did you mean \"peak\"?; found an object; allowed: agreed,"
+                "{ 'peek': 'kW' } | /lines/0/quantity: says no kind of quantity; did you mean \"peak\"?; found peek; allowed: agreed,"
                         + " all, amount, constant, days, each, earlier, energy, excess, hours, largest, peak, priced, prorated, raised,"
                         + " rounded, share, smallest, sum",
-                "{ 'peak': 'kW', 'energy': 'kWh' } | /lines/0/quantity: says several kinds of quantity at once: peak, energy; found an"
-                        + " object; allowed: agreed, all, amount, constant, days, each, earlier, energy, excess, hours, largest, peak,"
+                "{ 'peak': 'kW', 'energy': 'kWh' } | /lines/0/quantity: says several kinds of quantity at once; found peak, energy;"
+                        + " allowed: agreed, all, amount, constant, days, each, earlier, energy, excess, hours, largest, peak,"
                         + " priced, prorated, raised, rounded, share, smallest, sum",
                 "{ 'peak': 'kW', 'windw': 'day' } | /lines/0/quantity/windw: is not a key here; found windw; allowed: peak, in",
                 "{ 'peak': 'kW', 'in': 'day' } | /lines/0/quantity/in: there is no window \"day\"; found day; allowed: none is defined",
@@ -85,7 +85,8 @@ class RateCheckTest {
                         + " whole number; found 6.5; allowed: a whole number from 1 to 12",
                 "{ 'prorated': { 'peak': 'kW' }, 'perDays': 30, 'unlessDays': [25] } | /lines/0/quantity/unlessDays: must be two numbers;"
                         + " found a list; allowed: the fewest and the most days, such as [25, 35]",
-                "{ 'amount': ['Enrgy'] } | /lines/0/quantity/amount/0: there is no line \"Enrgy\"; found Enrgy; allowed: none is defined",
+                "{ 'amount': ['Enrgy'] } | /lines/0/quantity/amount/0: there is no line \"Enrgy\"; found Enrgy; allowed: none, for no"
+                        + " line is above",
                 "{ 'largest': [] } | /lines/0/quantity/largest: is empty; found a list; allowed: at least one entry",
                 "7 | /lines/0/quantity: must be a quantity; found 7; allowed: the name of a quantity in quotes, or an object with one of:"
                         + " agreed, all, amount, constant, days, each, earlier, energy, excess, hours, largest, peak, priced, prorated,"

@@ -41,12 +41,21 @@ class RateWordsTest {
                 "{ 'prorated': { 'agreed': 'kVA' }, 'perDays': 1 } | agreed kVA for each day billed, at 2 per kVA",
                 "{ 'prorated': { 'constant': 5000, 'unit': 'kWh' }, 'perDays': 30, 'unlessDays': [25, 35] } | 5000 kWh × days billed ÷ 30"
                         + " (not in a period of 25 to 35 days), at 2 per kWh",
-                "{ 'earlier': 'highest', 'of': { 'peak': 'kW' }, 'months': 11, 'onlyIn': [6, 7] } | highest of the highest kW in the"
-                        + " previous 11 months (only June, July), at 2 per kW",
+                "{ 'earlier': 'highest', 'of': { 'peak': 'kW' }, 'months': 11, 'onlyIn': [6, 7] } | highest value of the highest kW in"
+                        + " the previous 11 months (only June, July), at 2 per kW",
                 "{ 'earlier': 'sum', 'of': { 'energy': 'kWh' }, 'since': 4 } | sum of the kWh in the months since April, at 2 per kWh",
                 "{ 'amount': ['Energy'] } | amount of Energy, at 2 per unit of money",
                 "{ 'priced': { 'agreed': 'kW' }, 'at': 4.10 } | agreed kW at 4.10 per unit, at 2 per unit of money",
                 "{ 'each': 'hour', 'take': 'sum', 'of': { 'energy': 'kWh' } } | sum, over each hour, of the kWh, at 2 per kWh",
+                // what runs on past its noun stands in brackets inside another
+                "{ 'excess': { 'rounded': { 'peak': 'kW' }, 'to': 1 }, 'over': { 'constant': 50, 'unit': 'kW' } } | (the highest kW,"
+                        + " rounded half up to a whole number) above 50 kW, at 2 per kW",
+                "{ 'rounded': { 'excess': { 'peak': 'kW' }, 'over': { 'constant': 50, 'unit': 'kW' } }, 'to': 1 } | (the highest kW"
+                        + " above 50 kW), rounded half up to a whole number, at 2 per kW",
+                "{ 'share': 0.5, 'of': { 'sum': [ { 'energy': 'kWh' }, { 'energy': 'exported kWh' } ] } } | 50 % of (the kWh plus the"
+                        + " exported kWh), at 2 per kWh",
+                "{ 'sum': [ { 'share': 0.5, 'of': { 'energy': 'kWh' } }, { 'energy': 'exported kWh' } ] } | 50 % of the kWh plus the"
+                        + " exported kWh, at 2 per kWh",
                 "'demand' | demand, at 2 per kW"
             })
     void aQuantityIsANoun(String quantity, String words) {
@@ -70,8 +79,7 @@ class RateWordsTest {
                 "'blocks': [ { 'upTo': 50, 'price': 1 }, { 'upTo': 90, 'price': 2 }, { 'price': 3 } ] | kWh: up to 50 kWh at 1 per kWh, then"
                         + " up to 90 kWh at 2 per kWh, the rest at 3 per kWh",
                 "'price': 1, 'when': { 'option': 'primary metered' } | kWh, at 1 per kWh, only if the site is marked \"primary metered\"",
-                "'price': 1, 'when': { 'not': { 'season': 'summer' } } | kWh, at 1 per kWh, only if it is not so that most of the period"
-                        + " lies in summer",
+                "'price': 1, 'when': { 'not': { 'season': 'summer' } } | kWh, at 1 per kWh, unless most of the period lies in summer",
                 "'price': 1, 'when': { 'quantity': { 'peak': 'kW' }, 'reaches': { 'constant': 15, 'unit': 'kW' } } | kWh, at 1 per kWh,"
                         + " only if the highest kW is at least 15 kW",
                 "'price': 1, 'when': { 'quantity': { 'peak': 'kW' }, 'exceeds': { 'constant': 15, 'unit': 'kW' } } | kWh, at 1 per kWh,"
@@ -102,6 +110,10 @@ class RateWordsTest {
                         + " that the billing power factor is below 0.95",
                 "'bands': [ { 'below': 0.75, 'value': 20 }, { 'upTo': 0.85, 'value': 10 }, { 'value': 0 } ] | 20 % where the billing power"
                         + " factor is below 0.75, 10 % at most 0.85, else 0 %",
+                "'slopes': [ { 'below': 0.85, 'perPoint': 1 }, { 'above': 0.90, 'perPoint': -1 }, { 'above': 0.95, 'perPoint': -2 } ] | 1 %"
+                        + " for each 0.01 (parts in proportion) that the billing power factor is below 0.85, and -1 % for each 0.01"
+                        + " (parts in proportion) that the billing power factor is above 0.90 up to 0.95, then -2 % for each 0.01 (parts"
+                        + " in proportion) that the billing power factor is above 0.95",
                 "'ratioTo': 0.90, 'below': 60, 'above': 25, 'atLeast': -2.5, 'round': { 'to': 0.1 } | 60 × (0.90 ÷ the billing power factor"
                         + " − 1) % under 0.90, and 25 × (0.90 ÷ the billing power factor − 1) % over it, rounded half up to 0.1, at least"
                         + " -2.5 %",
@@ -136,7 +148,7 @@ class RateWordsTest {
                 .isEqualTo("""
                         Quay, prices in EUR, from 2026-01-01
                         Power factor "billing": from the period's kWh and kvarh, leading kvarh added to lagging, rounded half up to 0.01.
-                        Seasons: summer 06-01 to 09-30, winter 10-01 to 05-31; a period's season is told by the date of the statement.
+                        Seasons: summer 1 June to 30 September, winter 1 October to 31 May; the date of the statement decides.
                         Quantity "billed": the highest kW raised by 100 × (0.95 ÷ the billing power factor − 1) % under 0.95.
                         Demand: billed, at 13 per kW in summer, 11 per kW in winter.
                         Minimum: brings Demand up to at least 100.

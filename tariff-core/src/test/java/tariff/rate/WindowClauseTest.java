@@ -28,7 +28,7 @@ class WindowClauseTest {
         assertThat(rate.hours(Period.of(YearMonth.of(2026, 1)), "day").orElseThrow())
                 .isEqualByComparingTo("294");
         assertThat(rate.words().definitions())
-                .containsExactly("Window \"day\": Mon, Tue, Wed, Thu, Fri 07:00 to 21:00, not on holidays.");
+                .containsExactly("Window \"day\": Mon to Fri 07:00 to 21:00 (UTC time), not on holidays (1 given).");
     }
 
     @Test

@@ -60,7 +60,7 @@ class WordsAloneTest {
         assertThat(words(sheet).text()).isEqualTo("""
                 Sheet, prices in EUR
                 Power factor "billing": from the period's kWh and kvarh, leading kvarh ignored, not rounded.
-                Quantity "billed demand": the largest of (the highest kW raised by 100 × (0.95 ÷ the billing power factor − 1) % under 0.95; 80 % of the highest of the highest kW in the previous 2 months), rounded half up to a whole number.
+                Quantity "billed demand": the largest of (the highest kW raised by 100 × (0.95 ÷ the billing power factor − 1) % under 0.95; 80 % of the highest value of the highest kW in the previous 2 months), rounded half up to a whole number.
                 Demand: billed demand, at 10 per kW.
                 Energy: kWh: up to 200 hours of billed demand at 0.08 per kWh, the rest at 0.05 per kWh.
                 Total: the lines added up, each line rounded half up to 0.01, the total rounded half up to 0.01.

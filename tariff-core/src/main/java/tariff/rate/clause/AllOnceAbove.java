@@ -39,8 +39,13 @@ record AllOnceAbove(Quantity of, Quantity limit) implements Quantity {
     }
 
     @Override
+    public boolean needsBrackets() {
+        return true;
+    }
+
+    @Override
     public String words() {
-        return "all of " + of.words() + " once above " + limit.words();
+        return "all of " + of.innerWords() + " once above " + limit.innerWords();
     }
 
     @Override

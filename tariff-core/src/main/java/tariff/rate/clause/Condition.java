@@ -13,6 +13,11 @@ public sealed interface Condition extends Clause permits HasOption, InSeason, No
     /** After "only if": {@code the site is primary metered}. */
     String words();
 
+    /** As the end of a sentence: {@code only if the site is primary metered}. */
+    default String ending() {
+        return "only if " + words();
+    }
+
     @Override
     default List<? extends Clause> parts() {
         return List.of();

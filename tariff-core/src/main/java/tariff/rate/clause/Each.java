@@ -78,6 +78,11 @@ record Each(Cut cut, int count, Quantity of) implements Quantity {
     }
 
     @Override
+    public boolean needsBrackets() {
+        return true;
+    }
+
+    @Override
     public String words() {
         return takeWords() + ", over each " + cut.one() + ", of " + of.words();
     }

@@ -29,15 +29,17 @@ public record Earlier(Take take, Quantity of, int months, Optional<Month> since,
 
     /** What is made of the months. */
     public enum Take {
-        HIGHEST("highest"),
-        LOWEST("lowest"),
-        SUM("sum"),
-        MEAN("mean");
+        HIGHEST("highest", "highest value"),
+        LOWEST("lowest", "lowest value"),
+        SUM("sum", "sum"),
+        MEAN("mean", "mean");
 
         private final String word;
+        private final String noun;
 
-        Take(String word) {
+        Take(String word, String noun) {
             this.word = word;
+            this.noun = noun;
         }
     }
 
@@ -129,7 +131,7 @@ public record Earlier(Take take, Quantity of, int months, Optional<Month> since,
         String only = onlyIn.isEmpty()
                 ? ""
                 : " (only " + onlyIn.stream().map(Earlier::name).collect(Collectors.joining(", ")) + ")";
-        return "the " + take.word + " of " + of.words() + " in " + reach + only;
+        return "the " + take.noun + " of " + of.innerWords() + " in " + reach + only;
     }
 
     @Override

@@ -37,8 +37,13 @@ record Excess(Quantity of, Quantity over) implements Quantity {
     }
 
     @Override
+    public boolean needsBrackets() {
+        return true;
+    }
+
+    @Override
     public String words() {
-        return of.words() + " above " + over.words();
+        return of.innerWords() + " above " + over.innerWords();
     }
 
     @Override

@@ -42,7 +42,7 @@ record HoursOf(BigDecimal hours, Quantity of) implements Quantity {
 
     @Override
     public String words() {
-        return Decimals.plain(hours) + " hours of " + of.words();
+        return Decimals.plain(hours) + " hours of " + of.innerWords();
     }
 
     @Override

@@ -9,14 +9,15 @@ final class LineNames {
         if (scope.lines().contains(name)) {
             return;
         }
+        String allowed = scope.lines().isEmpty() ? "none, for no line is above" : Nearest.list(scope.lines());
         if (scope.names().lines().contains(name)) {
-            scope.error(
-                    "line-order",
-                    "names the line \"" + name + "\", which is not above this one",
-                    name,
-                    Nearest.list(scope.lines()));
+            scope.error("line-order", "names the line \"" + name + "\", which is not above this one", name, allowed);
         } else {
-            scope.unknown("line", name, scope.lines());
+            scope.error(
+                    "unknown-name",
+                    "there is no line \"" + name + "\"" + Nearest.hint(name, scope.lines()),
+                    name,
+                    allowed);
         }
     }
 }

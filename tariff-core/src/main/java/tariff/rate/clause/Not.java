@@ -17,6 +17,11 @@ record Not(Condition condition) implements Condition {
     }
 
     @Override
+    public String ending() {
+        return "unless " + condition.words();
+    }
+
+    @Override
     public String words() {
         return "it is not so that " + condition.words();
     }

@@ -25,7 +25,7 @@ record Priced(Quantity of, Price at) implements Quantity {
 
     @Override
     public String words() {
-        return of.words() + " at " + at.words("unit");
+        return of.innerWords() + " at " + at.words("unit");
     }
 
     @Override

@@ -54,7 +54,7 @@ record Prorated(Quantity of, int perDays, int leastDays, int mostDays) implement
     public String words() {
         String how = perDays == 1 ? " for each day billed" : " × days billed ÷ " + perDays;
         String unless = mostDays > 0 ? " (not in a period of " + leastDays + " to " + mostDays + " days)" : "";
-        return of.words() + how + unless;
+        return of.innerWords() + how + unless;
     }
 
     @Override

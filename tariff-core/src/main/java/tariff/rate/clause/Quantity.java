@@ -47,6 +47,16 @@ public sealed interface Quantity extends Clause
     /** A noun phrase: {@code 33 % of the kWh}. */
     String words();
 
+    /** Whether its phrase runs on past a noun, so that inside another it needs brackets to be read in one way only. */
+    default boolean needsBrackets() {
+        return false;
+    }
+
+    /** Its phrase as a part of another. */
+    default String innerWords() {
+        return needsBrackets() ? "(" + words() + ")" : words();
+    }
+
     @Override
     default List<? extends Clause> parts() {
         return List.of();

@@ -63,11 +63,10 @@ public final class QuantityKinds {
                 .map(key -> Nearest.hint(key, READERS.keySet()))
                 .max(Comparator.comparingInt(String::length))
                 .orElse("");
-        in.wrong(
+        in.wrongAs(
                 "quantity",
-                kinds.isEmpty()
-                        ? "says no kind of quantity" + hint
-                        : "says several kinds of quantity at once: " + String.join(", ", kinds),
+                kinds.isEmpty() ? "says no kind of quantity" + hint : "says several kinds of quantity at once",
+                in.keys().isEmpty() ? "{}" : Nearest.list(kinds.isEmpty() ? in.keys() : kinds),
                 allowed());
         return Quantity.unreadable();
     }

@@ -34,8 +34,13 @@ record Raised(Quantity of, Schedule by) implements Quantity {
     }
 
     @Override
+    public boolean needsBrackets() {
+        return true;
+    }
+
+    @Override
     public String words() {
-        return of.words() + " raised by " + by.words("%");
+        return of.innerWords() + " raised by " + by.words("%");
     }
 
     @Override

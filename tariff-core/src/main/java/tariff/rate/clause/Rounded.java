@@ -23,8 +23,13 @@ record Rounded(Quantity of, Rounding rounding) implements Quantity {
     }
 
     @Override
+    public boolean needsBrackets() {
+        return true;
+    }
+
+    @Override
     public String words() {
-        return of.words() + ", " + rounding.words();
+        return of.innerWords() + ", " + rounding.words();
     }
 
     @Override

@@ -35,7 +35,7 @@ record Share(BigDecimal share, Quantity of) implements Quantity {
 
     @Override
     public String words() {
-        return Decimals.percent(share) + " of " + of.words();
+        return Decimals.percent(share) + " of " + of.innerWords();
     }
 
     @Override

@@ -139,15 +139,19 @@ record Slopes(String powerFactor, List<Slope> below, List<Slope> above, Points p
     @Override
     public String words(String unit) {
         List<String> phrases = new ArrayList<>();
+        List<String> upward = new ArrayList<>();
         for (int i = 0; i < below.size(); i++) {
             phrases.add(phrase(
                     below.get(i), "below", i + 1 < below.size() ? " down to " + edge(below.get(i + 1)) : "", unit));
         }
         for (int i = 0; i < above.size(); i++) {
-            phrases.add(phrase(
+            upward.add(phrase(
                     above.get(i), "above", i + 1 < above.size() ? " up to " + edge(above.get(i + 1)) : "", unit));
         }
-        return String.join(", then ", phrases) + limits.words(unit);
+        return String.join(", then ", phrases)
+                + (phrases.isEmpty() || upward.isEmpty() ? "" : ", and ")
+                + String.join(", then ", upward)
+                + limits.words(unit);
     }
 
     private String phrase(Slope slope, String side, String until, String unit) {

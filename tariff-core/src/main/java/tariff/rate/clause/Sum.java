@@ -49,8 +49,13 @@ record Sum(List<Quantity> terms) implements Quantity {
     }
 
     @Override
+    public boolean needsBrackets() {
+        return true;
+    }
+
+    @Override
     public String words() {
-        return terms.stream().map(Quantity::words).collect(Collectors.joining(" plus "));
+        return terms.stream().map(Quantity::innerWords).collect(Collectors.joining(" plus "));
     }
 
     @Override

@@ -188,7 +188,8 @@ public final class Written {
         return "?";
     }
 
-    private <T> T word(Map<String, T> words, T fallback) {
+    /** One of a set of words, by the word that stands for each; {@code fallback} if it is none. */
+    public <T> T word(Map<String, T> words, T fallback) {
         String written = text();
         T meant = words.get(written);
         if (meant == null) {

@@ -43,11 +43,15 @@ record AssessmentAnswer(Assessment assessment) implements Format.Printable {
         out.append("\nThe proposal: ").append(bank()).append("\n\n").append(savings());
         assessment.whyNoPayback().ifPresent(why -> out.append(Wrapped.text("  No payback: " + why + ".")));
         reasons().forEach(reason -> out.append(Wrapped.text("  " + reason + ".")));
+        if (!assessment.proposal().screens().isEmpty()) {
+            out.append("\nThe bank at its place, screened\n")
+                    .append(ScreensAnswer.text(assessment.proposal().screens()));
+        }
         out.append("\nTaken to be so\n");
         Assumed.text(assessment.assumptions()).forEach(each -> out.append(Wrapped.text("- " + each)));
-        out.append("\nBefore anybody acts on this\n");
-        assessment.cautions().forEach(each -> out.append(Wrapped.text("- " + each.message())));
-        return out.toString();
+        return out.append('\n')
+                .append(ScreensAnswer.cautions(assessment.cautions()))
+                .toString();
     }
 
     private String months() {

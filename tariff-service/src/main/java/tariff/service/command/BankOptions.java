@@ -57,7 +57,8 @@ final class BankOptions {
                 plain.ratedVolts(),
                 plain.serviceVolts(),
                 plain.reactorShare(),
-                plain.wattsPerKvar()));
+                plain.wattsPerKvar(),
+                plain.duty()));
         Optional<InvestmentTerms> investment =
                 cost.map(money -> Declared.require(InvestmentTerms.plain(money, upkeep, lifeYears)));
         OutlookTerms outlook = Declared.require(OutlookTerms.level(discountRate));

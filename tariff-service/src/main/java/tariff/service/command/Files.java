@@ -11,8 +11,10 @@ import tariff.intervalfile.IntervalReading;
 import tariff.json.JsonTree;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
+import tariff.proposal.Offer;
 import tariff.proposal.Proposal;
 import tariff.rate.Rate;
+import tariff.service.request.PriceTerms;
 import tariff.service.request.Request;
 
 /** The files that commands are given; what is wrong with one is said with its name. */
@@ -36,11 +38,28 @@ final class Files {
     }
 
     static Proposal proposal(Path file) {
+        return asked(file, Request::proposal);
+    }
+
+    static Offer offer(Path file) {
+        return asked(file, Request::offer);
+    }
+
+    /** The bank and the network of a file, which may be a proposal or an offer. */
+    static Proposal screened(Path file) {
+        return asked(file, Request::screenedOffer);
+    }
+
+    static PriceTerms prices(Path file) {
+        return asked(file, Request::prices);
+    }
+
+    private static <T> T asked(Path file, Function<Request, Optional<T>> part) {
         return read(file, bytes -> {
             Request request = new Request(JsonTree.read(bytes));
-            Optional<Proposal> proposal = request.proposal();
+            Optional<T> asked = part.apply(request);
             request.refuseIfWrong();
-            return proposal.orElseThrow();
+            return asked.orElseThrow();
         });
     }
 

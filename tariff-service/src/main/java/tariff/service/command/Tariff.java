@@ -30,6 +30,9 @@ import tariff.notice.Refusal;
             ReconcileCommand.class,
             ClausesCommand.class,
             AssessCommand.class,
+            SizeCommand.class,
+            ReviewCommand.class,
+            ScreenCommand.class,
             ServeCommand.class
         },
         mixinStandardHelpOptions = true,

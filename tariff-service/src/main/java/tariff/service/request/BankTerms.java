@@ -1,14 +1,20 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.service.request;
 
+import jakarta.validation.Valid;
 import jakarta.validation.constraints.AssertTrue;
 import jakarta.validation.constraints.DecimalMax;
 import jakarta.validation.constraints.DecimalMin;
 import jakarta.validation.constraints.Size;
 import java.math.BigDecimal;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.TreeMap;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import tariff.correction.CapacitorBank;
+import tariff.electrical.TemperatureClass;
 import tariff.rate.clause.Written;
 
 /** A bank as somebody offers it, with the ranges of {@link CapacitorBank} and bounds beyond any real one. */
@@ -35,12 +41,41 @@ public record BankTerms(
         BigDecimal reactorShare,
 
         @DecimalMin(value = "0", message = "0 to 50") @DecimalMax(value = "50", message = "0 to 50")
-        BigDecimal wattsPerKvar) {
+        BigDecimal wattsPerKvar,
+
+        Optional<@Valid Duty> duty) {
     private static final String MOST_KVAR = "1000000";
     private static final String MOST_VOLTS = "1000000";
     private static final String KVAR = "0 to 1000000 kvar";
     private static final String STEP = "above 0, at most 1000000 kvar";
     private static final String VOLTS = "50 to 1000000 V";
+
+    /** What only screens ask of a bank. */
+    public record Duty(
+            Optional<
+                            @DecimalMin(value = "0", message = "0 to 100000 a day")
+                            @DecimalMax(value = "100000", message = "0 to 100000 a day") BigDecimal>
+                    operationsPerDay,
+            Optional<
+                            @DecimalMin(value = "0.1", message = "0.1 to 100000 A")
+                            @DecimalMax(value = "100000", message = "0.1 to 100000 A") BigDecimal>
+                    conductorAmps,
+            Optional<TemperatureClass> temperatureClass) {
+        static final Duty UNKNOWN = new Duty(Optional.empty(), Optional.empty(), Optional.empty());
+
+        static Duty read(Written in) {
+            Map<String, TemperatureClass> classes = Stream.of(TemperatureClass.values())
+                    .collect(Collectors.toMap(each -> each.name(), each -> each, (a, b) -> a, TreeMap::new));
+            Duty duty = new Duty(
+                    in.optionalNumber("operationsPerDay"),
+                    in.optionalNumber("conductorAmps"),
+                    in.has("temperatureClass")
+                            ? Optional.of(in.word("temperatureClass", classes, TemperatureClass.A))
+                            : Optional.empty());
+            in.refuseOtherKeys();
+            return duty;
+        }
+    }
 
     public BankTerms {
         stepsKvar = List.copyOf(stepsKvar);
@@ -55,7 +90,8 @@ public record BankTerms(
                 Optional.empty(),
                 Optional.empty(),
                 BigDecimal.ZERO,
-                BigDecimal.ZERO);
+                BigDecimal.ZERO,
+                Optional.empty());
     }
 
     static BankTerms read(Written in) {
@@ -72,7 +108,27 @@ public record BankTerms(
                 in.optionalNumber("ratedVolts"),
                 in.optionalNumber("serviceVolts"),
                 in.optionalNumber("reactorShare").orElse(BigDecimal.ZERO),
-                in.optionalNumber("wattsPerKvar").orElse(BigDecimal.ZERO));
+                in.optionalNumber("wattsPerKvar").orElse(BigDecimal.ZERO),
+                in.has("duty") ? Optional.of(Duty.read(in.at("duty"))) : Optional.empty());
+        in.refuseOtherKeys();
+        return terms;
+    }
+
+    /** What does not depend on the size of a bank; the kvar are a stand-in. */
+    static BankTerms readMake(Written in) {
+        if (!in.isObject()) {
+            in.wrong("type", "must be an object", "an object with \"ratedVolts\", \"reactorShare\" …");
+            return plain(BigDecimal.ONE, List.of());
+        }
+        BankTerms terms = new BankTerms(
+                BigDecimal.ONE,
+                List.of(),
+                in.optionalNumber("targetPowerFactor"),
+                in.optionalNumber("ratedVolts"),
+                in.optionalNumber("serviceVolts"),
+                in.optionalNumber("reactorShare").orElse(BigDecimal.ZERO),
+                in.optionalNumber("wattsPerKvar").orElse(BigDecimal.ZERO),
+                Optional.empty());
         in.refuseOtherKeys();
         return terms;
     }

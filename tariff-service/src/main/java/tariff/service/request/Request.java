@@ -6,10 +6,15 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
+import tariff.correction.Estimate;
+import tariff.electrical.BankAtSite;
+import tariff.electrical.KwhShare;
 import tariff.json.BillsJson;
 import tariff.meter.MeteredSite;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
+import tariff.proposal.Claim;
+import tariff.proposal.Offer;
 import tariff.proposal.Proposal;
 import tariff.rate.Rate;
 import tariff.rate.clause.Nearest;
@@ -18,6 +23,13 @@ import tariff.service.shelf.Shelf;
 
 /** A question being read: its parts one after the other, and at the end everything that is wrong with any of them. */
 public final class Request {
+    private static final Map<String, KwhShare.Place> PLACES = Map.of(
+            "at the meter", KwhShare.Place.AT_THE_METER,
+            "behind own transformer", KwhShare.Place.BEHIND_OWN_TRANSFORMER,
+            "at the load", KwhShare.Place.AT_THE_LOAD);
+    private static final Map<String, Estimate> ESTIMATES =
+            Map.of("low", Estimate.LOW, "central", Estimate.CENTRAL, "high", Estimate.HIGH);
+
     private final @Nullable Object document;
     private final List<Finding> findings = new ArrayList<>();
     private final Written written;
@@ -92,13 +104,101 @@ public final class Request {
                 : OutlookTerms.level();
     }
 
-    /** Bank, investment and outlook together; empty if the bank or what it costs cannot be read. */
+    /** What is known of the bank's place, under {@code "network"}; empty if nothing is, or if it cannot be read. */
+    private Optional<NetworkTerms> network() {
+        if (!written.has("network")) {
+            return Optional.empty();
+        }
+        int before = findings.size();
+        NetworkTerms network = NetworkTerms.read(written.at("network"));
+        return findings.size() == before ? Optional.of(network) : Optional.empty();
+    }
+
+    private Optional<BankAtSite> atSite(Optional<BankTerms> bank, Optional<NetworkTerms> network) {
+        return bank.flatMap(terms -> network.map(place -> new ScreenedBank(terms, place)))
+                .filter(screened -> screened.check(findings::add))
+                .map(ScreenedBank::atSite);
+    }
+
+    /** Bank, investment, outlook and network together; empty if the bank cannot be read. */
     public Optional<Proposal> proposal() {
-        Optional<BankTerms> bank = bank();
+        return proposal(bank(), network());
+    }
+
+    private Optional<Proposal> proposal(Optional<BankTerms> bank, Optional<NetworkTerms> network) {
         Optional<InvestmentTerms> investment = investment();
         OutlookTerms outlook = outlook();
-        return bank.map(
-                terms -> new Proposal(terms.bank(), investment.map(InvestmentTerms::investment), outlook.outlook()));
+        Optional<BankAtSite> atSite = atSite(bank, network);
+        return bank.map(terms ->
+                new Proposal(terms.bank(), investment.map(InvestmentTerms::investment), outlook.outlook(), atSite));
+    }
+
+    /** A proposal with its promises, under {@code "claims"}, and its {@code "place"}; empty if the bank cannot be read. */
+    public Optional<Offer> offer() {
+        Optional<NetworkTerms> network = network();
+        Optional<Proposal> proposal = proposal(bank(), network);
+        Optional<KwhShare.Place> place = written.has("place")
+                ? Optional.of(written.word("place", PLACES, KwhShare.Place.AT_THE_LOAD))
+                : Optional.empty();
+        List<Claim> claims = written.list("claims").stream()
+                .map(ClaimKind::read)
+                .flatMap(Optional::stream)
+                .toList();
+        return proposal.map(offered -> new Offer(
+                offered,
+                place,
+                network.flatMap(NetworkTerms::nonLinearShare),
+                network.flatMap(NetworkTerms::currentThd),
+                claims));
+    }
+
+    /** The bank and its network, which must be there; empty if one of the two cannot be read. */
+    public Optional<Proposal> screened() {
+        if (!written.has("network")) {
+            findings.add(Finding.error("missing-key", "", "\"network\" is missing")
+                    .allowed("an object with \"serviceVolts\" and what else is known"));
+        }
+        Optional<BankTerms> bank = bank();
+        Optional<BankAtSite> atSite = atSite(bank, network());
+        return bank.map(terms -> new Proposal(
+                terms.bank(), Optional.empty(), OutlookTerms.level().outlook(), atSite));
+    }
+
+    /** The same of a document that may also be an offer: its other parts are read too. */
+    public Optional<Proposal> screenedOffer() {
+        if (!written.has("network")) {
+            return screened();
+        }
+        return written.has("claims") ? offer().map(Offer::proposal) : proposal();
+    }
+
+    /** A document that is a list of prices. */
+    public Optional<PriceTerms> prices() {
+        return declared(PriceTerms.read(written), "");
+    }
+
+    /** Under {@code "prices"}, {@code "outlook"}, {@code "choice"} and {@code "basis"}: what a sizing is asked with. */
+    public Optional<SizeTerms> sizing() {
+        int before = findings.size();
+        if (!written.has("prices")) {
+            findings.add(Finding.error("missing-key", "", "\"prices\" is missing")
+                    .allowed("an object with \"perKvar\": there are no prices but your own"));
+        }
+        Optional<PriceTerms> prices =
+                written.has("prices") ? declared(PriceTerms.read(written.at("prices")), "/prices") : Optional.empty();
+        ChoiceTerms choice = written.has("choice")
+                ? declared(ChoiceTerms.read(written.at("choice")), "/choice").orElseGet(ChoiceTerms::usual)
+                : ChoiceTerms.usual();
+        findings.addAll(Declared.check(choice.make(), "/choice/make"));
+        OutlookTerms outlook = outlook();
+        if (!(written.has("outlook") && written.at("outlook").has("discountRate"))) {
+            findings.add(Finding.error("missing-key", "/outlook", "\"discountRate\" is missing")
+                    .allowed("0 to 1, where 0.08 means 8 %: the best size is the one worth most today"));
+        }
+        Estimate basis = written.word("basis", ESTIMATES, Estimate.CENTRAL);
+        return findings.size() == before
+                ? prices.map(each -> new SizeTerms(choice, each, outlook, basis))
+                : Optional.empty();
     }
 
     /** The next few kvar under {@code "kvar"}, and whether {@code "charts"} are wanted. */

@@ -4,15 +4,12 @@ package tariff.service.command;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.io.IOException;
-import java.io.PrintWriter;
-import java.io.StringWriter;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
-import picocli.CommandLine;
 import tariff.service.http.Examples;
 
 class CommandTest {
@@ -24,15 +21,8 @@ class CommandTest {
     @TempDir
     private Path directory;
 
-    private record Ran(int exit, String out, String err) {}
-
-    private static Ran run(String... arguments) {
-        StringWriter out = new StringWriter();
-        StringWriter err = new StringWriter();
-        CommandLine line = Tariff.commandLine();
-        line.setOut(new PrintWriter(out)).setErr(new PrintWriter(err));
-        int exit = line.execute(arguments);
-        return new Ran(exit, out.toString(), err.toString().replace("\r", ""));
+    private static Ran run(Object... arguments) {
+        return Ran.of(arguments);
     }
 
     private String file(String name, String content) throws IOException {
@@ -42,9 +32,9 @@ class CommandTest {
     @Test
     void aRateIsReadBackInWords() {
         Ran ran = run("check", RATE);
-        assertThat(ran.exit).isEqualTo(Exit.OK);
-        assertThat(ran.err).isEmpty();
-        assertThat(ran.out)
+        assertThat(ran.exit()).isEqualTo(Exit.OK);
+        assertThat(ran.err()).isEmpty();
+        assertThat(ran.out())
                 .startsWith("Millbrook kVA Service, prices in EUR, from 2025-01-01\n")
                 .contains("\nEnergy: kWh, at 0.0985 per kWh.\n");
     }
@@ -56,9 +46,9 @@ class CommandTest {
                 file(
                         "wrong.json",
                         "{\"name\":\"A\",\"currency\":\"Eur\",\"lines\":[{\"name\":\"E\",\"quantity\":{\"energy\":\"kwh\"},\"price\":1}]}"));
-        assertThat(ran.exit).isEqualTo(Exit.FINDINGS);
-        assertThat(ran.out).isEmpty();
-        assertThat(ran.err).isEqualTo("""
+        assertThat(ran.exit()).isEqualTo(Exit.FINDINGS);
+        assertThat(ran.out()).isEmpty();
+        assertThat(ran.err()).isEqualTo("""
                 /currency: is not a currency code; found "Eur"; allowed: three capital letters, such as EUR (ISO 4217)
                 /lines/0/quantity/energy: is not known; did you mean "kWh"?; found "kwh"; allowed: exported kWh, kVAh, kWh,\
                  lagging kvarh, leading kvarh
@@ -69,22 +59,22 @@ class CommandTest {
     void aFileThatIsNoJsonIsUnusable() throws IOException {
         String name = file("rate.json", "name: A");
         Ran ran = run("check", name);
-        assertThat(ran.exit).isEqualTo(Exit.UNUSABLE_FILE);
-        assertThat(ran.err).startsWith("rate.json: line 1, column 1: is not valid JSON: ");
+        assertThat(ran.exit()).isEqualTo(Exit.UNUSABLE_FILE);
+        assertThat(ran.err()).startsWith("rate.json: line 1, column 1: is not valid JSON: ");
     }
 
     @Test
     void aFileThatIsNotThereIsUnusable() {
         String nowhere = directory.resolve("none.json").toString();
         Ran ran = run("statement", RATE, nowhere);
-        assertThat(ran.exit).isEqualTo(Exit.UNUSABLE_FILE);
-        assertThat(ran.err).isEqualTo(nowhere + ": cannot be read; found no such file\n");
+        assertThat(ran.exit()).isEqualTo(Exit.UNUSABLE_FILE);
+        assertThat(ran.err()).isEqualTo(nowhere + ": cannot be read; found no such file\n");
     }
 
     /** Own arithmetic: 231,900 × 0.0985 = 22,842.15; 918 × 9.80 = 8,996.40. */
     @Test
     void aStatementShowsItsWorkingBesideEachAmount() {
-        assertThat(run("statement", RATE, BILLS).out).startsWith("""
+        assertThat(run("statement", RATE, BILLS).out()).startsWith("""
                 Millbrook kVA Service, amounts in EUR
 
                 2025-01
@@ -99,15 +89,15 @@ class CommandTest {
     @Test
     void anOptionOfTheSiteMayBeSaidBesideTheFile() {
         // −2 % of 22,842.15 + 8,996.40, own arithmetic
-        assertThat(run("statement", RATE, BILLS, "--option", "primary metered").out)
+        assertThat(run("statement", RATE, BILLS, "--option", "primary metered").out())
                 .contains("  Primary metering credit   -636.77  = 31838.55 × -2 %\n");
     }
 
     @Test
     void aTableOfASpreadsheetIsBilledAndSaysHowItWasRead() throws IOException {
         Ran ran = run("statement", RATE, file("bills.csv", "Month;kWh;peak kVA\n2025-01;1000;20\n"), "--format", "csv");
-        assertThat(ran.out.lines()).contains("2025-01-01,2025-01-31,Energy,98.50,yes,EUR");
-        assertThat(ran.err).contains("Separator: semicolon\n");
+        assertThat(ran.out().lines()).contains("2025-01-01,2025-01-31,Energy,98.50,yes,EUR");
+        assertThat(ran.err()).contains("Separator: semicolon\n");
     }
 
     @Test
@@ -120,14 +110,15 @@ class CommandTest {
     @ValueSource(strings = {"text", "json", "csv"})
     void theSameQuestionIsPrintedTheSameWay(String format) {
         Ran once = run("assess", RATE, BILLS, "--fixed", "300", "--cost", "20000", "--format", format);
-        assertThat(once.exit).isEqualTo(Exit.OK);
+        assertThat(once.exit()).isEqualTo(Exit.OK);
         assertThat(run("assess", RATE, BILLS, "--fixed", "300", "--cost", "20000", "--format", format))
                 .isEqualTo(once);
     }
 
     @Test
     void anAssessmentFitsInAHundredColumnsAndEndsWithItsCautions() {
-        String out = run("assess", RATE, BILLS, "--steps", "50,50,100", "--cost", "20000", "--discount", "0.08").out;
+        String out = run("assess", RATE, BILLS, "--steps", "50,50,100", "--cost", "20000", "--discount", "0.08")
+                .out();
         assertThat(out.lines())
                 .allSatisfy(line ->
                         assertThat(line.codePointCount(0, line.length())).isLessThanOrEqualTo(100));
@@ -137,15 +128,16 @@ class CommandTest {
     @Test
     void aBankOutOfRangeIsAFinding() {
         Ran ran = run("assess", RATE, BILLS, "--fixed", "1e999999999");
-        assertThat(ran.exit).isEqualTo(Exit.FINDINGS);
-        assertThat(ran.err).isEqualTo("/fixedKvar: is out of range; found 1E+999999999; allowed: 0 to 1000000 kvar\n");
+        assertThat(ran.exit()).isEqualTo(Exit.FINDINGS);
+        assertThat(ran.err())
+                .isEqualTo("/fixedKvar: is out of range; found 1E+999999999; allowed: 0 to 1000000 kvar\n");
     }
 
     @Test
     void anUnknownUnitIsAMistakeOnTheCommandLine() {
         Ran ran = run("statement", RATE, BILLS, "--agreed", "MW=3");
-        assertThat(ran.exit).isEqualTo(Exit.USAGE);
-        assertThat(ran.err)
+        assertThat(ran.exit()).isEqualTo(Exit.USAGE);
+        assertThat(ran.err())
                 .startsWith(
                         "Invalid value for option '--agreed' (UNIT=NUMBER): \"MW\" is no unit; one of: kWh, kvarh,");
     }

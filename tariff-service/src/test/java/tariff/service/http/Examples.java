@@ -31,8 +31,15 @@ public final class Examples {
     }
 
     public static List<Path> rates() {
-        try (Stream<Path> files = Files.list(path("examples/rates"))) {
-            return files.sorted().toList();
+        return in("examples/rates", ".json");
+    }
+
+    /** The files of a directory whose names end so, in order. */
+    public static List<Path> in(String directory, String ending) {
+        try (Stream<Path> files = Files.list(path(directory))) {
+            return files.filter(file -> file.toString().endsWith(ending))
+                    .sorted()
+                    .toList();
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
