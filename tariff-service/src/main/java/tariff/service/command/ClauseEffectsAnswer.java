@@ -88,10 +88,13 @@ record ClauseEffectsAnswer(ClauseEffects effects) implements Format.Printable {
     }
 
     private String next() {
+        String low = money(effects.nextBank(Estimate.LOW));
+        String high = money(effects.nextBank(Estimate.HIGH));
+        String central = money(effects.nextBank(Estimate.CENTRAL));
         return "The next 0.01 of power factor in every month saves " + money(effects.nextPoint()) + ". The next "
-                + plain(effects.bankKvar()) + " kvar, always on, save " + money(effects.nextBank(Estimate.LOW)) + " to "
-                + money(effects.nextBank(Estimate.HIGH)) + " in a settled year, by estimate "
-                + money(effects.nextBank(Estimate.CENTRAL)) + "."
+                + plain(effects.bankKvar()) + " kvar, always on, save "
+                + (low.equals(high) ? central : low + " to " + high + ", by estimate " + central)
+                + " in a settled year."
                 + effects.lastToFlatten()
                         .map(month -> " " + month.period() + " needs most kvar until nothing more is saved.")
                         .orElse(" Nothing more can be saved.");
