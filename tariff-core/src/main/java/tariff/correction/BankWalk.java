@@ -28,9 +28,7 @@ public final class BankWalk {
             IntervalSeries series, IntervalRange range, DemandInterval demand, BigDecimal kvar) {
         long bank = scaled(series, kvar);
         ReactiveTally tally = new ReactiveTally(series, demand);
-        for (int i = range.from(); i < range.to(); i++) {
-            tally.add(i, bank);
-        }
+        tally.addAll(range, bank);
         return tally.outcome();
     }
 

@@ -5,6 +5,7 @@ import java.math.BigDecimal;
 import java.math.RoundingMode;
 import tariff.meter.Apparent;
 import tariff.meter.DemandInterval;
+import tariff.meter.IntervalRange;
 import tariff.meter.IntervalSeries;
 
 /**
@@ -36,6 +37,49 @@ final class ReactiveTally {
         }
         this.series = series;
         this.steps = demand.stepsIn(series);
+    }
+
+    /** A bank that gives the same in every interval of a range; the sums of {@link #add}, kept in registers of the processor. */
+    void addAll(IntervalRange range, long bankKvar) {
+        if (steps > 1) {
+            for (int i = range.from(); i < range.to(); i++) {
+                add(i, bankKvar);
+            }
+            return;
+        }
+        for (int from = range.from(); from < range.to(); ) {
+            int absent = Math.min(series.nextAbsent(from), range.to());
+            addRecorded(from, absent, bankKvar);
+            from = absent + 1;
+        }
+    }
+
+    private void addRecorded(int from, int to, long bankKvar) {
+        long perHour = series.perHour();
+        long sumBefore = 0;
+        long sumLagging = 0;
+        long sumLeading = 0;
+        long mostLagging = peakLagging;
+        long mostLeading = peakLeading;
+        for (int i = from; i < to; i++) {
+            long lag = series.scaledLaggingKvarh(i) * perHour;
+            long lead = series.scaledLeadingKvarh(i) * perHour;
+            long swing = Math.min(lag, lead);
+            long net = lag - lead - bankKvar;
+            long newLag = swing + Math.max(0, net);
+            long newLead = swing + Math.max(0, -net);
+            sumBefore += lag;
+            sumLagging += newLag;
+            sumLeading += newLead;
+            mostLagging = Math.max(mostLagging, newLag);
+            mostLeading = Math.max(mostLeading, newLead);
+            apparent(series.scaledKwh(i) * perHour, net);
+        }
+        before += sumBefore;
+        lagging += sumLagging;
+        leading += sumLeading;
+        peakLagging = mostLagging;
+        peakLeading = mostLeading;
     }
 
     /** What both registers of one interval counted stays: within the interval the load swung from one side to the other. */

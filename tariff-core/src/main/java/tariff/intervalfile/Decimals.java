@@ -4,12 +4,15 @@ package tariff.intervalfile;
 import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.util.regex.Pattern;
+import java.util.stream.LongStream;
 
 /** Reads figures into scaled whole numbers, digit by digit where they are plain. */
 final class Decimals {
     static final long EMPTY = Long.MIN_VALUE;
     static final long UNREADABLE = Long.MIN_VALUE + 1;
     private static final long LARGEST = 1L << 50;
+    private static final long[] POWERS =
+            LongStream.iterate(1, power -> 10 * power).limit(19).toArray();
     private static final Pattern EXPONENT = Pattern.compile("[+-]?\\d{1,20}(\\.\\d{0,20})?([eE][+-]?\\d{1,2})?");
     private static final Pattern POINT = Pattern.compile("[+-]?\\d{1,3}([,'\\h]\\d{3})+(\\.\\d+)?");
     private static final Pattern COMMA = Pattern.compile("[+-]?\\d{1,3}([.'\\h]\\d{3})+(,\\d+)?");
@@ -42,32 +45,38 @@ final class Decimals {
         }
         boolean negative = text[at] == '-';
         int first = negative || text[at] == '+' ? at + 1 : at;
-        long value = 0;
-        int decimals = -1;
         if (first == end || end - first > 15) {
             return general(new String(text, at, end - at), scale);
         }
-        for (int i = first; i < end; i++) {
-            char c = text[i];
-            if (c >= '0' && c <= '9') {
-                if (decimals == scale) {
-                    return general(new String(text, at, end - at), scale);
-                }
-                value = value * 10 + (c - '0');
-                decimals += decimals >= 0 ? 1 : 0;
-            } else if (decimals < 0 && (c == mark || (mark == 0 && (c == '.' || c == ','))) && end - first > 1) {
-                decimals = 0;
-            } else {
-                return general(new String(text, at, end - at), scale);
-            }
+        long value = 0;
+        int i = first;
+        while (i < end && isDigit(text[i])) {
+            value = value * 10 + (text[i++] - '0');
         }
-        for (int i = Math.max(0, decimals); i < scale; i++) {
-            value *= 10;
-            if (value > LARGEST) {
-                return UNREADABLE;
+        int decimals = 0;
+        if (i < end && isMark(text[i]) && end - first > 1) {
+            int start = ++i;
+            while (i < end && isDigit(text[i])) {
+                value = value * 10 + (text[i++] - '0');
             }
+            decimals = i - start;
         }
-        return negative ? -value : value;
+        if (i < end || decimals > scale) {
+            return general(new String(text, at, end - at), scale);
+        }
+        long power = POWERS[scale - decimals];
+        if (value > LARGEST / power) {
+            return UNREADABLE;
+        }
+        return negative ? -value * power : value * power;
+    }
+
+    private static boolean isDigit(char c) {
+        return c >= '0' && c <= '9';
+    }
+
+    private boolean isMark(char c) {
+        return c == mark || (mark == 0 && (c == '.' || c == ','));
     }
 
     private long general(String text, int scale) {

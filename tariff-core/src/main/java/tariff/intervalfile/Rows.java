@@ -17,6 +17,9 @@ final class Rows extends AbstractBaseCsvCallbackHandler<Boolean> {
     /** Decimals that are kept of a kWh or kvarh. */
     static final int SCALE = 6;
 
+    /** Room for a leap year of quarter-hours from the start; more is made as rows come. */
+    private static final int ROOM = 366 * 96;
+
     private static final int IGNORED = -1;
     private static final int STAMP = -2;
     private static final int TIME = -3;
@@ -38,8 +41,8 @@ final class Rows extends AbstractBaseCsvCallbackHandler<Boolean> {
     private long[] current = {};
 
     private int count;
-    private long[] stamps = new long[1024];
-    private int[] lines = new int[1024];
+    private long[] stamps = new long[ROOM];
+    private int[] lines = new int[ROOM];
     private List<Role> kept = List.of();
     private long[][] columns = {};
 

@@ -89,7 +89,34 @@ final class Stamp {
 
     /** The stamp, or {@link #UNREADABLE}. */
     static long read(char[] text, int offset, int length) {
-        return new Reader(text, offset, length).read();
+        long plain = length == 16 ? plain(text, offset) : UNREADABLE;
+        return plain == UNREADABLE ? new Reader(text, offset, length).read() : plain;
+    }
+
+    /** 2026-03-01 00:15, as most meters write; unreadable if anything at all is otherwise. */
+    private static long plain(char[] text, int at) {
+        if (text[at + 4] != '-'
+                || text[at + 7] != '-'
+                || (text[at + 10] != ' ' && text[at + 10] != 'T')
+                || text[at + 13] != ':') {
+            return UNREADABLE;
+        }
+        int year = 100 * two(text, at) + two(text, at + 2);
+        int month = two(text, at + 5);
+        int day = two(text, at + 8);
+        int hour = two(text, at + 11);
+        int minute = two(text, at + 14);
+        boolean good = year >= 1900 && year <= 2200 && month <= 31 && day <= 31 && hour < 24 && minute < 60;
+        return good && (month | day | hour | minute) >= 0
+                ? pack(year, month, day, hour * 60 + minute, HAS_DATE | HAS_TIME | ORDERED, 0)
+                : UNREADABLE;
+    }
+
+    /** Two digits; far below zero if one is none. */
+    private static int two(char[] text, int at) {
+        int tens = text[at] - '0';
+        int ones = text[at + 1] - '0';
+        return (tens | ones | (9 - tens) | (9 - ones)) < 0 ? -1_000_000 : 10 * tens + ones;
     }
 
     static long read(String text) {

@@ -113,6 +113,12 @@ public final class IntervalSeries {
         return absent.get(interval);
     }
 
+    /** The first interval from this one on that was not recorded; {@link #size} if all were. */
+    public int nextAbsent(int from) {
+        int next = absent.nextSetBit(from);
+        return next < 0 ? size() : next;
+    }
+
     /** Whether any interval of a range was recorded. */
     boolean recordedIn(IntervalRange range) {
         return absent.nextClearBit(range.from()) < range.to();
