@@ -45,7 +45,15 @@ class MutatedRequestsTest extends Served {
     };
 
     @ParameterizedTest
-    @CsvSource({"statement, /statements, 100", "assessment, /assessments, 100", "rate-check, /rate-checks, 100"})
+    @CsvSource({
+        "statement, /statements, 100",
+        "assessment, /assessments, 100",
+        "rate-check, /rate-checks, 100",
+        "sizing, /sizings, 60",
+        "sizing-no-bank, /sizings, 30",
+        "review, /reviews, 100",
+        "screening, /screenings, 400"
+    })
     void aChangedRequestNeverFailsTheService(String example, String path, int times) {
         Object valid = inline(JsonTree.read(
                 Examples.text("examples/requests/" + example + ".json").getBytes(StandardCharsets.UTF_8)));
