@@ -37,10 +37,10 @@ public record PlainBankClaim() implements Claim {
         screens.stream()
                 .filter(screen -> screen.value().isPresent())
                 .forEach(screen -> working.add(new Working(screen.name(), screen.found())));
-        return new Reviewed(this, verdict(share, screens), working, List.of());
+        return new Reviewed(this, verdict(share, screens, isNonLinearLoadKnown(evidence)), working, List.of());
     }
 
-    private static Verdict verdict(Optional<BigDecimal> share, List<Screening> screens) {
+    private static Verdict verdict(Optional<BigDecimal> share, List<Screening> screens, boolean known) {
         if (share.filter(part -> part.compareTo(MUST_NOT) > 0).isPresent()) {
             return mustNot(MUST_NOT, nonLinear(share.get()));
         }
@@ -55,13 +55,21 @@ public record PlainBankClaim() implements Claim {
         if (!doubts.isEmpty()) {
             return new Verdict.HoldsOnlyIf(STUDY + doubts);
         }
-        String fine = found(screens, tariff.electrical.Verdict.FINE);
-        if (share.isEmpty() && fine.isEmpty()) {
+        if (!known) {
             return new Verdict.CannotTell(
                     "the part of the load that is drives and rectifiers, and measured harmonics,");
         }
         return new Verdict.HoldsOnlyIf("holds only if measured harmonics and a resonance check agree; "
-                + share.map(PlainBankClaim::nonLinear).orElse(fine));
+                + share.map(PlainBankClaim::nonLinear).orElseGet(() -> found(screens, tariff.electrical.Verdict.FINE)));
+    }
+
+    private static boolean isNonLinearLoadKnown(Evidence evidence) {
+        return evidence.offer().nonLinearShare().isPresent()
+                || evidence.offer()
+                        .proposal()
+                        .atSite()
+                        .filter(at -> at.site().nonLinearShare().isPresent())
+                        .isPresent();
     }
 
     /** @param bound the non-linear part of the load from which such a bank is too bold */

@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.TreeMap;
 import org.jspecify.annotations.Nullable;
 import tariff.correction.Estimate;
 import tariff.electrical.BankAtSite;
@@ -23,12 +24,12 @@ import tariff.service.shelf.Shelf;
 
 /** A question being read: its parts one after the other, and at the end everything that is wrong with any of them. */
 public final class Request {
-    private static final Map<String, KwhShare.Place> PLACES = Map.of(
+    private static final Map<String, KwhShare.Place> PLACES = new TreeMap<>(Map.of(
             "at the meter", KwhShare.Place.AT_THE_METER,
             "behind own transformer", KwhShare.Place.BEHIND_OWN_TRANSFORMER,
-            "at the load", KwhShare.Place.AT_THE_LOAD);
+            "at the load", KwhShare.Place.AT_THE_LOAD));
     private static final Map<String, Estimate> ESTIMATES =
-            Map.of("low", Estimate.LOW, "central", Estimate.CENTRAL, "high", Estimate.HIGH);
+            new TreeMap<>(Map.of("low", Estimate.LOW, "central", Estimate.CENTRAL, "high", Estimate.HIGH));
 
     private final @Nullable Object document;
     private final List<Finding> findings = new ArrayList<>();

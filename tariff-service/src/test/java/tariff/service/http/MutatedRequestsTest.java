@@ -50,7 +50,11 @@ class MutatedRequestsTest extends Served {
         "assessment, /assessments, 100",
         "reconciliation, /reconciliations, 40",
         "clause-effects, /clause-effects, 10",
-        "rate-check, /rate-checks, 100"
+        "rate-check, /rate-checks, 100",
+        "sizing, /sizings, 20",
+        "sizing-no-bank, /sizings, 10",
+        "review, /reviews, 40",
+        "screening, /screenings, 100"
     })
     void aChangedRequestNeverFailsTheService(String example, String path, int times) {
         Object valid = inline(JsonTree.read(
