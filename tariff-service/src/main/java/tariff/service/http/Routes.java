@@ -24,6 +24,7 @@ public final class Routes {
                 new Route(GET, "/rates/{id}", rates::one),
                 new Route(POST, "/rate-checks", exchange.of(new RateChecks())),
                 new Route(POST, "/statements", exchange.of(new Statements(shelf))),
-                new Route(POST, "/assessments", exchange.of(new Assessments(shelf))));
+                new Route(POST, "/assessments", exchange.of(new Assessments(shelf))),
+                new Route(POST, "/reports", exchange.of(Reports.TYPE, new Reports(shelf)::page)));
     }
 }

@@ -1,12 +1,14 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.service.request;
 
+import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import tariff.json.BillsJson;
+import tariff.json.PeriodJson;
 import tariff.meter.MeteredSite;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
@@ -99,6 +101,11 @@ public final class Request {
         OutlookTerms outlook = outlook();
         return bank.map(
                 terms -> new Proposal(terms.bank(), investment.map(InvestmentTerms::investment), outlook.outlook()));
+    }
+
+    /** The day under {@code "date"}, if there is one. */
+    public Optional<LocalDate> date() {
+        return PeriodJson.day(written, "date");
     }
 
     private <T> Optional<T> declared(T terms, String pointer) {
