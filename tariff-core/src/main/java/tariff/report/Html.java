@@ -5,7 +5,7 @@ import java.util.ArrayDeque;
 import java.util.Deque;
 import java.util.List;
 
-/** Writes HTML elements, one a line. Words and values of attributes are escaped; attributes come in pairs of name and value. */
+/** Writes HTML elements, one a line, so closed that XML readers follow them too. Words and values of attributes are escaped; attributes come in pairs of name and value. */
 final class Html {
     private final StringBuilder out = new StringBuilder("<!DOCTYPE html>\n");
     private final Deque<String> open = new ArrayDeque<>();
@@ -23,7 +23,8 @@ final class Html {
 
     /** An element without content or end, such as {@code meta}. */
     Html single(String element, String... attributes) {
-        out.append(start(element, attributes)).append('\n');
+        String tag = start(element, attributes);
+        out.append(tag, 0, tag.length() - 1).append(" />\n");
         return this;
     }
 

@@ -56,8 +56,10 @@ final class ShortAnswer implements Section {
         String penalty = today.penalty().signum() < 0
                 ? "nothing is paid for missing the rate's own point without penalty"
                 : money(report, today.penalty()) + " is paid for missing the rate's own point without penalty";
-        return of + penalty + " (" + today.point().words() + "), and " + unity
-                + " would not be asked at unity power factor.";
+        String more = today.penalty().compareTo(today.toUnity()) == 0
+                ? "unity power factor would take off no more."
+                : unity + " would not be asked at unity power factor.";
+        return of + penalty + " (" + today.point().words() + "), and " + more;
     }
 
     private static String saved(Report report) {

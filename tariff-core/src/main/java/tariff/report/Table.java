@@ -12,6 +12,8 @@ import java.util.regex.Pattern;
 final class Table {
     private static final Pattern NUMBER = Pattern.compile("-?\\d+(\\.\\d+)?");
 
+    private static final int SHORT = 24;
+
     private final String id;
     private final String caption;
     private final List<String> heads;
@@ -67,7 +69,7 @@ final class Table {
         page.close().close().open("tbody");
         for (List<String> row : rows) {
             page.open("tr");
-            page.text("th", row.get(0), "scope", "row");
+            page.text("th", row.get(0), "scope", "row", "class", row.get(0).length() <= SHORT ? "short" : "words");
             row.stream().skip(1).forEach(cell -> page.text("td", cell, "class", isNumber(cell) ? "number" : "words"));
             page.close();
         }
