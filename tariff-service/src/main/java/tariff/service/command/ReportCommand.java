@@ -2,7 +2,6 @@
 package tariff.service.command;
 
 import java.io.IOException;
-import java.io.UncheckedIOException;
 import java.nio.file.Path;
 import java.time.LocalDate;
 import java.util.Optional;
@@ -13,6 +12,8 @@ import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
 import tariff.bill.Billing;
+import tariff.notice.Finding;
+import tariff.notice.Refusal;
 import tariff.proposal.Assessment;
 import tariff.proposal.Proposal;
 import tariff.proposal.SavingsBySize;
@@ -75,7 +76,7 @@ final class ReportCommand implements Callable<Integer> {
         try {
             java.nio.file.Files.writeString(output.get(), html);
         } catch (IOException e) {
-            throw new UncheckedIOException("cannot write " + output.get(), e);
+            throw new Refusal(Finding.error("unwritable", output.get().toString(), "cannot be written"));
         }
     }
 }

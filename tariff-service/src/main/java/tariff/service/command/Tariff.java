@@ -35,7 +35,7 @@ import tariff.notice.Refusal;
             "64:the command line itself is wrong"
         })
 public final class Tariff implements Runnable {
-    private static final Set<String> NO_DOCUMENT = Set.of("not-json", "not-text", "unreadable");
+    private static final Set<String> NO_DOCUMENT = Set.of("not-json", "not-text", "unreadable", "unwritable");
 
     @Spec
     private @Nullable CommandSpec spec;
