@@ -71,7 +71,8 @@ final class Handed {
                         proposal(),
                         SavingsClaim.yearly(new BigDecimal("20000")),
                         KwhClaim.yearly(new BigDecimal("150000"))));
-        SiteData site = SiteData.unknown().transformerKva(630).impedancePercent(4).build();
+        SiteData site =
+                SiteData.unknown().transformerKva(630).impedancePercent(4).build();
         BankData bank = BankData.of(List.of(100.0), 400, 0, BankData.Switching.FIXED, 0.5);
         return Report.of(review.assessment())
                 .withSizes(SavingsBySize.of(billing, year(), SavingsBySize.USUAL_STEPS))
@@ -81,10 +82,11 @@ final class Handed {
 
     /** A single month that gives kWh and kvarh alone, and a bank without a price. */
     static Report bare() {
-        String rate = Bills.rate("{ 'name': 'Reactive energy', 'quantity': { 'energy': 'lagging kvarh' }, 'price': 0.01 }");
+        String rate =
+                Bills.rate("{ 'name': 'Reactive energy', 'quantity': { 'energy': 'lagging kvarh' }, 'price': 0.01 }");
         MeteredMonth month =
                 MeteredMonth.of("2025-01").with(ENERGY_KWH, 160_000).with(LAGGING_KVARH, 120_000);
-        return Report.of(Assessment.of(
-                billing("", rate), List.of(month), Proposal.of(CapacitorBank.automatic("50", "50"))));
+        return Report.of(
+                Assessment.of(billing("", rate), List.of(month), Proposal.of(CapacitorBank.automatic("50", "50"))));
     }
 }

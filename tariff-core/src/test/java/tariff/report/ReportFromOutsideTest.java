@@ -15,7 +15,8 @@ import tariff.proposal.Assessment;
 
 /** A report carries nothing in from outside, fetches nothing, and has an end. */
 class ReportFromOutsideTest {
-    private static final String HOSTILE = "</title></style><script>alert(1)</script><img src=x onerror='alert(2)'>&amp;\u202e";
+    private static final String HOSTILE =
+            "</title></style><script>alert(1)</script><img src=x onerror='alert(2)'>&amp;\u202e";
 
     @ParameterizedTest
     @MethodSource("tariff.report.ReportTest#reports")
@@ -32,9 +33,8 @@ class ReportFromOutsideTest {
 
     @Test
     void namesStayNames() {
-        String rate = Bills.rate(Handed.LINES)
-                .replace("Worked example", HOSTILE)
-                .replace("Reactive demand", HOSTILE);
+        String rate =
+                Bills.rate(Handed.LINES).replace("Worked example", HOSTILE).replace("Reactive demand", HOSTILE);
         String html = Report.of(Assessment.of(Handed.billing(HOSTILE, rate), Handed.year(), Handed.proposal()))
                 .html();
         assertThat(html)
@@ -46,7 +46,16 @@ class ReportFromOutsideTest {
     }
 
     @ParameterizedTest
-    @CsvSource({"<, &lt;", "&, &amp;", "'\"', &quot;", "'''', &#39;", "'\u0001', \ufffd", "\u0085, \ufffd", "\u2067, \ufffd", "\ud800, \ufffd"})
+    @CsvSource({
+        "<, &lt;",
+        "&, &amp;",
+        "'\"', &quot;",
+        "'''', &#39;",
+        "'\u0001', \ufffd",
+        "\u0085, \ufffd",
+        "\u2067, \ufffd",
+        "\ud800, \ufffd"
+    })
     void whatIsMarkupBecomesWords(String given, String written) {
         assertThat(Html.escaped(given)).isEqualTo(written);
     }

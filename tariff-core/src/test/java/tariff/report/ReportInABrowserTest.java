@@ -70,9 +70,8 @@ class ReportInABrowserTest {
 
     @Test
     void wouldNoticeIfItDid() throws Exception {
-        String poor = Handed.plain().html()
-                .replace("<html lang=\"en\">", "<html>")
-                .replace("color: #444", "color: #bbb");
+        String poor =
+                Handed.plain().html().replace("<html lang=\"en\">", "<html>").replace("color: #444", "color: #bbb");
         assertThat(look(poor, 1280)).contains("color-contrast: ").contains("html-has-lang: html");
     }
 

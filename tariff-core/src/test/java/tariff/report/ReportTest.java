@@ -82,8 +82,9 @@ class ReportTest {
     @MethodSource("reports")
     void everyAssumptionIsToldWithItsPlaceAndItsRemedy(Report report) {
         List<List<String>> rows = Pages.read(report.html()).rows("assumptions-table");
-        assertThat(report.assessment().assumptions()).isNotEmpty().allSatisfy((Assumption each) -> assertThat(rows)
-                .anySatisfy(row -> {
+        assertThat(report.assessment().assumptions())
+                .isNotEmpty()
+                .allSatisfy((Assumption each) -> assertThat(rows).anySatisfy(row -> {
                     assertThat(row.get(0)).isEqualTo(each.message());
                     assertThat(row.get(1).split(", ")).contains(each.where());
                     assertThat(row.get(2)).isEqualTo(each.remedy());
@@ -98,7 +99,8 @@ class ReportTest {
                 .containsExactlyElementsOf(report.assessment().cautions().stream()
                         .map(Caution::message)
                         .toList());
-        assertThat(Pages.text(page.at("answer"))).contains("Capacitors hold a lethal charge after they are switched off.");
+        assertThat(Pages.text(page.at("answer")))
+                .contains("Capacitors hold a lethal charge after they are switched off.");
     }
 
     @ParameterizedTest
@@ -107,8 +109,8 @@ class ReportTest {
         Pages page = Pages.read(report.html());
         assertThat(page.all("table")).isNotEmpty().allSatisfy(table -> {
             assertThat(Pages.inside(table, "caption")).hasSize(1);
-            assertThat(Pages.inside(table, "th")).allSatisfy(head -> assertThat(head.getAttribute("scope"))
-                    .isIn("col", "row"));
+            assertThat(Pages.inside(table, "th"))
+                    .allSatisfy(head -> assertThat(head.getAttribute("scope")).isIn("col", "row"));
             assertThat(Pages.inside(table, "tr"))
                     .allSatisfy(row -> assertThat(Pages.inside(row, "th")).isNotEmpty());
         });
@@ -130,20 +132,23 @@ class ReportTest {
         Report report = Handed.full();
         Pages page = Pages.read(report.html());
         List<List<String>> screens = page.rows("screens-table");
-        assertThat(report.screens()).allSatisfy((Screening each) -> assertThat(screens)
-                .anySatisfy(row -> assertThat(row)
-                        .containsExactly(
-                                each.name(),
-                                Shown.word(each.verdict()),
-                                each.found(),
-                                each.limit(),
-                                each.source(),
-                                each.settledBy())));
+        assertThat(report.screens())
+                .allSatisfy((Screening each) -> assertThat(screens)
+                        .anySatisfy(row -> assertThat(row)
+                                .containsExactly(
+                                        each.name(),
+                                        Shown.word(each.verdict()),
+                                        each.found(),
+                                        each.limit(),
+                                        each.source(),
+                                        each.settledBy())));
         List<List<String>> claims = page.rows("claims-table");
-        assertThat(report.claims()).hasSize(3).allSatisfy((Reviewed each) -> assertThat(claims)
-                .anySatisfy(row -> assertThat(row)
-                        .startsWith(each.claim().words())
-                        .contains(each.verdict().words())));
+        assertThat(report.claims())
+                .hasSize(3)
+                .allSatisfy((Reviewed each) -> assertThat(claims)
+                        .anySatisfy(row -> assertThat(row)
+                                .startsWith(each.claim().words())
+                                .contains(each.verdict().words())));
     }
 
     @Test
@@ -159,7 +164,8 @@ class ReportTest {
         List<String> listed = Pages.inside(Pages.read(report.html()).at("rate"), "li").stream()
                 .map(Pages::text)
                 .toList();
-        assertThat(listed).containsAll(report.assessment().billing().rate().words().lines());
+        assertThat(listed)
+                .containsAll(report.assessment().billing().rate().words().lines());
     }
 
     /** 300 kvar less half of 400 kW leave 100 kvar, at 8 each. */
@@ -167,7 +173,11 @@ class ReportTest {
     void theAppendixIsFollowedWithAPencil() {
         assertThat(Pages.inside(Pages.read(Handed.plain().html()).at("working"), "li").stream()
                         .map(each -> Pages.text(each).lines().findFirst().orElse("")))
-                .contains("Reactive demand: 800.00", "800 = 100 kvar × 8", "200 kW = 0.5 × 400 kW", "Total: 16800.00 EUR");
+                .contains(
+                        "Reactive demand: 800.00",
+                        "800 = 100 kvar × 8",
+                        "200 kW = 0.5 × 400 kW",
+                        "Total: 16800.00 EUR");
     }
 
     @Test
@@ -175,8 +185,9 @@ class ReportTest {
         Pages page = Pages.read(Handed.full().html());
         assertThat(page.all("figure").stream().map(each -> each.getAttribute("id")))
                 .containsExactly("bill-chart", "size-chart", "cash-chart", "tornado-chart");
-        assertThat(page.all("svg")).hasSize(4).allSatisfy(svg -> assertThat(svg.getAttribute("role"))
-                .isEqualTo("img"));
+        assertThat(page.all("svg"))
+                .hasSize(4)
+                .allSatisfy(svg -> assertThat(svg.getAttribute("role")).isEqualTo("img"));
     }
 
     @ParameterizedTest
@@ -189,10 +200,13 @@ class ReportTest {
                 .toList();
         Set<String> once = new HashSet<>(ids);
         assertThat(ids).hasSameSizeAs(once);
-        assertThat(page.all("a")).isNotEmpty().allSatisfy(link -> assertThat(once)
-                .contains(link.getAttribute("href").substring(1)));
+        assertThat(page.all("a"))
+                .isNotEmpty()
+                .allSatisfy(link ->
+                        assertThat(once).contains(link.getAttribute("href").substring(1)));
         assertThat(page.all("*").stream()
-                        .flatMap(each -> Stream.of(each.getAttribute("aria-labelledby").split(" ", -1)))
+                        .flatMap(each ->
+                                Stream.of(each.getAttribute("aria-labelledby").split(" ", -1)))
                         .filter(id -> !id.isEmpty()))
                 .allSatisfy(id -> assertThat(once).contains(id));
     }

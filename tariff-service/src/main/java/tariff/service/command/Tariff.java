@@ -24,7 +24,13 @@ import tariff.notice.Refusal;
 @Command(
         name = "tariff-service",
         description = "What low power factor costs under your own rate, and what a capacitor bank would save.",
-        subcommands = {CheckCommand.class, StatementCommand.class, AssessCommand.class, ReportCommand.class, ServeCommand.class},
+        subcommands = {
+            CheckCommand.class,
+            StatementCommand.class,
+            AssessCommand.class,
+            ReportCommand.class,
+            ServeCommand.class
+        },
         mixinStandardHelpOptions = true,
         version = "tariff-service 0.1.0-SNAPSHOT",
         exitCodeListHeading = "%nExit codes:%n",

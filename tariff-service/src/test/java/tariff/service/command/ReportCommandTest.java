@@ -37,14 +37,24 @@ class ReportCommandTest {
     void theReportIsWrittenWhereItIsAskedFor() throws IOException {
         Path file = directory.resolve("report.html");
         Ran ran = run(
-                "report", RATE, BILLS, "--steps", "50,50,100", "--cost", "9500", "--date", "2026-03-31", "-o",
+                "report",
+                RATE,
+                BILLS,
+                "--steps",
+                "50,50,100",
+                "--cost",
+                "9500",
+                "--date",
+                "2026-03-31",
+                "-o",
                 file.toString());
         assertThat(ran.err).isEmpty();
         assertThat(ran.exit).isEqualTo(Exit.OK);
         assertThat(ran.out).isEmpty();
         assertThat(Files.readString(file))
                 .startsWith("<!DOCTYPE html>\n")
-                .contains("Would a capacitor bank of 200 kvar pay for Tollgate Foundry under the rate Harbourside Large Service?")
+                .contains(
+                        "Would a capacitor bank of 200 kvar pay for Tollgate Foundry under the rate Harbourside Large Service?")
                 .contains("dated 2026-03-31.</p>");
     }
 
@@ -52,7 +62,10 @@ class ReportCommandTest {
     void withoutAFileItGoesToTheStandardOutput() {
         Ran ran = run("report", RATE, BILLS, "--fixed", "100");
         assertThat(ran.exit).isEqualTo(Exit.OK);
-        assertThat(ran.out).startsWith("<!DOCTYPE html>\n").contains("no price is given").doesNotContain("dated");
+        assertThat(ran.out)
+                .startsWith("<!DOCTYPE html>\n")
+                .contains("no price is given")
+                .doesNotContain("dated");
     }
 
     @Test
