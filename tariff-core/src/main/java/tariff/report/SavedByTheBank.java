@@ -54,7 +54,7 @@ final class SavedByTheBank implements Section {
         return new Table(
                         "savings-totals",
                         "Savings in " + report.currency(),
-                        Shown.heads("All " + report.periods().size() + " months"))
+                        Shown.heads("All months"))
                 .row(Shown.row(
                         "First year", each -> Shown.money(report.savings(each).firstYearTotal())))
                 .row(Shown.row(

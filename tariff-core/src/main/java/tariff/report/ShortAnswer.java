@@ -3,7 +3,6 @@ package tariff.report;
 
 import java.math.BigDecimal;
 import java.util.Optional;
-import java.util.stream.Stream;
 import tariff.bill.PowerFactorCost;
 import tariff.correction.Estimate;
 import tariff.notice.Caution;
@@ -71,11 +70,12 @@ final class ShortAnswer implements Section {
                 ? ""
                 : ", " + money(report, low) + " at least and " + money(report, high) + " at most";
         String start = first.compareTo(central) == 0 ? "" : ", and " + money(report, first) + " in the first";
-        return central.signum() < 0
-                ? "The bank is estimated to raise the bills of a settled " + report.year() + " by "
-                        + money(report, central.negate()) + start.replace(", and ", "; it saves ") + "."
-                : "The bank is estimated to save " + money(report, central) + " in a settled " + report.year() + bounds
-                        + start + ".";
+        if (central.signum() < 0) {
+            return "The bank is estimated to raise the bills of a settled " + report.year() + " by "
+                    + money(report, central.negate()) + ".";
+        }
+        return "The bank is estimated to save " + money(report, central) + " in a settled " + report.year() + bounds
+                + start + ".";
     }
 
     private static String paid(Report report) {
@@ -89,18 +89,19 @@ final class ShortAnswer implements Section {
                 .map(Investment::netCost)
                 .map(net -> "At a cost of " + money(report, net) + ", ")
                 .orElse("");
-        String others = String.join(
-                ", ",
-                Stream.of(Estimate.LOW, Estimate.HIGH)
-                        .map(each -> Shown.word(each) + " estimate: " + months(report, each))
-                        .toList());
-        return cost + "by the central estimate it " + central(report) + " (" + others + ").";
+        return cost + "by the central estimate it " + central(report) + others(report) + ".";
     }
 
     private static String central(Report report) {
         return payback(report, Estimate.CENTRAL)
                 .map(month -> "has paid for itself at the end of month " + month)
                 .orElse("does not pay for itself within its life");
+    }
+
+    private static String others(Report report) {
+        String low = months(report, Estimate.LOW);
+        String high = months(report, Estimate.HIGH);
+        return low.equals(high) ? "" : " (low estimate: " + low + ", high estimate: " + high + ")";
     }
 
     private static String months(Report report, Estimate estimate) {

@@ -69,11 +69,16 @@ final class Table {
         page.close().close().open("tbody");
         for (List<String> row : rows) {
             page.open("tr");
-            page.text("th", row.get(0), "scope", "row", "class", row.get(0).length() <= SHORT ? "short" : "words");
-            row.stream().skip(1).forEach(cell -> page.text("td", cell, "class", isNumber(cell) ? "number" : "words"));
+            page.text("th", row.get(0), "scope", "row", "class", kind(row.get(0)));
+            row.stream().skip(1).forEach(cell -> page.text("td", cell, "class", isNumber(cell) ? "number" : kind(cell)));
             page.close();
         }
         page.close().close().close();
+    }
+
+    /** A short text stays on one line. */
+    private static String kind(String cell) {
+        return cell.length() <= SHORT ? "short" : "words";
     }
 
     private boolean isNumeric(int column) {

@@ -12,9 +12,11 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.w3c.dom.Element;
+import tariff.bill.Bills;
 import tariff.electrical.Screening;
 import tariff.notice.Assumption;
 import tariff.notice.Caution;
+import tariff.proposal.Assessment;
 import tariff.proposal.Reviewed;
 
 /** What a report holds, where, and in what form. */
@@ -66,8 +68,18 @@ class ReportTest {
                         "Of 201,600 EUR billed for 2025-01 to 2025-12, 9,600 EUR is paid for missing the rate's own point without penalty"
                                 + " (the highest lagging kvar up to 50 % of the highest kW), and unity power factor would take off no more.",
                         "The bank is estimated to save 9,600 EUR in a settled year.",
-                        "At a cost of 4,800 EUR, by the central estimate it has paid for itself at the end of month 7"
-                                + " (low estimate: month 7, high estimate: month 7).");
+                        "At a cost of 4,800 EUR, by the central estimate it has paid for itself at the end of month 7.");
+    }
+
+    /** 120,000 kvarh at -0.01 are a credit of 1,200.00; whatever takes kvarh away raises the bill. */
+    @Test
+    void aBankThatRaisesTheBillIsSaidToDoSo() {
+        String rate = Bills.rate("{ 'name': 'Credit', 'quantity': { 'energy': 'lagging kvarh' }, 'price': -0.01 }");
+        Report report = Report.of(
+                Assessment.of(Handed.billing("Tollgate Foundry", rate), Handed.year(), Handed.proposal()));
+        assertThat(report.html())
+                .contains("<p>The bank is estimated to raise the bills of a settled year by ")
+                .contains("it does not pay for itself within its life");
     }
 
     @Test
