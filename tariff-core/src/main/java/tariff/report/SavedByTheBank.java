@@ -51,10 +51,7 @@ final class SavedByTheBank implements Section {
     }
 
     private static Table totals(Report report) {
-        return new Table(
-                        "savings-totals",
-                        "Savings in " + report.currency(),
-                        Shown.heads("All months"))
+        return new Table("savings-totals", "Savings in " + report.currency(), Shown.heads("All months"))
                 .row(Shown.row(
                         "First year", each -> Shown.money(report.savings(each).firstYearTotal())))
                 .row(Shown.row(

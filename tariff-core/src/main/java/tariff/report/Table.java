@@ -70,7 +70,9 @@ final class Table {
         for (List<String> row : rows) {
             page.open("tr");
             page.text("th", row.get(0), "scope", "row", "class", kind(row.get(0)));
-            row.stream().skip(1).forEach(cell -> page.text("td", cell, "class", isNumber(cell) ? "number" : kind(cell)));
+            row.stream()
+                    .skip(1)
+                    .forEach(cell -> page.text("td", cell, "class", isNumber(cell) ? "number" : kind(cell)));
             page.close();
         }
         page.close().close().close();

@@ -75,8 +75,8 @@ class ReportTest {
     @Test
     void aBankThatRaisesTheBillIsSaidToDoSo() {
         String rate = Bills.rate("{ 'name': 'Credit', 'quantity': { 'energy': 'lagging kvarh' }, 'price': -0.01 }");
-        Report report = Report.of(
-                Assessment.of(Handed.billing("Tollgate Foundry", rate), Handed.year(), Handed.proposal()));
+        Report report =
+                Report.of(Assessment.of(Handed.billing("Tollgate Foundry", rate), Handed.year(), Handed.proposal()));
         assertThat(report.html())
                 .contains("<p>The bank is estimated to raise the bills of a settled year by ")
                 .contains("it does not pay for itself within its life");
