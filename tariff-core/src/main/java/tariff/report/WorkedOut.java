@@ -40,7 +40,7 @@ final class WorkedOut implements Section {
         Statement highest =
                 all.stream().max(Comparator.comparing(WorkedOut::demand)).orElse(first);
         statement(page, first, "the first month");
-        if (highest != first) {
+        if (!highest.month().period().equals(first.month().period())) {
             statement(page, highest, "the month of the highest demand");
         }
         page.text("h3", "The meters with the bank");
