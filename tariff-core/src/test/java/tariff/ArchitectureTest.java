@@ -47,6 +47,20 @@ class ArchitectureTest {
     static final ArchRule PAYBACK = knows("tariff.payback", "tariff.notice", "org.hipparchus..");
 
     @ArchTest
+    static final ArchRule REPORT = knows(
+            "tariff.report",
+            "tariff.proposal",
+            "tariff.correction",
+            "tariff.payback",
+            "tariff.chart",
+            "tariff.electrical",
+            "tariff.bill",
+            "tariff.rate",
+            "tariff.rate.clause",
+            "tariff.meter",
+            "tariff.notice");
+
+    @ArchTest
     static final ArchRule ONLY_JSON_KNOWS_JACKSON = noClasses()
             .that()
             .resideInAPackage("tariff..")

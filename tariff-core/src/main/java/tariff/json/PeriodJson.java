@@ -9,7 +9,7 @@ import tariff.meter.Period;
 import tariff.rate.clause.Written;
 
 /** The days billed: {@code "month": "2026-01"}, or {@code "from": "2026-01-05", "to": "2026-02-04"}. */
-final class PeriodJson {
+public final class PeriodJson {
     private static final int MOST_DAYS = 366;
     private static final String DAY = "\\d{4}-\\d{2}-\\d{2}";
     private static final int FIRST_YEAR = 1900;
@@ -71,7 +71,7 @@ final class PeriodJson {
     }
 
     /** A day under a key, if there is one and it is one. */
-    static Optional<LocalDate> day(Written in, String key) {
+    public static Optional<LocalDate> day(Written in, String key) {
         Optional<String> text = in.optionalText(key);
         try {
             Optional<LocalDate> day = text.filter(each -> each.matches(DAY))

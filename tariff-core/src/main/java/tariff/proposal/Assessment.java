@@ -164,16 +164,21 @@ public record Assessment(
         Map<Estimate, Appraisal> all = new EnumMap<>(Estimate.class);
         savings.forEach((estimate, bank) -> {
             if (bank.before().size() == YEAR) {
-                proposal.investment()
-                        .ifPresent(investment -> all.put(
-                                estimate,
-                                Appraisal.of(new Venture(
-                                        investment,
-                                        new Savings(bank.firstYearMonths(), bank.settledYearMonths()),
-                                        proposal.outlook()))));
+                venture(bank, proposal).ifPresent(venture -> all.put(estimate, Appraisal.of(venture)));
             }
         });
         return all;
+    }
+
+    private static Optional<Venture> venture(BankSavings bank, Proposal proposal) {
+        return proposal.investment()
+                .map(investment -> new Venture(
+                        investment, new Savings(bank.firstYearMonths(), bank.settledYearMonths()), proposal.outlook()));
+    }
+
+    /** The bank as its owner's money sees it; empty where there is no payback. */
+    public Optional<Venture> venture(Estimate estimate) {
+        return appraisals.containsKey(estimate) ? venture(savings(estimate), proposal) : Optional.empty();
     }
 
     /** Why there is no payback, if there is none. */

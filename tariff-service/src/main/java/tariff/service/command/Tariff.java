@@ -33,6 +33,7 @@ import tariff.notice.Refusal;
             SizeCommand.class,
             ReviewCommand.class,
             ScreenCommand.class,
+            ReportCommand.class,
             ServeCommand.class
         },
         mixinStandardHelpOptions = true,

@@ -22,16 +22,26 @@ final class Exchange {
     }
 
     Handler of(Question question) {
+        return of(JSON, document -> question.answer(document).bytes());
+    }
+
+    /** The same for an answer of any media type. */
+    Handler of(String type, Answer answer) {
         return ctx -> {
-            Accepts.require(ctx, JSON);
+            Accepts.require(ctx, type);
             byte[] body = Body.read(ctx);
             atOnce.acquire();
             try {
-                write(ctx, ask(question, Body.document(body)));
+                ctx.result(ask(answer, Body.document(body))).contentType(type);
             } finally {
                 atOnce.release();
             }
         };
+    }
+
+    /** What a posted document is answered with, as it goes over the wire. */
+    interface Answer {
+        byte[] bytes(@Nullable Object document);
     }
 
     static void write(Context ctx, JsonObject answer) {
@@ -39,9 +49,9 @@ final class Exchange {
     }
 
     /** A document may still lead deeper than a thread can follow; that is said like any other finding. */
-    private static JsonObject ask(Question question, @Nullable Object document) {
+    private static byte[] ask(Answer answer, @Nullable Object document) {
         try {
-            return question.answer(document);
+            return answer.bytes(document);
         } catch (Refusal refusal) {
             throw new Problem(422, "The document cannot be used; see findings.", refusal.findings());
         } catch (StackOverflowError e) {

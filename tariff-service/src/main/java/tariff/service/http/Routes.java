@@ -26,13 +26,14 @@ public final class Routes {
                 new Route(GET, "/rates", rates::list),
                 new Route(GET, "/rates/{id}", rates::one),
                 new Route(POST, "/rate-checks", exchange.of(new RateChecks())),
+                new Route(POST, "/statements", exchange.of(new Statements(shelf))),
+                new Route(POST, "/reconciliations", exchange.of(new Reconciliations(shelf))),
+                new Route(POST, "/clause-effects", exchange.of(new Clauses(shelf))),
+                new Route(POST, "/assessments", exchange.of(new Assessments(shelf))),
                 new Route(POST, "/sizings", exchange.of(new Sizings(shelf))),
                 new Route(POST, "/reviews", exchange.of(new Reviews(shelf))),
                 new Route(POST, "/screenings", exchange.of(new Screenings())),
-                new Route(POST, "/statements", exchange.of(new Statements(shelf))),
-                new Route(POST, "/assessments", exchange.of(new Assessments(shelf))),
-                new Route(POST, "/reconciliations", exchange.of(new Reconciliations(shelf))),
-                new Route(POST, "/clause-effects", exchange.of(new Clauses(shelf))),
+                new Route(POST, "/reports", exchange.of(Reports.TYPE, new Reports(shelf)::page)),
                 new Route(POST, "/interval-statements", uploads.of(intervals::statements)),
                 new Route(POST, "/interval-assessments", uploads.of(intervals::assessment)));
     }

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.service.request;
 
+import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
@@ -11,6 +12,7 @@ import tariff.correction.Estimate;
 import tariff.electrical.BankAtSite;
 import tariff.electrical.KwhShare;
 import tariff.json.BillsJson;
+import tariff.json.PeriodJson;
 import tariff.meter.MeteredSite;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
@@ -205,6 +207,11 @@ public final class Request {
     /** The next few kvar under {@code "kvar"}, and whether {@code "charts"} are wanted. */
     public Optional<ClauseTerms> clauses() {
         return declared(ClauseTerms.read(written), "");
+    }
+
+    /** The day under {@code "date"}, if there is one. */
+    public Optional<LocalDate> date() {
+        return PeriodJson.day(written, "date");
     }
 
     private <T> Optional<T> declared(T terms, String pointer) {
