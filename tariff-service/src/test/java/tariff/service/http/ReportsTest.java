@@ -42,7 +42,7 @@ class ReportsTest extends Served {
                 .post("/reports")
                 .then()
                 .statusCode(422)
-                .body("findings.find { it.where == '/date' }.message", equalTo("is not a day"))
+                .body("findings.find { it.pointer == '/date' }.message", equalTo("is not a day"))
                 .body("findings.find { it.code == 'missing-key' }.message", equalTo("\"bank\" is missing"));
     }
 
