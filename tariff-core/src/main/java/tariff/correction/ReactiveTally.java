@@ -61,6 +61,7 @@ final class ReactiveTally {
         long sumLeading = 0;
         long mostLagging = peakLagging;
         long mostLeading = peakLeading;
+        long mostSquared = peakSquared;
         for (int i = from; i < to; i++) {
             long lag = series.scaledLaggingKvarh(i) * perHour;
             long lead = series.scaledLeadingKvarh(i) * perHour;
@@ -73,8 +74,15 @@ final class ReactiveTally {
             sumLeading += newLead;
             mostLagging = Math.max(mostLagging, newLag);
             mostLeading = Math.max(mostLeading, newLead);
-            apparent(series.scaledKwh(i) * perHour, net);
+            long kw = series.scaledKwh(i) * perHour;
+            if (kw >= SQUARES_FIT || net >= SQUARES_FIT || net <= -SQUARES_FIT) {
+                peakKva = Math.max(peakKva, Apparent.of(kw, net));
+            } else if (kw * kw + net * net > mostSquared) {
+                mostSquared = kw * kw + net * net;
+                peakKva = Math.max(peakKva, Apparent.of(kw, net));
+            }
         }
+        peakSquared = mostSquared;
         before += sumBefore;
         lagging += sumLagging;
         leading += sumLeading;
