@@ -33,9 +33,9 @@ public record Report(
         claims = List.copyOf(claims);
     }
 
-    /** A report of which no more is known than the assessment. */
+    /** A report of which no more is known than the assessment, with the screens of its bank's place if the proposal describes it. */
     public static Report of(Assessment assessment) {
-        return new Report(assessment, Optional.empty(), List.of(), List.of(), Optional.empty());
+        return new Report(assessment, Optional.empty(), assessment.proposal().screens(), List.of(), Optional.empty());
     }
 
     public Report withSizes(SavingsBySize sizes) {

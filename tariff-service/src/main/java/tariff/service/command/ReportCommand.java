@@ -15,8 +15,9 @@ import tariff.bill.Billing;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
 import tariff.proposal.Assessment;
+import tariff.proposal.ClaimReview;
+import tariff.proposal.Offer;
 import tariff.proposal.Proposal;
-import tariff.proposal.SavingsBySize;
 import tariff.report.Report;
 
 /** Writes the report to hand over. */
@@ -44,27 +45,41 @@ final class ReportCommand implements Callable<Integer> {
             description = "where to write it; the standard output unless said")
     private Optional<Path> output;
 
+    @Option(
+            names = "--offer",
+            paramLabel = "FILE",
+            description = "an offer, in place of the bank; its claims are reviewed")
+    private Optional<Path> offer;
+
     @Option(names = "--date", paramLabel = "YYYY-MM-DD", description = "the day the report bears; none unless said")
     private Optional<LocalDate> date;
 
     @Override
     public Integer call() {
-        Proposal proposal = bank.proposal();
+        Optional<Offer> made = offer.map(Files::offer);
+        Proposal proposal = made.map(Offer::proposal).orElseGet(bank::proposal);
         Metered metered = meter.read(spec.commandLine().getErr());
-        Report plain = report(metered, proposal);
-        write(date.map(plain::dated).orElse(plain).html());
+        Report report = Report.of(assessment(metered, proposal)).withSizes(metered.savingsBySize());
+        Report reviewed = made.map(
+                        each -> report.withClaims(review(metered, each).claims()))
+                .orElse(report);
+        write(date.map(reviewed::dated).orElse(reviewed).html());
         return Exit.OK;
     }
 
-    private static Report report(Metered metered, Proposal proposal) {
+    private static Assessment assessment(Metered metered, Proposal proposal) {
         Billing billing = metered.billing();
-        Assessment assessment = metered.sums()
+        return metered.sums()
                 .map(sums -> Assessment.of(billing, sums, proposal))
-                .orElseGet(() -> Assessment.of(billing, metered.months(), proposal));
-        SavingsBySize sizes = metered.sums()
-                .map(sums -> SavingsBySize.of(billing, sums, SavingsBySize.USUAL_STEPS))
-                .orElseGet(() -> SavingsBySize.of(billing, metered.months(), SavingsBySize.USUAL_STEPS));
-        return Report.of(assessment.with(metered.assumptions())).withSizes(sizes);
+                .orElseGet(() -> Assessment.of(billing, metered.months(), proposal))
+                .with(metered.assumptions());
+    }
+
+    private static ClaimReview review(Metered metered, Offer made) {
+        Billing billing = metered.billing();
+        return metered.sums()
+                .map(sums -> ClaimReview.of(billing, sums, made))
+                .orElseGet(() -> ClaimReview.of(billing, metered.months(), made));
     }
 
     private void write(String html) {

@@ -75,4 +75,18 @@ class ReportCommandTest {
         assertThat(ran.exit).isEqualTo(Exit.UNUSABLE_FILE);
         assertThat(ran.err).isEqualTo(nowhere + ": cannot be written\n");
     }
+
+    @Test
+    void anOffersClaimsAndTheScreensOfItsPlaceStandInTheReport() {
+        String bills = Examples.path("examples/bills/pak-nam-bay.json").toString();
+        String rate = Examples.path("examples/rates/pak-nam-bay.json").toString();
+        String offer = Examples.path("examples/offers/pak-nam-drives.json").toString();
+        Ran ran = run("report", rate, bills, "--offer", offer);
+        assertThat(ran.err).isEmpty();
+        assertThat(ran.exit).isEqualTo(Exit.OK);
+        assertThat(ran.out)
+                .contains("this site must not get a plain bank")
+                .contains("parallel resonance")
+                .doesNotContain("Nothing was screened");
+    }
 }
