@@ -3,12 +3,15 @@ package tariff.service.http;
 
 import java.nio.charset.StandardCharsets;
 import java.time.LocalDate;
+import java.util.List;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import tariff.bill.Billing;
+import tariff.meter.MeteredMonth;
 import tariff.meter.MeteredSite;
 import tariff.proposal.Assessment;
-import tariff.proposal.Proposal;
+import tariff.proposal.ClaimReview;
+import tariff.proposal.Offer;
 import tariff.proposal.SavingsBySize;
 import tariff.rate.Rate;
 import tariff.report.Report;
@@ -23,12 +26,19 @@ record Reports(Shelf shelf) {
         Request request = new Request(document);
         Optional<Rate> rate = request.rate(shelf);
         Optional<MeteredSite> bills = request.bills();
-        Optional<Proposal> proposal = request.proposal();
+        Optional<Offer> offer =
+                request.claims() ? request.offer() : request.proposal().map(each -> Offer.of(each));
         Optional<LocalDate> date = request.date();
         request.refuseIfWrong();
         Billing billing = new Billing(rate.orElseThrow(), bills.orElseThrow().site());
-        Report report = Report.of(Assessment.of(billing, bills.orElseThrow().months(), proposal.orElseThrow()))
-                .withSizes(SavingsBySize.of(billing, bills.orElseThrow().months(), SavingsBySize.USUAL_STEPS));
+        List<MeteredMonth> months = bills.orElseThrow().months();
+        Report plain = Report.of(
+                        Assessment.of(billing, months, offer.orElseThrow().proposal()))
+                .withSizes(SavingsBySize.of(billing, months, SavingsBySize.USUAL_STEPS));
+        Report report = request.claims()
+                ? plain.withClaims(
+                        ClaimReview.of(billing, months, offer.orElseThrow()).claims())
+                : plain;
         return date.map(report::dated).orElse(report).html().getBytes(StandardCharsets.UTF_8);
     }
 }

@@ -155,6 +155,11 @@ public final class Request {
                 claims));
     }
 
+    /** Whether the document holds promises to review. */
+    public boolean claims() {
+        return written.has("claims");
+    }
+
     /** The bank and its network, which must be there; empty if one of the two cannot be read. */
     public Optional<Proposal> screened() {
         if (!written.has("network")) {

@@ -31,6 +31,18 @@ class ReportsTest extends Served {
     }
 
     @Test
+    void anOfferIsReviewedAndItsPlaceScreened() {
+        String page = json(Examples.text("examples/requests/review.json"))
+                .post("/reports")
+                .then()
+                .statusCode(200)
+                .extract()
+                .response()
+                .asString();
+        assertThat(page).contains("Each claim held against the rate").doesNotContain("No offer");
+    }
+
+    @Test
     void theSameQuestionGetsTheSameBytes() {
         byte[] first = json(BODY).post("/reports").asByteArray();
         assertThat(json(BODY).post("/reports").asByteArray()).isEqualTo(first);
