@@ -200,7 +200,7 @@ final class Reckoning implements Facts {
     @Override
     public List<SeasonShare> seasons() {
         if (seasons == null) {
-            seasons = SeasonShares.of(rate().definition(), month.period(), statementDate());
+            seasons = SeasonShares.of(rate(), month.period(), statementDate());
         }
         return seasons;
     }

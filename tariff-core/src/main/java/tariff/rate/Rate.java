@@ -2,6 +2,7 @@
 package tariff.rate;
 
 import java.math.BigDecimal;
+import java.time.LocalDate;
 import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
@@ -32,6 +33,7 @@ public final class Rate {
     private final RateSource source;
     private final Map<String, Line> lines;
     private final List<Clause> clauses;
+    private final SeasonCalendar seasons;
 
     private Rate(RateDefinition definition, RateSource source) {
         this.definition = definition;
@@ -42,6 +44,7 @@ public final class Rate {
         this.clauses = Stream.concat(definition.lines().stream(), definition.quantities().values().stream())
                 .flatMap(Clause::all)
                 .toList();
+        this.seasons = new SeasonCalendar(definition.seasons());
     }
 
     /**
@@ -51,6 +54,11 @@ public final class Rate {
      * @return everything that is wrong; or, if nothing is, the rate and everything that is doubtful
      */
     public static Checked check(@Nullable Object file) {
+        return check(file, true);
+    }
+
+    /** @param doubting whether to look for what is doubtful too, which takes longer than all the rest */
+    static Checked check(@Nullable Object file, boolean doubting) {
         Findings findings = new Findings();
         Written written = new Written(file, "", findings);
         if (!written.isObject()) {
@@ -58,9 +66,9 @@ public final class Rate {
             return new Checked(Optional.empty(), findings.list());
         }
         RateDefinition definition = RateDefinition.read(written);
-        RateCheck.check(definition, findings);
+        RateCheck.check(definition, findings, doubting);
         boolean usable = !findings.hasErrors();
-        if (usable) {
+        if (usable && doubting) {
             RateDoubts.check(definition, findings);
         }
         List<Finding> found = findings.list().stream()
@@ -149,6 +157,11 @@ public final class Rate {
                         .anyMatch(rule -> rule.registers().contains(register));
     }
 
+    /** The name of the season that a day lies in; the rate must define seasons. */
+    public String season(LocalDate day) {
+        return seasons.of(day);
+    }
+
     /** The hours of one of the rate's windows in a period; empty if the rate does not define it. */
     public Optional<BigDecimal> hours(Period period, String window) {
         return Optional.ofNullable(definition.windows().get(window)).map(each -> each.hours(period));
@@ -158,7 +171,8 @@ public final class Rate {
     public RateWords words() {
         return RateWords.of(
                 definition,
-                new Scope("", RateCheck.names(definition), List.copyOf(lines.keySet()), Set.of(), finding -> {}));
+                new Scope(
+                        "", RateCheck.names(definition), List.copyOf(lines.keySet()), Set.of(), finding -> {}, false));
     }
 
     /**

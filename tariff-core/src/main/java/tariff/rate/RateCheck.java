@@ -24,12 +24,12 @@ final class RateCheck {
 
     private RateCheck() {}
 
-    static void check(RateDefinition rate, Consumer<Finding> findings) {
+    static void check(RateDefinition rate, Consumer<Finding> findings, boolean doubting) {
         if (RateSize.isTooLarge(rate)) {
             findings.accept(RateSize.tooLarge());
             return;
         }
-        Scope top = new Scope("", names(rate), List.of(), Set.of(), findings);
+        Scope top = new Scope("", names(rate), List.of(), Set.of(), findings, doubting);
         rate.powerFactors()
                 .forEach((name, rule) -> rule.check(top.at("powerFactors").at(name)));
         seasons(rate, top.at("seasons"));

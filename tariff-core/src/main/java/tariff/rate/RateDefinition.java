@@ -95,7 +95,10 @@ public record RateDefinition(
     }
 
     private static ZoneId zone(Written in) {
-        String name = in.optionalText("timeZone").orElse("UTC");
+        if (!in.has("timeZone")) {
+            return ZoneOffset.UTC;
+        }
+        String name = in.text("timeZone");
         if (!ZoneId.getAvailableZoneIds().contains(name)) {
             in.at("timeZone")
                     .wrong("time-zone", "is not a time zone", "a name such as Europe/Berlin (IANA time zone database)");

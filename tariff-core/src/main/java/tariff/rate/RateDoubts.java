@@ -21,7 +21,7 @@ final class RateDoubts {
     private RateDoubts() {}
 
     static void check(RateDefinition rate, Consumer<Finding> findings) {
-        Scope top = new Scope("", RateCheck.names(rate), java.util.List.of(), Set.of(), findings);
+        Scope top = new Scope("", RateCheck.names(rate), java.util.List.of(), Set.of(), findings, true);
         linesThatAskNothing(rate, top.at("lines"));
         Set<Clause> clauses = Stream.concat(rate.lines().stream(), rate.quantities().values().stream())
                 .flatMap(Clause::all)

@@ -63,7 +63,7 @@ public record RateSource(Map<String, Object> tree) {
 
     /** The rate, if it is one. */
     public Optional<Rate> compiled() {
-        return Rate.check(tree).rate();
+        return Rate.check(tree, false).rate();
     }
 
     private static Object frozen(Object value) {

@@ -36,7 +36,9 @@ public sealed interface Schedule extends Clause permits Bands, RatioTo, Slopes {
         }
         checkKind(scope);
         limits().check(scope);
-        ScheduleDoubts.check(this, scope);
+        if (scope.doubting()) {
+            ScheduleDoubts.check(this, scope);
+        }
     }
 
     /** The value at a power factor, with floor, cap and rounding. */

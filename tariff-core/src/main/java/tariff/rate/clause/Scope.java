@@ -17,9 +17,15 @@ import tariff.notice.Finding;
  * @param lines the lines above, which percentages, floors and amounts may name
  * @param following names of quantities being looked into, to find one that is defined through itself
  * @param findings where findings go
+ * @param doubting whether it is also looked for what is allowed but may not be meant
  */
 public record Scope(
-        String pointer, Names names, List<String> lines, Set<String> following, Consumer<Finding> findings) {
+        String pointer,
+        Names names,
+        List<String> lines,
+        Set<String> following,
+        Consumer<Finding> findings,
+        boolean doubting) {
 
     /** What a rate defines by name. */
     public record Names(
@@ -30,7 +36,8 @@ public record Scope(
             Set<String> lines) {}
 
     public Scope at(String key) {
-        return new Scope(pointer + "/" + key.replace("~", "~0").replace("/", "~1"), names, lines, following, findings);
+        return new Scope(
+                pointer + "/" + key.replace("~", "~0").replace("/", "~1"), names, lines, following, findings, doubting);
     }
 
     public Scope at(int index) {
@@ -39,7 +46,7 @@ public record Scope(
 
     /** The same place, with other lines above. */
     public Scope withLines(List<String> above) {
-        return new Scope(pointer, names, above, following, findings);
+        return new Scope(pointer, names, above, following, findings, doubting);
     }
 
     public void error(String code, String message) {
@@ -86,12 +93,12 @@ public record Scope(
         }
         java.util.TreeSet<String> more = new java.util.TreeSet<>(following);
         more.add(name);
-        return Optional.of(new Scope(pointer, names, lines, more, findings));
+        return Optional.of(new Scope(pointer, names, lines, more, findings, doubting));
     }
 
     /** The same place, where findings have been made already and are not to be made again. */
     Scope silent() {
-        return new Scope(pointer, names, lines, following, finding -> {});
+        return new Scope(pointer, names, lines, following, finding -> {}, false);
     }
 
     static String unitWords(Unit unit) {
