@@ -96,7 +96,7 @@ public record RateDefinition(
 
     private static ZoneId zone(Written in) {
         if (!in.has("timeZone")) {
-            return ZoneOffset.UTC;
+            return ZoneId.of("UTC");
         }
         String name = in.text("timeZone");
         if (!ZoneId.getAvailableZoneIds().contains(name)) {
