@@ -192,9 +192,4 @@ public record Assessment(
                         : "payback needs a year of twelve months; "
                                 + today.months().size() + " are given");
     }
-
-    /** Every statement of the assessment, for whoever wants to look through them. */
-    public Stream<Statement> statements() {
-        return savings.values().stream().flatMap(each -> each.settledYear().stream());
-    }
 }

@@ -10,6 +10,7 @@ import tariff.meter.Period;
 import tariff.payback.Venture;
 import tariff.proposal.Assessment;
 import tariff.proposal.BankSavings;
+import tariff.proposal.ClaimReview;
 import tariff.proposal.Reviewed;
 import tariff.proposal.SavingsBySize;
 
@@ -36,6 +37,11 @@ public record Report(
     /** A report of which no more is known than the assessment, with the screens of its bank's place if the proposal describes it. */
     public static Report of(Assessment assessment) {
         return new Report(assessment, Optional.empty(), assessment.proposal().screens(), List.of(), Optional.empty());
+    }
+
+    /** A report of an offer: its assessment, and its claims one by one. */
+    public static Report of(ClaimReview review) {
+        return of(review.assessment()).withClaims(review.claims());
     }
 
     public Report withSizes(SavingsBySize sizes) {

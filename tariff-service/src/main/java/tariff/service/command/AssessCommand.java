@@ -10,7 +10,6 @@ import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
-import tariff.bill.Billing;
 import tariff.meter.MonthlySums;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
@@ -55,14 +54,9 @@ final class AssessCommand implements Callable<Integer> {
     public Integer call() {
         Proposal proposal = bank.proposal();
         Metered metered = meter.read(spec.commandLine().getErr());
-        Billing billing = metered.billing();
-        Assessment assessment = metered.sums()
-                .map(sums -> Assessment.of(billing, sums, proposal))
-                .orElseGet(() -> Assessment.of(billing, metered.months(), proposal));
+        Assessment assessment = metered.assessment(proposal);
         durationChart.ifPresent(file -> Files.write(file, curve(metered, proposal)));
-        format.print(
-                new AssessmentAnswer(assessment.with(metered.assumptions())),
-                spec.commandLine().getOut());
+        format.print(new AssessmentAnswer(assessment), spec.commandLine().getOut());
         Optional<BigDecimal> proposed = Optional.of(proposal.bank().ratedKvar());
         charts.write(
                 () -> ProposalCharts.documents(assessment, metered.savingsBySize(), proposed),

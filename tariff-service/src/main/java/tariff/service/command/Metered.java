@@ -8,6 +8,10 @@ import tariff.meter.MeteredMonth;
 import tariff.meter.MonthlySums;
 import tariff.meter.Site;
 import tariff.notice.Assumption;
+import tariff.proposal.Assessment;
+import tariff.proposal.ClaimReview;
+import tariff.proposal.Offer;
+import tariff.proposal.Proposal;
 import tariff.proposal.SavingsBySize;
 import tariff.rate.Rate;
 
@@ -25,6 +29,19 @@ record Metered(
 
     Billing billing() {
         return new Billing(rate, site);
+    }
+
+    /** The proposal held against the intervals if there are any, else against the months. */
+    Assessment assessment(Proposal proposal) {
+        return sums.map(intervals -> Assessment.of(billing(), intervals, proposal))
+                .orElseGet(() -> Assessment.of(billing(), months, proposal))
+                .with(assumptions);
+    }
+
+    ClaimReview review(Offer offer) {
+        ClaimReview review = sums.map(intervals -> ClaimReview.of(billing(), intervals, offer))
+                .orElseGet(() -> ClaimReview.of(billing(), months, offer));
+        return new ClaimReview(review.assessment().with(assumptions), review.claims());
     }
 
     SavingsBySize savingsBySize() {

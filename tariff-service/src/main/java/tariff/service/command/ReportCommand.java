@@ -11,11 +11,8 @@ import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
-import tariff.bill.Billing;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
-import tariff.proposal.Assessment;
-import tariff.proposal.ClaimReview;
 import tariff.proposal.Offer;
 import tariff.proposal.Proposal;
 import tariff.report.Report;
@@ -57,29 +54,14 @@ final class ReportCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         Optional<Offer> made = offer.map(Files::offer);
-        Proposal proposal = made.map(Offer::proposal).orElseGet(bank::proposal);
+        Optional<Proposal> proposed = made.isPresent() ? Optional.empty() : Optional.of(bank.proposal());
         Metered metered = meter.read(spec.commandLine().getErr());
-        Report report = Report.of(assessment(metered, proposal)).withSizes(metered.savingsBySize());
-        Report reviewed = made.map(
-                        each -> report.withClaims(review(metered, each).claims()))
-                .orElse(report);
-        write(date.map(reviewed::dated).orElse(reviewed).html());
+        Report report = made.map(each -> Report.of(metered.review(each)))
+                .or(() -> proposed.map(each -> Report.of(metered.assessment(each))))
+                .orElseThrow()
+                .withSizes(metered.savingsBySize());
+        write(date.map(report::dated).orElse(report).html());
         return Exit.OK;
-    }
-
-    private static Assessment assessment(Metered metered, Proposal proposal) {
-        Billing billing = metered.billing();
-        return metered.sums()
-                .map(sums -> Assessment.of(billing, sums, proposal))
-                .orElseGet(() -> Assessment.of(billing, metered.months(), proposal))
-                .with(metered.assumptions());
-    }
-
-    private static ClaimReview review(Metered metered, Offer made) {
-        Billing billing = metered.billing();
-        return metered.sums()
-                .map(sums -> ClaimReview.of(billing, sums, made))
-                .orElseGet(() -> ClaimReview.of(billing, metered.months(), made));
     }
 
     private void write(String html) {

@@ -10,10 +10,8 @@ import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
-import tariff.bill.Billing;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
-import tariff.proposal.ClaimReview;
 import tariff.proposal.Offer;
 
 /** Holds what an offer promises against the rate, the bills and physics. */
@@ -52,13 +50,7 @@ final class ReviewCommand implements Callable<Integer> {
         }
         Offer made = Files.offer(offer.or(() -> named).orElseThrow());
         Metered metered = meter.read(spec.commandLine().getErr());
-        Billing billing = metered.billing();
-        ClaimReview review = metered.sums()
-                .map(sums -> ClaimReview.of(billing, sums, made))
-                .orElseGet(() -> ClaimReview.of(billing, metered.months(), made));
-        format.print(
-                new ReviewAnswer(new ClaimReview(review.assessment().with(metered.assumptions()), review.claims())),
-                spec.commandLine().getOut());
+        format.print(new ReviewAnswer(metered.review(made)), spec.commandLine().getOut());
         return Exit.OK;
     }
 }

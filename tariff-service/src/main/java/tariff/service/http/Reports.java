@@ -32,13 +32,11 @@ record Reports(Shelf shelf) {
         request.refuseIfWrong();
         Billing billing = new Billing(rate.orElseThrow(), bills.orElseThrow().site());
         List<MeteredMonth> months = bills.orElseThrow().months();
-        Report plain = Report.of(
-                        Assessment.of(billing, months, offer.orElseThrow().proposal()))
+        Report report = (request.claims()
+                        ? Report.of(ClaimReview.of(billing, months, offer.orElseThrow()))
+                        : Report.of(Assessment.of(
+                                billing, months, offer.orElseThrow().proposal())))
                 .withSizes(SavingsBySize.of(billing, months, SavingsBySize.USUAL_STEPS));
-        Report report = request.claims()
-                ? plain.withClaims(
-                        ClaimReview.of(billing, months, offer.orElseThrow()).claims())
-                : plain;
         return date.map(report::dated).orElse(report).html().getBytes(StandardCharsets.UTF_8);
     }
 }
