@@ -34,12 +34,6 @@ final class Headers {
                 byWords(column, header);
             }
         }
-        if (!found.containsKey(Role.REACTIVE) && found.containsKey(Role.LAGGING) != found.containsKey(Role.LEADING)) {
-            Role only = found.containsKey(Role.LAGGING) ? Role.LAGGING : Role.LEADING;
-            if (only == Role.LAGGING) {
-                found.put(Role.REACTIVE, found.remove(Role.LAGGING));
-            }
-        }
         complete(headers);
         return found;
     }

@@ -21,11 +21,13 @@ import tariff.meter.IntervalSeries;
 import tariff.notice.Refusal;
 
 /**
- * Reads interval data as meters give them: separated text with a header, one row for each interval. What the file does not show
- * and the caller does not say is asked for in a finding, never guessed; what is odd is named with its row.
+ * Reads interval data as meters give them: separated text with a header, one row for each interval; or a feed in the XML of NAESB
+ * REQ.21 (Energy Services Provider Interface). What the file does not show and the caller does not say is asked for in a finding, never
+ * guessed; what is odd is named with its row, which in a feed is the line of the file.
  */
 public final class IntervalFile {
     private static final int SAMPLE = 60;
+    private static final int LOOK = 64;
     private static final long ROWS_BETWEEN_NEWS = 100_000;
 
     private IntervalFile() {}
@@ -43,18 +45,42 @@ public final class IntervalFile {
     }
 
     /**
-     * Reads bytes as they come, without holding them: UTF-8, or UTF-16 with a byte order mark. The caller closes the stream.
+     * Reads bytes as they come, without holding them: UTF-8, or UTF-16 with a byte order mark; XML as it declares. The caller closes the
+     * stream.
      *
      * @throws Refusal with everything that is wrong with the file
      * @throws IOException if it cannot be read at all
      */
     public static IntervalReading read(InputStream file, IntervalFileOptions options) throws IOException {
         BufferedInputStream bytes = new BufferedInputStream(file, 1 << 16);
+        if (isMarkup(bytes)) {
+            return feed(bytes, options);
+        }
         bytes.mark(2);
         int mark = bytes.read() << 8 | bytes.read();
         bytes.reset();
         Charset charset = mark == 0xFEFF || mark == 0xFFFE ? StandardCharsets.UTF_16 : StandardCharsets.UTF_8;
         return read(new InputStreamReader(bytes, charset), options);
+    }
+
+    /** Whether the first sign after a byte order mark and blanks, in whatever encoding, is {@code <}. */
+    private static boolean isMarkup(BufferedInputStream bytes) throws IOException {
+        bytes.mark(LOOK);
+        int read = 0;
+        int sign = bytes.read();
+        while (++read < LOOK
+                && (sign == 0xEF || sign == 0xBB || sign == 0xBF || sign >= 0xFE || (sign >= 0 && sign <= ' '))) {
+            sign = bytes.read();
+        }
+        bytes.reset();
+        return sign == '<';
+    }
+
+    private static IntervalReading feed(InputStream file, IntervalFileOptions options) throws IOException {
+        Notices notices = new Notices(options.listed());
+        EspiFeed feed = EspiFeed.read(file, notices, options.progress());
+        notices.refuseIfWrong();
+        return reading(new EspiRows(feed, options, notices).understood(), options, notices);
     }
 
     /**
@@ -75,9 +101,15 @@ public final class IntervalFile {
         }
         notices.refuseIfWrong();
         Timeline time = new Clockwork(raw, options, notices).timeline(layout.stampAt());
+        return reading(new Understood(layout.figures(), raw, time), options, notices);
+    }
+
+    private static IntervalReading reading(Understood file, IntervalFileOptions options, Notices notices) {
+        RawColumns raw = file.rows();
+        Timeline time = file.time();
         Grid grid = new Grid(raw, time, notices);
         grid.place();
-        Energies energies = new Registers(grid, layout, options, notices, time.stepMinutes()).energies();
+        Energies energies = new Registers(grid, file.figures(), options, notices, time.stepMinutes()).energies();
         IntervalSeries series = series(energies, time, grid, options, notices);
         if (raw.rounded() > 0) {
             notices.assume(

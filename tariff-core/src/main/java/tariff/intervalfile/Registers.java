@@ -14,15 +14,15 @@ final class Registers {
     private static final int LEAST_FOR_COUNTER = 96;
 
     private final Grid grid;
-    private final Layout layout;
+    private final Map<Role, Layout.Figures> columns;
     private final IntervalFileOptions options;
     private final Notices notices;
     private final int step;
     private final Map<Role, long[]> figures;
 
-    Registers(Grid grid, Layout layout, IntervalFileOptions options, Notices notices, int step) {
+    Registers(Grid grid, Map<Role, Layout.Figures> columns, IntervalFileOptions options, Notices notices, int step) {
         this.grid = grid;
-        this.layout = layout;
+        this.columns = columns;
         this.options = options;
         this.notices = notices;
         this.step = step;
@@ -31,7 +31,7 @@ final class Registers {
 
     /** @throws tariff.notice.Refusal if a sign or a counter cannot be understood */
     Energies energies() {
-        layout.figures().forEach((role, each) -> {
+        columns.forEach((role, each) -> {
             long[] values = values(role);
             if (each.isPower()) {
                 toEnergy(values);
@@ -47,8 +47,8 @@ final class Registers {
         Optional<long[]> exported = exported(active);
         long[] lagging;
         long[] leading;
-        if (figures.containsKey(Role.REACTIVE)) {
-            lagging = values(Role.REACTIVE);
+        if (!figures.containsKey(Role.LEADING)) {
+            lagging = values(figures.containsKey(Role.REACTIVE) ? Role.REACTIVE : Role.LAGGING);
             leading = split(lagging);
             reactiveInOneColumn(leading);
         } else {

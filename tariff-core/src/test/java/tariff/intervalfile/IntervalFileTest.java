@@ -314,7 +314,7 @@ class IntervalFileTest {
                 .toList();
     }
 
-    private static void assertSame(IntervalSeries read, IntervalSeries written) {
+    static void assertSame(IntervalSeries read, IntervalSeries written) {
         assertThat(read.start()).isEqualTo(written.start());
         assertThat(read.stepMinutes()).isEqualTo(written.stepMinutes());
         assertThat(read.size()).isEqualTo(written.size());

@@ -49,7 +49,10 @@ final class MeterFile {
             description = "the months: a JSON file with the site, or a table as a spreadsheet exports it")
     private Optional<Path> bills;
 
-    @Option(names = "--intervals", paramLabel = "FILE", description = "interval data in place of BILLS, a table")
+    @Option(
+            names = "--intervals",
+            paramLabel = "FILE",
+            description = "interval data in place of BILLS: a table, or a feed of NAESB REQ.21 in XML")
     private Optional<Path> intervals;
 
     @Option(names = "--site", paramLabel = "NAME", description = "what the site is called")

@@ -5,6 +5,7 @@ import io.javalin.http.Context;
 import io.javalin.http.Handler;
 import java.io.IOException;
 import java.util.Locale;
+import java.util.Set;
 import java.util.concurrent.Semaphore;
 import tariff.intervalfile.IntervalFile;
 import tariff.intervalfile.IntervalFileOptions;
@@ -18,7 +19,7 @@ import tariff.service.request.IntervalRequest;
  * once; who comes while all places are taken is told so at once, and holds no thread.
  */
 final class Uploads {
-    static final String CSV = "text/csv";
+    static final Set<String> TYPES = Set.of("text/csv", "application/atom+xml", "application/xml");
     static final int AT_ONCE = 2;
     private static final String RETRY_SECONDS = "5";
 
@@ -43,7 +44,7 @@ final class Uploads {
     Handler of(Question question) {
         return ctx -> {
             Accepts.require(ctx, Exchange.JSON);
-            requireCsv(ctx);
+            requireType(ctx);
             if (ctx.req().getContentLengthLong() > mostBytes) {
                 throw tooLong();
             }
@@ -62,11 +63,13 @@ final class Uploads {
         };
     }
 
-    private static void requireCsv(Context ctx) {
+    private static void requireType(Context ctx) {
         String type = ctx.req().getContentType();
-        if (type == null
-                || !type.split(";", 2)[0].strip().toLowerCase(Locale.ROOT).equals(CSV)) {
-            throw new Problem(415, "The body must be text/csv" + (type == null ? "; the request says no type." : "."));
+        if (type == null || !TYPES.contains(type.split(";", 2)[0].strip().toLowerCase(Locale.ROOT))) {
+            throw new Problem(
+                    415,
+                    "The body must be text/csv, or application/atom+xml for a feed of NAESB REQ.21"
+                            + (type == null ? "; the request says no type." : "."));
         }
     }
 

@@ -11,12 +11,14 @@ import io.restassured.response.ValidatableResponse;
 import java.io.IOException;
 import java.net.Socket;
 import java.nio.charset.StandardCharsets;
+import java.time.ZonedDateTime;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.ValueSource;
 import tariff.service.shelf.Shelf;
 
 /** Interval data in the body, everything else in the query. */
@@ -51,6 +53,44 @@ class UploadTest extends Served {
                 .body("statements[0].lines[2].amount", equalTo(49.61f))
                 .body("statements[0].lines[2].derivation.how", equalTo("180 kWh × 0.2756"))
                 .body("warnings", hasSize(0));
+    }
+
+    /** The same day as a feed of NAESB REQ.21, in Wh and VArh. */
+    @ParameterizedTest
+    @ValueSource(strings = {"application/atom+xml", "application/xml"})
+    void aFeedOfTheStandardIsBilledLikeTheTable(String type) {
+        given().header("Content-Type", type)
+                .queryParams(Map.of("rate", HOURLY, "zone", ZONE))
+                .body(feedOfTheDay().getBytes(StandardCharsets.UTF_8))
+                .post("/interval-statements")
+                .then()
+                .statusCode(200)
+                .body("statements[0].lines[2].amount", equalTo(49.61f))
+                .body("warnings", hasSize(0));
+    }
+
+    private static String feedOfTheDay() {
+        long midnight = ZonedDateTime.parse("2026-03-02T00:00-03:00").toEpochSecond();
+        StringBuilder feed = new StringBuilder("<feed xmlns=\"http://www.w3.org/2005/Atom\">");
+        feed.append(channel("1", 72, 1)).append(channel("2", 73, 2));
+        for (int hour = 0; hour < 24; hour++) {
+            feed.append(block("1", midnight + 3600L * hour, 100_000));
+            feed.append(block("2", midnight + 3600L * hour, hour < 12 ? 75_000 : 10_000));
+        }
+        return feed.append("</feed>").toString();
+    }
+
+    private static String channel(String number, int unit, int flow) {
+        return "<entry><link rel='self' href='MeterReading/%1$s'/><link rel='related' href='ReadingType/%1$s'/><content><MeterReading/></content></entry>"
+                        .formatted(number)
+                + "<entry><link rel='self' href='ReadingType/%s'/><content><ReadingType><flowDirection>%d</flowDirection><uom>%d</uom></ReadingType></content></entry>"
+                        .formatted(number, flow, unit);
+    }
+
+    private static String block(String number, long start, long value) {
+        return ("<entry><link rel='up' href='MeterReading/%s'/><content><IntervalBlock><IntervalReading><timePeriod>"
+                        + "<duration>3600</duration><start>%d</start></timePeriod><value>%d</value></IntervalReading></IntervalBlock></content></entry>")
+                .formatted(number, start, value);
     }
 
     /** 50 kvar always on: 25 kvarh are left in twelve hours and 40 sent back in twelve; 12 × 40 = 480; own arithmetic. */
@@ -97,7 +137,7 @@ class UploadTest extends Served {
                 .statusCode(422)
                 .body("detail", equalTo("The interval data cannot be used; see findings."))
                 .body("findings[0].where", equalTo("row 7"))
-                .body("findings[0].message", equalTo("\"7x5\" is not a figure of kvarh"));
+                .body("findings[0].message", equalTo("\"7x5\" is not a figure of lagging kvarh"));
     }
 
     @Test
@@ -115,7 +155,9 @@ class UploadTest extends Served {
                 .post("/interval-statements?rate=" + HOURLY)
                 .then()
                 .statusCode(415)
-                .body("detail", equalTo("The body must be text/csv."));
+                .body(
+                        "detail",
+                        equalTo("The body must be text/csv, or application/atom+xml for a feed of NAESB REQ.21."));
     }
 
     @Test
