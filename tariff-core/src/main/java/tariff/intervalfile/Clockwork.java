@@ -93,7 +93,8 @@ final class Clockwork {
     private Optional<ZoneId> zone() {
         int with = 0;
         boolean same = true;
-        for (long stamp : rows.stamps()) {
+        for (int i = 0; i < rows.count(); i++) {
+            long stamp = rows.stamps()[i];
             with += Stamp.hasOffset(stamp) ? 1 : 0;
             same &= Stamp.offsetMinutes(stamp) == Stamp.offsetMinutes(rows.stamps()[0]);
         }
@@ -115,7 +116,7 @@ final class Clockwork {
         int first = 0;
         int perDay = DAY / step;
         for (int i = 1; i < locals.length; i++) {
-            boolean endsDay = Math.floorMod(locals[i], DAY) == 0 && locals[i] == locals[i - 1] + step - DAY;
+            boolean endsDay = locals[i] == locals[i - 1] + step - DAY && Math.floorMod(locals[i], DAY) == 0;
             boolean goesOn = i + 1 < locals.length
                     ? locals[i + 1] == locals[i] + DAY + step
                     : i < perDay - 1 || locals[i - perDay + 1] != locals[i];

@@ -13,6 +13,10 @@ final class Decimals {
     private static final long LARGEST = 1L << 50;
     private static final long[] POWERS =
             LongStream.iterate(1, power -> 10 * power).limit(19).toArray();
+    /** The most that may still be multiplied by each of the powers. */
+    private static final long[] MOST =
+            LongStream.of(POWERS).map(power -> LARGEST / power).toArray();
+
     private static final Pattern EXPONENT = Pattern.compile("[+-]?\\d{1,20}(\\.\\d{0,20})?([eE][+-]?\\d{1,2})?");
     private static final Pattern POINT = Pattern.compile("[+-]?\\d{1,3}([,'\\h]\\d{3})+(\\.\\d+)?");
     private static final Pattern COMMA = Pattern.compile("[+-]?\\d{1,3}([.'\\h]\\d{3})+(,\\d+)?");
@@ -65,7 +69,7 @@ final class Decimals {
             return general(new String(text, at, end - at), scale);
         }
         long power = POWERS[scale - decimals];
-        if (value > LARGEST / power) {
+        if (value > MOST[scale - decimals]) {
             return UNREADABLE;
         }
         return negative ? -value * power : value * power;

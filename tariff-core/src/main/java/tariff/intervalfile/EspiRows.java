@@ -57,7 +57,7 @@ final class EspiRows {
             columns.put(role, column(channel, starts, lines));
         });
         notices.refuseIfWrong();
-        RawColumns rows = new RawColumns(new long[starts.length], lines, columns, rounded);
+        RawColumns rows = new RawColumns(starts.length, new long[starts.length], lines, columns, rounded);
         return new Understood(figures, rows, timeline(starts, step, zone.orElseThrow()));
     }
 

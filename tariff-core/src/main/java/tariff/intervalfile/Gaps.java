@@ -67,7 +67,7 @@ final class Gaps {
     }
 
     private static long[] kept(long[] values, int from) {
-        return Arrays.copyOfRange(values, from, values.length);
+        return from == 0 ? values : Arrays.copyOfRange(values, from, values.length);
     }
 
     private void fill(int from, int to) {

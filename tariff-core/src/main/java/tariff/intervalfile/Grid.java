@@ -26,6 +26,29 @@ final class Grid {
     /** @throws tariff.notice.Refusal if rows contradict each other or do not stand at the step */
     void place() {
         allocate();
+        boolean inPlace = isInPlace();
+        if (!inPlace) {
+            placeRows();
+            notices.refuseIfWrong();
+        }
+        rows.figures()
+                .forEach((role, values) ->
+                        figures.put(role, inPlace ? Arrays.copyOf(values, rowOf.length) : placed(values)));
+    }
+
+    /** Whether the rows stand in the file as they do in time, as most do. */
+    private boolean isInPlace() {
+        for (int row = 0; row < rows.count(); row++) {
+            if (time.starts()[row] != first + (long) row * time.stepMinutes()) {
+                Arrays.fill(rowOf, -1);
+                return false;
+            }
+            rowOf[row] = row;
+        }
+        return true;
+    }
+
+    private void placeRows() {
         long latest = Long.MIN_VALUE;
         int offStepRun = 0;
         long difference = 0;
@@ -43,7 +66,8 @@ final class Grid {
                             "from here on rows are " + now + " minutes apart instead of " + time.stepMinutes());
                 }
             }
-            if ((start - first) % time.stepMinutes() != 0) {
+            long slot = (start - first) / time.stepMinutes();
+            if (first + slot * time.stepMinutes() != start) {
                 notices.error(
                         "off-step",
                         where(row),
@@ -54,10 +78,8 @@ final class Grid {
                 notices.warning("out-of-order", where(row), "stands after a later row; put in its place by its stamp");
             }
             latest = Math.max(latest, start);
-            place(row, (int) ((start - first) / time.stepMinutes()));
+            place(row, (int) slot);
         }
-        notices.refuseIfWrong();
-        rows.figures().forEach((role, values) -> figures.put(role, placed(values)));
     }
 
     private void allocate() {
@@ -78,7 +100,6 @@ final class Grid {
             notices.refuseIfWrong();
         }
         rowOf = new int[(int) places];
-        Arrays.fill(rowOf, -1);
     }
 
     private void place(int row, int slot) {

@@ -4,14 +4,13 @@ package tariff.intervalfile;
 import de.siegmar.fastcsv.reader.CsvParseException;
 import de.siegmar.fastcsv.reader.CsvReader;
 import de.siegmar.fastcsv.reader.FieldMismatchStrategy;
-import java.io.BufferedInputStream;
-import java.io.BufferedReader;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.InputStreamReader;
+import java.io.PushbackInputStream;
+import java.io.PushbackReader;
 import java.io.Reader;
 import java.io.UncheckedIOException;
-import java.nio.charset.Charset;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -28,6 +27,7 @@ import tariff.notice.Refusal;
 public final class IntervalFile {
     private static final int SAMPLE = 60;
     private static final int LOOK = 64;
+    private static final String BYTE_ORDER_MARKS = "\u00EF\u00BB\u00BF\u00FE\u00FF";
     private static final long ROWS_BETWEEN_NEWS = 100_000;
 
     private IntervalFile() {}
@@ -52,28 +52,29 @@ public final class IntervalFile {
      * @throws IOException if it cannot be read at all
      */
     public static IntervalReading read(InputStream file, IntervalFileOptions options) throws IOException {
-        BufferedInputStream bytes = new BufferedInputStream(file, 1 << 16);
-        if (isMarkup(bytes)) {
+        PushbackInputStream bytes = new PushbackInputStream(file, LOOK);
+        byte[] head = bytes.readNBytes(LOOK);
+        bytes.unread(head);
+        if (isMarkup(head)) {
             return feed(bytes, options);
         }
-        bytes.mark(2);
-        int mark = bytes.read() << 8 | bytes.read();
-        bytes.reset();
-        Charset charset = mark == 0xFEFF || mark == 0xFFFE ? StandardCharsets.UTF_16 : StandardCharsets.UTF_8;
-        return read(new InputStreamReader(bytes, charset), options);
+        boolean wide = startsWith(head, 0xFE, 0xFF) || startsWith(head, 0xFF, 0xFE);
+        return read(new InputStreamReader(bytes, wide ? StandardCharsets.UTF_16 : StandardCharsets.UTF_8), options);
     }
 
     /** Whether the first sign after a byte order mark and blanks, in whatever encoding, is {@code <}. */
-    private static boolean isMarkup(BufferedInputStream bytes) throws IOException {
-        bytes.mark(LOOK);
-        int read = 0;
-        int sign = bytes.read();
-        while (++read < LOOK
-                && (sign == 0xEF || sign == 0xBB || sign == 0xBF || sign >= 0xFE || (sign >= 0 && sign <= ' '))) {
-            sign = bytes.read();
+    private static boolean isMarkup(byte[] head) {
+        for (byte sign : head) {
+            int code = sign & 0xFF;
+            if (code > ' ' && BYTE_ORDER_MARKS.indexOf(code) < 0) {
+                return code == '<';
+            }
         }
-        bytes.reset();
-        return sign == '<';
+        return false;
+    }
+
+    private static boolean startsWith(byte[] head, int first, int second) {
+        return head.length > 1 && (head[0] & 0xFF) == first && (head[1] & 0xFF) == second;
     }
 
     private static IntervalReading feed(InputStream file, IntervalFileOptions options) throws IOException {
@@ -92,9 +93,9 @@ public final class IntervalFile {
     public static IntervalReading read(Reader text, IntervalFileOptions options) throws IOException {
         Notices notices = new Notices(options.listed());
         Rows rows = new Rows(notices);
-        BufferedReader buffered = new BufferedReader(text, 1 << 16);
-        char separator = Separators.recognise(buffered);
-        Layout layout = walk(buffered, separator, rows, options, notices);
+        PushbackReader ahead = new PushbackReader(text, Separators.LOOK);
+        char separator = Separators.recognise(ahead);
+        Layout layout = walk(ahead, separator, rows, options, notices);
         RawColumns raw = rows.columns();
         if (raw.count() == 0) {
             notices.error("no-rows", "", "no row could be read");

@@ -3,12 +3,14 @@ package tariff.intervalfile;
 
 import java.util.Map;
 
-/** The rows of a file in whole numbers, in the order of the file. */
+/**
+ * The rows of a file in whole numbers, in the order of the file.
+ *
+ * @param count how many there are; the arrays may have room for more
+ * @param rounded figures that had more decimals than are kept
+ */
 @SuppressWarnings("ArrayRecordComponent")
-record RawColumns(long[] stamps, int[] lines, Map<Role, long[]> figures, long rounded) {
-    int count() {
-        return stamps.length;
-    }
+record RawColumns(int count, long[] stamps, int[] lines, Map<Role, long[]> figures, long rounded) {
 
     /** Turns a file that has its newest row first. */
     void reverse() {

@@ -38,8 +38,6 @@ final class Rows extends AbstractBaseCsvCallbackHandler<Boolean> {
     private boolean unusable;
     private long date;
     private long time;
-    private long[] current = {};
-
     private int count;
     private long[] stamps = new long[ROOM];
     private int[] lines = new int[ROOM];
@@ -66,7 +64,6 @@ final class Rows extends AbstractBaseCsvCallbackHandler<Boolean> {
         Arrays.fill(roles, IGNORED);
         kept = List.copyOf(known.figures().keySet());
         scales = new int[kept.size()];
-        current = new long[kept.size()];
         columns = new long[kept.size()][stamps.length];
         known.figures().forEach((role, each) -> {
             roles[each.column()] = kept.indexOf(role);
@@ -119,7 +116,20 @@ final class Rows extends AbstractBaseCsvCallbackHandler<Boolean> {
         unusable = false;
         date = Stamp.UNREADABLE;
         time = Stamp.UNREADABLE;
-        Arrays.fill(current, Decimals.EMPTY);
+        if (count == stamps.length) {
+            grow(count + (count >> 1));
+        }
+        for (long[] each : columns) {
+            each[count] = Decimals.EMPTY;
+        }
+    }
+
+    private void grow(int room) {
+        stamps = Arrays.copyOf(stamps, room);
+        lines = Arrays.copyOf(lines, room);
+        for (int each = 0; each < columns.length; each++) {
+            columns[each] = Arrays.copyOf(columns[each], room);
+        }
     }
 
     private void take(int column, char[] text, int offset, int length) {
@@ -127,29 +137,31 @@ final class Rows extends AbstractBaseCsvCallbackHandler<Boolean> {
         int role = column < roles.length ? roles[column] : IGNORED;
         if (role >= 0) {
             long value = decimals.read(text, offset, length, scales[role]);
-            if (value == Decimals.UNREADABLE) {
-                notices.error(
-                        "figure",
-                        "row " + line,
-                        Texts.quoted(new String(text, offset, length)) + " is not a figure of "
-                                + kept.get(role).words());
-                value = Decimals.EMPTY;
-            }
-            current[role] = value;
-        } else if (role != IGNORED) {
-            long stamp = Stamp.read(text, offset, length);
-            if (stamp == Stamp.UNREADABLE
-                    || (role == TIME && Stamp.hasDate(stamp))
-                    || (role == STAMP && !Stamp.hasDate(stamp))) {
-                if (length > 0) {
-                    String found = Texts.quoted(new String(text, offset, length));
-                    notices.error("stamp", "row " + line, found + " is not a date and time on a whole minute");
-                    unusable = true;
-                }
-                return;
-            }
-            date = role == STAMP ? stamp : date;
-            time = role == TIME ? stamp : time;
+            columns[role][count] =
+                    value == Decimals.UNREADABLE ? noFigure(role, new String(text, offset, length)) : value;
+        } else if (role != IGNORED && length > 0) {
+            takeStamp(role, text, offset, length);
+        }
+    }
+
+    private long noFigure(int role, String text) {
+        notices.error(
+                "figure",
+                "row " + line,
+                Texts.quoted(text) + " is not a figure of " + kept.get(role).words());
+        return Decimals.EMPTY;
+    }
+
+    private void takeStamp(int role, char[] text, int offset, int length) {
+        long stamp = Stamp.read(text, offset, length);
+        if (stamp == Stamp.UNREADABLE || Stamp.hasDate(stamp) != (role == STAMP)) {
+            String found = Texts.quoted(new String(text, offset, length));
+            notices.error("stamp", "row " + line, found + " is not a date and time on a whole minute");
+            unusable = true;
+        } else if (role == STAMP) {
+            date = stamp;
+        } else {
+            time = stamp;
         }
     }
 
@@ -162,28 +174,16 @@ final class Rows extends AbstractBaseCsvCallbackHandler<Boolean> {
             notices.error("stamp", "row " + line, "has no date and time");
             return;
         }
-        if (count == stamps.length) {
-            int more = count + (count >> 1);
-            stamps = Arrays.copyOf(stamps, more);
-            lines = Arrays.copyOf(lines, more);
-            for (int each = 0; each < columns.length; each++) {
-                columns[each] = Arrays.copyOf(columns[each], more);
-            }
-        }
         stamps[count] = split ? Stamp.join(date, time) : date;
-        lines[count] = line;
-        for (int each = 0; each < current.length; each++) {
-            columns[each][count] = current[each];
-        }
-        count++;
+        lines[count++] = line;
     }
 
-    /** What was read, cut to its length. */
+    /** What was read. */
     RawColumns columns() {
         Map<Role, long[]> figures = new EnumMap<>(Role.class);
         for (int each = 0; each < columns.length; each++) {
-            figures.put(kept.get(each), Arrays.copyOf(columns[each], count));
+            figures.put(kept.get(each), columns[each]);
         }
-        return new RawColumns(Arrays.copyOf(stamps, count), Arrays.copyOf(lines, count), figures, decimals.rounded());
+        return new RawColumns(count, stamps, lines, figures, decimals.rounded());
     }
 }

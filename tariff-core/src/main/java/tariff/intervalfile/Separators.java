@@ -1,30 +1,26 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.intervalfile;
 
-import java.io.BufferedReader;
 import java.io.IOException;
+import java.io.PushbackReader;
 
 /** Recognises what stands between columns, from the beginning of the text. */
 final class Separators {
-    private static final int LOOK = 16_384;
+    static final int LOOK = 16_384;
     private static final String CANDIDATES = ";\t|,";
 
     private Separators() {}
 
     /** Takes a byte order mark away, looks ahead, and leaves the reader where the text begins. */
-    static char recognise(BufferedReader reader) throws IOException {
-        reader.mark(2);
-        if (reader.read() != '\uFEFF') {
-            reader.reset();
-        }
-        reader.mark(LOOK + 1);
+    static char recognise(PushbackReader reader) throws IOException {
         char[] head = new char[LOOK];
         int length = 0;
         int read = 0;
         while (length < LOOK && (read = reader.read(head, length, LOOK - length)) > 0) {
             length += read;
         }
-        reader.reset();
+        int from = length > 0 && head[0] == '\uFEFF' ? 1 : 0;
+        reader.unread(head, from, length - from);
         char best = ',';
         int most = 0;
         for (int i = 0; i < CANDIDATES.length(); i++) {
