@@ -2,7 +2,6 @@
 package tariff.correction;
 
 import java.math.BigDecimal;
-import java.math.RoundingMode;
 import org.hipparchus.analysis.solvers.BrentSolver;
 
 /**
@@ -17,28 +16,32 @@ import org.hipparchus.analysis.solvers.BrentSolver;
  *
  * <p>Own derivation. On two open data sets (a small steel plant's year, UCI 851; a commercial customer's year, SimBench G0) the first came
  * out low and the second high at small banks, their mean within 19 %. It is an estimate, not a promise.
+ *
+ * @param mean m, kvar
+ * @param peak M, kvar
+ * @param hours T
+ * @param shape λM of the truncated exponential
  */
-final class LoadCurve {
-    private static final int DECIMALS = 3;
+record LoadCurve(double mean, double peak, double hours, double shape) {
 
-    private LoadCurve() {}
-
-    /** R in kvarh, to 3 decimals; {@code peakKvar} at least the mean. */
-    static BigDecimal left(BigDecimal laggingKvarh, BigDecimal hours, BigDecimal peakKvar, BigDecimal bankKvar) {
-        double total = laggingKvarh.doubleValue();
+    /** @param peakKvar at least the mean */
+    static LoadCurve of(BigDecimal laggingKvarh, BigDecimal hours, BigDecimal peakKvar) {
         double time = hours.doubleValue();
+        double mean = laggingKvarh.doubleValue() / time;
         double peak = peakKvar.doubleValue();
-        double bank = bankKvar.doubleValue();
-        if (total <= 0 || bank >= peak) {
-            return BigDecimal.ZERO;
+        return new LoadCurve(mean, peak, time, mean > 0 ? shape(mean / peak) : 0);
+    }
+
+    /** R in kvarh. */
+    double left(double bankKvar) {
+        if (mean <= 0 || bankKvar >= peak) {
+            return 0;
         }
-        double mean = total / time;
-        double left = (powerCurve(mean, peak, time, bank) + total - exponentialRemoved(mean, peak, time, bank)) / 2;
-        return BigDecimal.valueOf(Math.max(0, left)).setScale(DECIMALS, RoundingMode.HALF_UP);
+        return Math.max(0, (powerCurve(bankKvar) + mean * hours - exponentialRemoved(bankKvar)) / 2);
     }
 
     /** Kvarh left under the power curve. */
-    static double powerCurve(double mean, double peak, double hours, double bank) {
+    double powerCurve(double bank) {
         double k = peak / mean - 1;
         if (k < 1e-9) {
             return hours * (mean - Math.min(mean, bank));
@@ -49,8 +52,7 @@ final class LoadCurve {
     }
 
     /** Kvarh removed under the truncated exponential. */
-    static double exponentialRemoved(double mean, double peak, double hours, double bank) {
-        double shape = shape(mean / peak);
+    double exponentialRemoved(double bank) {
         double x = bank / peak;
         if (Math.abs(shape) < 1e-6) {
             return hours * peak * (x - x * x / 2);

@@ -2,6 +2,7 @@
 package tariff.correction;
 
 import java.math.BigDecimal;
+import java.math.RoundingMode;
 import java.util.Optional;
 import tariff.meter.Triangle;
 
@@ -23,6 +24,7 @@ record ReactiveMonth(
         BigDecimal hours,
         Optional<BigDecimal> highestKvar,
         Optional<BigDecimal> likelyPeakKvar) {
+    private static final int DECIMALS = 3;
 
     /** R, the lagging kvarh that a constant bank leaves. */
     BigDecimal left(BigDecimal bankKvar, Estimate estimate) {
@@ -52,8 +54,13 @@ record ReactiveMonth(
     }
 
     private BigDecimal central(BigDecimal bankKvar) {
+        return BigDecimal.valueOf(curve().left(bankKvar.doubleValue())).setScale(DECIMALS, RoundingMode.HALF_UP);
+    }
+
+    /** The load curve that the central case assumes. */
+    LoadCurve curve() {
         BigDecimal peak = likelyPeakKvar.or(() -> highestKvar).orElse(meanKvar().add(meanKvar()));
-        return LoadCurve.left(laggingKvarh, hours, peak.max(meanKvar()), bankKvar);
+        return LoadCurve.of(laggingKvarh, hours, peak.max(meanKvar()));
     }
 
     private BigDecimal meanKvar() {

@@ -45,7 +45,7 @@ class ReactiveMonthTest {
     @ParameterizedTest
     @CsvSource({"150000, 730, 450, 200, 44133.22", "120000, 720, 300, 150, 32181.51"})
     void thePowerCurveAgreesWithItsQuadrature(double kvarh, double hours, double peak, double bank, double left) {
-        assertThat(LoadCurve.powerCurve(kvarh / hours, peak, hours, bank)).isCloseTo(left, within(0.01));
+        assertThat(curve(kvarh / hours, peak, hours).powerCurve(bank)).isCloseTo(left, within(0.01));
     }
 
     /** Removed kvarh = ∫ min(q, c) over the density, by the midpoint rule on 200,000 strips. */
@@ -62,7 +62,11 @@ class ReactiveMonthTest {
             sum += Math.min(q, bank) * density;
             weight += density;
         }
-        assertThat(LoadCurve.exponentialRemoved(mean, peak, hours, bank)).isCloseTo(hours * sum / weight, within(0.05));
+        assertThat(curve(mean, peak, hours).exponentialRemoved(bank)).isCloseTo(hours * sum / weight, within(0.05));
+    }
+
+    private static LoadCurve curve(double mean, double peak, double hours) {
+        return LoadCurve.of(BigDecimal.valueOf(mean * hours), BigDecimal.valueOf(hours), BigDecimal.valueOf(peak));
     }
 
     private static double shapeByBisection(double share) {
