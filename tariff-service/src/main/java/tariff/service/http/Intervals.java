@@ -33,7 +33,7 @@ record Intervals(Shelf shelf) {
         IntervalReading read = data.read(terms.file());
         MonthlySums sums = terms.sums(read.series(), rate.orElseThrow());
         Billing billing = new Billing(rate.orElseThrow(), site);
-        List<Statement> statements = billing.statements(sums.calendarMonths());
+        List<Statement> statements = billing.statements(sums.months());
         List<Assumption> assumptions = new ArrayList<>(read.assumptions());
         ByTheTotals.note(billing, statements).ifPresent(assumptions::add);
         JsonObject answer =
