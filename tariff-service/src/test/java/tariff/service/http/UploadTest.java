@@ -42,6 +42,16 @@ class UploadTest extends Served {
         return rows.toString();
     }
 
+    /** A day of quarter-hours of 10 kWh but for 40 and 50 from 00:15, which alone have kvarh: 30 each. */
+    private static String quarterHours() {
+        StringBuilder rows = new StringBuilder("start,kWh,lagging kvarh\n");
+        for (int i = 0; i < 96; i++) {
+            rows.append(LocalDateTime.of(2026, 3, 2, 0, 0).plusMinutes(15L * i))
+                    .append(i == 1 ? ",40,30\n" : i == 2 ? ",50,30\n" : ",10,0\n");
+        }
+        return rows.toString();
+    }
+
     private static ValidatableResponse upload(String path, String csv, Map<String, ?> query) {
         return given().header("Content-Type", "text/csv; charset=utf-8")
                 .queryParams(query)
@@ -85,24 +95,42 @@ class UploadTest extends Served {
     }
 
     /**
-     * Own arithmetic: quarter-hours of 10 kWh but for 40 and 50 from 00:15. Half-hours one after another have 50 and 60 kWh, so 120 kW ×
+     * Own arithmetic: half-hours one after another have 50 and 60 kWh, so 120 kW ×
      * 21.35 = 2,562.00; the half-hour from 00:15 has 90 kWh, so 180 kW × 21.35 = 3,843.00.
      */
     @ParameterizedTest
     @CsvSource({"false, 2562.00", "true, 3843.00"})
     void aPeakMayMoveOnByEachInterval(boolean sliding, float amount) {
-        StringBuilder rows = new StringBuilder("start,kWh,lagging kvarh\n");
-        for (int i = 0; i < 96; i++) {
-            rows.append(LocalDateTime.of(2026, 3, 2, 0, 0).plusMinutes(15L * i))
-                    .append(i == 1 ? ",40,0\n" : i == 2 ? ",50,0\n" : ",10,0\n");
-        }
         upload(
                         "/interval-statements",
-                        rows.toString(),
+                        quarterHours(),
                         Map.of("rate", HOURLY, "zone", ZONE, "demandMinutes", "30", "slidingDemand", sliding))
                 .statusCode(200)
                 .body("statements[0].lines[1].name", equalTo("Demand"))
                 .body("statements[0].lines[1].amount", equalTo(amount));
+    }
+
+    /** Own arithmetic: 120 kvar are wanted in two quarter-hours; both steps are in for half an hour and leave 20 kvar, 10 kvarh. */
+    @Test
+    void switchedStepsAreWalkedWithASlidingDemandToo() {
+        upload(
+                        "/interval-assessments",
+                        quarterHours(),
+                        Map.of(
+                                "rate",
+                                HOURLY,
+                                "zone",
+                                ZONE,
+                                "demandMinutes",
+                                "30",
+                                "slidingDemand",
+                                "true",
+                                "stepsKvar",
+                                "50,50"))
+                .statusCode(200)
+                .body("inService.stepOperations", equalTo(List.of(2, 2)))
+                .body("inService.hoursAtFullOutput", equalTo(0.5f))
+                .body("inService.months[0].after.laggingKvarh", equalTo(10.0f));
     }
 
     /** Own arithmetic: 24 hours of 100 kWh × 0.4120 = 988.80 on the day before the meter is read and on that day. */
