@@ -74,7 +74,7 @@ public class IntervalBillingBenchmark {
     @Benchmark
     public BigDecimal billedYear() {
         MonthlySums sums = new MonthlySums(series, calendar, DemandInterval.block(15), false);
-        List<Statement> statements = billing.statements(sums.calendarMonths());
+        List<Statement> statements = billing.statements(sums.months());
         return statements.stream().map(Statement::total).reduce(BigDecimal.ZERO, BigDecimal::add);
     }
 

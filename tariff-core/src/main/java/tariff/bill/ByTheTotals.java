@@ -55,10 +55,7 @@ public final class ByTheTotals {
     private static Assumption note(List<MeteredMonth> months, BigDecimal counted, BigDecimal byTotals) {
         return new Assumption(
                 "counted-by-the-hour",
-                months.size() == 1
-                        ? months.get(0).period().toString()
-                        : months.get(0).period() + " to "
-                                + months.get(months.size() - 1).period(),
+                months.get(0).period().through(months.get(months.size() - 1).period()),
                 "the rate counts by the hour or by another part of the month and asks " + counted.toPlainString()
                         + "; the months' totals alone would have said " + byTotals.toPlainString()
                         + (byTotals.compareTo(counted) < 0

@@ -21,7 +21,7 @@ public final class BankWalk {
      * Energies and peaks after the bank, in one pass. Sums are exact to the division by intervals per hour, which is made once.
      *
      * @param kvar effective output, 0 to 1,000,000 kvar, with no more decimals than the series has
-     * @param demand blocks counted from the start of the range
+     * @param demand counted from the start of the range
      * @throws IllegalArgumentException if the bank is outside its range or the series cannot give such blocks
      */
     public static ReactiveOutcome fixed(

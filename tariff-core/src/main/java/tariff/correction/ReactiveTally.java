@@ -7,6 +7,7 @@ import tariff.meter.Apparent;
 import tariff.meter.DemandInterval;
 import tariff.meter.IntervalRange;
 import tariff.meter.IntervalSeries;
+import tariff.meter.RunningDemand;
 
 /**
  * Counts the registers after a bank. Everything is in scaled kvar (energy of an interval × intervals per hour), where a bank of
@@ -17,31 +18,23 @@ final class ReactiveTally {
     private static final long SQUARES_FIT = 1L << 31;
 
     private final IntervalSeries series;
-    private final int steps;
+    private final RunningDemand demand;
     private long before;
     private long lagging;
     private long leading;
-    private long blockKw;
-    private long blockLagging;
-    private long blockLeading;
-    private int inBlock;
-    private boolean wholeBlock = true;
     private long peakKva;
     private long peakSquared;
     private long peakLagging;
     private long peakLeading;
 
     ReactiveTally(IntervalSeries series, DemandInterval demand) {
-        if (demand.sliding()) {
-            throw new IllegalArgumentException("a bank is walked through demand blocks, not sliding ones");
-        }
         this.series = series;
-        this.steps = demand.stepsIn(series);
+        this.demand = new RunningDemand(series, demand);
     }
 
     /** A bank that gives the same in every interval of a range; the sums of {@link #add}, kept in registers of the processor. */
     void addAll(IntervalRange range, long bankKvar) {
-        if (steps > 1) {
+        if (demand.steps() > 1) {
             for (int i = range.from(); i < range.to(); i++) {
                 add(i, bankKvar);
             }
@@ -93,37 +86,29 @@ final class ReactiveTally {
     /** What both registers of one interval counted stays: within the interval the load swung from one side to the other. */
     void add(int interval, long bankKvar) {
         if (series.isAbsent(interval)) {
-            wholeBlock = false;
-        } else {
-            long lag = series.scaledLaggingKvarh(interval) * series.perHour();
-            long lead = series.scaledLeadingKvarh(interval) * series.perHour();
-            long swing = Math.min(lag, lead);
-            long net = lag - lead - bankKvar;
-            long newLag = swing + Math.max(0, net);
-            long newLead = swing + Math.max(0, -net);
-            before += lag;
-            lagging += newLag;
-            leading += newLead;
-            blockKw += series.scaledKwh(interval) * series.perHour();
-            blockLagging += newLag;
-            blockLeading += newLead;
+            demand.skip();
+            return;
         }
-        if (++inBlock == steps) {
-            endBlock();
+        long lag = series.scaledLaggingKvarh(interval) * series.perHour();
+        long lead = series.scaledLeadingKvarh(interval) * series.perHour();
+        long swing = Math.min(lag, lead);
+        long net = lag - lead - bankKvar;
+        long newLag = swing + Math.max(0, net);
+        long newLead = swing + Math.max(0, -net);
+        before += lag;
+        lagging += newLag;
+        leading += newLead;
+        if (demand.add(series.scaledKwh(interval) * series.perHour(), newLag, newLead)) {
+            peakLagging = Math.max(peakLagging, demand.lagging());
+            peakLeading = Math.max(peakLeading, demand.leading());
+            apparent(mean(demand.kwh()), mean(demand.lagging() - demand.leading()));
         }
     }
 
-    private void endBlock() {
-        if (wholeBlock) {
-            peakLagging = Math.max(peakLagging, blockLagging);
-            peakLeading = Math.max(peakLeading, blockLeading);
-            apparent(blockKw, blockLagging - blockLeading);
-        }
-        blockKw = 0;
-        blockLagging = 0;
-        blockLeading = 0;
-        inBlock = 0;
-        wholeBlock = true;
+    /** The average of a demand, half up where a bank that switched inside it leaves no whole number. */
+    private long mean(long sum) {
+        int steps = demand.steps();
+        return steps == 1 ? sum : Math.floorDiv(2 * sum + steps, 2L * steps);
     }
 
     /** A root is drawn only where the squares are the highest so far. */
@@ -143,9 +128,9 @@ final class ReactiveTally {
                 energy(lagging),
                 energy(leading),
                 energy(before - lagging),
-                over(peakLagging, steps),
-                over(peakLeading, steps),
-                over(peakKva, steps));
+                over(peakLagging, demand.steps()),
+                over(peakLeading, demand.steps()),
+                series.decimal(peakKva));
     }
 
     private BigDecimal energy(long scaledKvarIntervals) {

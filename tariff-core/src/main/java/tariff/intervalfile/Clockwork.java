@@ -10,7 +10,8 @@ import tariff.notice.Finding;
 /** From stamps to the timeline: the step, which end is stamped, the day's last row, daylight saving. */
 final class Clockwork {
     private static final int[] STEPS = {5, 10, 15, 30, 60};
-    private static final int DAY = 24 * 60;
+    private static final int HOUR = 60;
+    private static final int DAY = 24 * HOUR;
 
     private final RawColumns rows;
     private final IntervalFileOptions options;
@@ -118,7 +119,7 @@ final class Clockwork {
         for (int i = 1; i < locals.length; i++) {
             boolean endsDay = locals[i] == locals[i - 1] + step - DAY && Math.floorMod(locals[i], DAY) == 0;
             boolean goesOn = i + 1 < locals.length
-                    ? locals[i + 1] == locals[i] + DAY + step
+                    ? followsMidnight(locals[i + 1] - locals[i] - DAY)
                     : i < perDay - 1 || locals[i - perDay + 1] != locals[i];
             if (endsDay && goesOn) {
                 locals[i] += DAY;
@@ -133,6 +134,11 @@ final class Clockwork {
                     "stamp the end of a day 00:00 of the next day or 24:00");
         }
         return moved > 0;
+    }
+
+    /** Whether a row so long after midnight is the next; an hour more or less where clocks change at midnight. */
+    private boolean followsMidnight(long minutes) {
+        return minutes == step || Math.abs(minutes - step) == HOUR;
     }
 
     private Optional<StampAt> byEdges() {
@@ -162,7 +168,7 @@ final class Clockwork {
         return moments;
     }
 
-    /** The moment that goes on from the row before; else the only one later than it. */
+    /** The moment that goes on from the row before; else the only one later than it, or the first of two that both are shown. */
     private long nearChange(int row, NavigableSet<Long> possible, long latest, ZoneId zone) {
         String where = "row " + rows.lines()[row] + " (" + Stamp.words(locals[row]) + ")";
         if (possible.isEmpty()) {
@@ -174,7 +180,7 @@ final class Clockwork {
             return latest + step;
         }
         var later = possible.tailSet(latest, false);
-        if (later.size() > 1 || (later.isEmpty() && possible.size() > 1)) {
+        if ((later.size() > 1 && !comesAgain(row)) || (later.isEmpty() && possible.size() > 1)) {
             notices.add(Finding.error(
                             "repeated-hour",
                             where,
@@ -183,5 +189,11 @@ final class Clockwork {
                     .allowed("stamps with their offset from UTC"));
         }
         return later.isEmpty() ? possible.first() : later.first();
+    }
+
+    /** Whether the row an hour on has the same stamp, so that this is the first of the two. */
+    private boolean comesAgain(int row) {
+        int hourOn = row + HOUR / step;
+        return hourOn < locals.length && locals[hourOn] == locals[row];
     }
 }

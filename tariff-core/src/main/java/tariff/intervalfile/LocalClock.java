@@ -29,7 +29,7 @@ final class LocalClock {
         }
         ZoneOffset at = rules.getOffset(Instant.ofEpochSecond((local - 24 * 60) * 60));
         Instant before = Instant.ofEpochSecond((local - 48 * 60) * 60);
-        @Nullable ZoneOffsetTransition last = rules.previousTransition(before);
+        @Nullable ZoneOffsetTransition last = rules.previousTransition(before.plusSeconds(1));
         @Nullable ZoneOffsetTransition next = rules.nextTransition(before);
         plainFrom = last == null ? Long.MIN_VALUE : last.toEpochSecond() / 60 + 48 * 60;
         plainTo = next == null ? Long.MAX_VALUE : next.toEpochSecond() / 60 - 48 * 60;

@@ -8,8 +8,7 @@ package tariff.meter;
 final class Demands {
     private final IntervalSeries series;
     private final WindowCalendar calendar;
-    private final int steps;
-    private final int stride;
+    private final DemandInterval demand;
 
     /** What is done with a demand interval that starts at the given interval; energies are scaled like the series. */
     interface Visitor {
@@ -19,25 +18,17 @@ final class Demands {
     Demands(IntervalSeries series, WindowCalendar calendar, DemandInterval demand) {
         this.series = series;
         this.calendar = calendar;
-        this.steps = demand.stepsIn(series);
-        this.stride = demand.sliding() ? 1 : steps;
+        this.demand = demand;
     }
 
     /** @param window the bit of the window to stay in, 0 for none */
     void walk(IntervalRange range, long window, Visitor visitor) {
-        for (int start = range.from(); start + steps <= range.to(); start += stride) {
-            long kwh = 0;
-            long lagging = 0;
-            long leading = 0;
-            boolean whole = true;
-            for (int i = start; i < start + steps; i++) {
-                whole &= !series.isAbsent(i) && (calendar.mask(i) & window) == window;
-                kwh += series.scaledKwh(i);
-                lagging += series.scaledLaggingKvarh(i);
-                leading += series.scaledLeadingKvarh(i);
-            }
-            if (whole) {
-                visitor.visit(start, kwh, lagging, leading);
+        RunningDemand running = new RunningDemand(series, demand);
+        for (int i = range.from(); i < range.to(); i++) {
+            if (series.isAbsent(i) || (calendar.mask(i) & window) != window) {
+                running.skip();
+            } else if (running.add(series.scaledKwh(i), series.scaledLaggingKvarh(i), series.scaledLeadingKvarh(i))) {
+                visitor.visit(i + 1 - running.steps(), running.kwh(), running.lagging(), running.leading());
             }
         }
     }

@@ -3,7 +3,6 @@ package tariff.meter;
 
 import java.time.Instant;
 import java.time.LocalDate;
-import java.time.YearMonth;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
@@ -21,15 +20,26 @@ import java.util.stream.Stream;
  * @param series the meter
  * @param calendar the rate's windows
  * @param demand what a peak is averaged over
+ * @param readOn when a billing period begins
  * @param apparentKvah whether kVAh are wanted: a root for each interval, which most rates do not need
  */
-public record MonthlySums(IntervalSeries series, WindowCalendar calendar, DemandInterval demand, boolean apparentKvah) {
+public record MonthlySums(
+        IntervalSeries series,
+        WindowCalendar calendar,
+        DemandInterval demand,
+        ReadingDay readOn,
+        boolean apparentKvah) {
     /** @throws IllegalArgumentException if the series cannot give such a demand */
     public MonthlySums {
         demand.stepsIn(series);
     }
 
-    /** No windows; peaks over the step of the series. */
+    /** Billing periods that are calendar months. */
+    public MonthlySums(IntervalSeries series, WindowCalendar calendar, DemandInterval demand, boolean apparentKvah) {
+        this(series, calendar, demand, ReadingDay.FIRST_OF_MONTH, apparentKvah);
+    }
+
+    /** No windows; calendar months; peaks over the step of the series. */
     public static MonthlySums of(IntervalSeries series) {
         return new MonthlySums(
                 series, new WindowCalendar(series, Map.of()), DemandInterval.block(series.stepMinutes()), true);
@@ -37,12 +47,12 @@ public record MonthlySums(IntervalSeries series, WindowCalendar calendar, Demand
 
     /** The same questions to another series of the same intervals, such as the one behind a bank. */
     public MonthlySums on(IntervalSeries other) {
-        return new MonthlySums(other, calendar, demand, apparentKvah);
+        return new MonthlySums(other, calendar, demand, readOn, apparentKvah);
     }
 
-    /** Calendar months; the first and the last only as far as the series has days. */
-    public List<MeteredMonth> calendarMonths() {
-        return months(calendarMonthsOf(series.days()));
+    /** The billing periods of the series; the first and the last only as far as it has days. */
+    public List<MeteredMonth> months() {
+        return months(readOn.periods(series.days()));
     }
 
     public List<MeteredMonth> months(List<Period> periods) {
@@ -117,17 +127,5 @@ public record MonthlySums(IntervalSeries series, WindowCalendar calendar, Demand
             windows.put(name, Tally.readings(this, range, calendar.bit(name)));
         }
         return month.withWindows(windows);
-    }
-
-    private static List<Period> calendarMonthsOf(Period days) {
-        List<Period> periods = new ArrayList<>();
-        YearMonth last = YearMonth.from(days.last());
-        for (YearMonth month = YearMonth.from(days.first()); !month.isAfter(last); month = month.plusMonths(1)) {
-            Period whole = Period.of(month);
-            periods.add(new Period(
-                    whole.first().isBefore(days.first()) ? days.first() : whole.first(),
-                    whole.last().isAfter(days.last()) ? days.last() : whole.last()));
-        }
-        return periods;
     }
 }

@@ -55,6 +55,14 @@ public record Period(LocalDate first, LocalDate last) implements Comparable<Peri
         return Math.max(0, ChronoUnit.DAYS.between(from, to) + 1);
     }
 
+    /** The words for this period, others and a last one: {@code 2026-01 to 2026-03}, by days unless both ends are calendar months. */
+    public String through(Period end) {
+        if (equals(end)) {
+            return toString();
+        }
+        return isCalendarMonth() && end.isCalendarMonth() ? this + " to " + end : first + " to " + end.last;
+    }
+
     @Override
     public int compareTo(Period other) {
         int byFirst = first.compareTo(other.first);

@@ -74,18 +74,13 @@ public record Assessment(
 
     /**
      * Assesses a proposal on interval data, where nothing is left to bounds: all three estimates are the same. The months are the
-     * calendar months of the series.
+     * billing periods of the series.
      *
      * @throws Refusal naming every month that lacks what the rate bills
      */
     public static Assessment of(Billing billing, MonthlySums sums, Proposal proposal) {
         BankYear bank = BankYear.of(sums, proposal.bank());
-        return of(
-                billing,
-                sums.calendarMonths(),
-                proposal,
-                (month, estimate) -> bank.month(month.period()),
-                Optional.of(bank));
+        return of(billing, sums.months(), proposal, (month, estimate) -> bank.month(month.period()), Optional.of(bank));
     }
 
     private static Assessment of(

@@ -73,7 +73,7 @@ public record ClauseEffects(Assessment assessment, BigDecimal bankKvar, List<Lin
      * @throws Refusal naming every month that lacks what the rate bills
      */
     public static ClauseEffects of(Billing billing, MonthlySums sums, BigDecimal bankKvar) {
-        return of(billing, sums.calendarMonths(), bankKvar, Assessment.of(billing, sums, next(bankKvar)));
+        return of(billing, sums.months(), bankKvar, Assessment.of(billing, sums, next(bankKvar)));
     }
 
     private static Proposal next(BigDecimal bankKvar) {

@@ -62,9 +62,7 @@ public final class ProposalCharts {
         }
         List<Period> periods =
                 months.stream().map(month -> month.asItIs().month().period()).toList();
-        String span = periods.size() == 1
-                ? periods.get(0).toString()
-                : periods.get(0) + " to " + periods.get(periods.size() - 1);
+        String span = periods.get(0).through(periods.get(periods.size() - 1));
         return new BillChart(
                 titled(assessment, "Bills " + span), assessment.billing().rate().currency(), names(periods), layers);
     }

@@ -81,7 +81,7 @@ public record SavingsBySize(String currency, List<Size> sizes) {
 
     /** The same on interval data, where all three estimates are the same. */
     public static SavingsBySize of(Billing billing, MonthlySums sums, int steps) {
-        return of(billing, sums.calendarMonths(), steps, bank -> {
+        return of(billing, sums.months(), steps, bank -> {
             BankYear in = BankYear.of(sums, bank);
             return (month, estimate) -> in.month(month.period());
         });

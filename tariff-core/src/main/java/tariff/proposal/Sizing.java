@@ -80,7 +80,7 @@ public record Sizing(
      * @throws Refusal naming every month that lacks what the rate bills, fewer than twelve months, or a missing discount rate
      */
     public static Sizing of(Billing billing, MonthlySums sums, SizingTerms terms) {
-        return of(billing, sums.calendarMonths(), Optional.of(sums), terms);
+        return of(billing, sums.months(), Optional.of(sums), terms);
     }
 
     private static Sizing of(

@@ -88,7 +88,7 @@ public record Report(
     /** The months covered: {@code 2025-01 to 2025-12}. */
     String span() {
         List<Period> all = periods();
-        return all.size() == 1 ? all.get(0).toString() : all.get(0) + " to " + all.get(all.size() - 1);
+        return all.get(0).through(all.get(all.size() - 1));
     }
 
     /** {@code year}, or how many months the bills cover. */

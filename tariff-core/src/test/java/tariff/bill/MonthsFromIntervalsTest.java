@@ -47,7 +47,7 @@ class MonthsFromIntervalsTest {
                     InventedYear.between(seed, "Europe/Berlin", step, first, first.plusMonths(2), new BitSet());
             List<MeteredMonth> byIntervals = new MonthlySums(
                             series, new WindowCalendar(series, rate.windows()), DemandInterval.block(step), true)
-                    .calendarMonths();
+                    .months();
             List<MeteredMonth> byTotals = List.of(totals(series, first), totals(series, first.plusMonths(1)));
             List<String> expected = answer(rate, byTotals);
             assertThat(answer(rate, byIntervals)).as("seed %s", seed).isEqualTo(expected);

@@ -35,7 +35,7 @@ class ColdStoreTest {
     private static List<MeteredMonth> months() throws IOException {
         IntervalReading read = IntervalFile.read(FILE, IntervalFileOptions.in("America/Sao_Paulo"));
         assertThat(read.warnings()).isEmpty();
-        return MonthlySums.of(read.series()).calendarMonths();
+        return MonthlySums.of(read.series()).months();
     }
 
     /** E × (0.92 ÷ PF − 1)⁺ is convex in (kWh, kvarh) and grows with both, so that its sum is never below that of the sums: Jensen. */

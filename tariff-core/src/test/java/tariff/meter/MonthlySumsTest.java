@@ -71,7 +71,7 @@ class MonthlySumsTest {
                 Map.of("day", Window.daily("07:00", "21:00"), "night", Window.daily("21:00", "07:00"));
         MonthlySums sums = new MonthlySums(series, new WindowCalendar(series, windows), DemandInterval.block(15), true);
         Readings whole = sums.month(series.days()).totals();
-        List<MeteredMonth> months = sums.calendarMonths();
+        List<MeteredMonth> months = sums.months();
         assertThat(months).hasSize(12);
         for (Register register : whole.values().keySet()) {
             BigDecimal expected = whole.get(register).orElseThrow();
@@ -102,7 +102,7 @@ class MonthlySumsTest {
     void theFirstAndLastMonthReachAsFarAsTheSeries() {
         IntervalSeries series =
                 InventedYear.between(5, "UTC", 60, LocalDate.of(2026, 1, 20), LocalDate.of(2026, 3, 5), new BitSet());
-        assertThat(MonthlySums.of(series).calendarMonths().stream().map(MeteredMonth::period))
+        assertThat(MonthlySums.of(series).months().stream().map(MeteredMonth::period))
                 .map(Period::toString)
                 .containsExactly("2026-01-20 to 2026-01-31", "2026-02", "2026-03-01 to 2026-03-04");
     }

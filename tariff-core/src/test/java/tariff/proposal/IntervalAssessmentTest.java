@@ -66,7 +66,7 @@ class IntervalAssessmentTest {
     @ValueSource(longs = {1, 2, 3, 4, 5, 6, 7, 8})
     void theTruthLiesWithinTheBoundsOfTheMonthsTotals(long seed) {
         MonthlySums sums = MonthlySums.of(plant(seed));
-        List<MeteredMonth> months = sums.calendarMonths();
+        List<MeteredMonth> months = sums.months();
         for (String text : RATES) {
             Billing billing = new Billing(RateFile.parse(text), Site.unnamed());
             for (String kvar : List.of("10", "40", "90", "160", "300")) {

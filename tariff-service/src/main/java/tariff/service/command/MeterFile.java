@@ -5,12 +5,12 @@ import java.io.PrintWriter;
 import java.math.BigDecimal;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
-import java.time.ZoneId;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeSet;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 import tariff.csv.BillsFile;
@@ -18,27 +18,20 @@ import tariff.csv.BillsRead;
 import tariff.csv.DateOrder;
 import tariff.csv.DecimalMark;
 import tariff.csv.ReadingChoices;
-import tariff.intervalfile.GapRule;
-import tariff.intervalfile.IntervalFileOptions;
 import tariff.intervalfile.IntervalReading;
-import tariff.intervalfile.StampAt;
 import tariff.json.BillsJson;
-import tariff.meter.DemandInterval;
 import tariff.meter.MeteredSite;
 import tariff.meter.MonthlySums;
-import tariff.meter.Register;
 import tariff.meter.Site;
 import tariff.meter.Unit;
-import tariff.meter.WindowCalendar;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
 import tariff.rate.Rate;
+import tariff.service.request.IntervalTerms;
 
 /** The rate and the bills or interval data that a command is given, and what those files may leave out. */
 @SuppressWarnings("NullAway.Init") // picocli fills them in
 final class MeterFile {
-    private static final long ROWS_WORTH_NEWS = 1_000_000;
-
     @Parameters(index = "0", paramLabel = "RATE", description = "the rate, a JSON file")
     private Path rate;
 
@@ -75,23 +68,8 @@ final class MeterFile {
     @Option(names = "--decimal", description = "the decimal mark of a table, if it does not show it: comma or point")
     private Optional<DecimalMark> decimal;
 
-    @Option(names = "--zone", paramLabel = "ZONE", description = "the clock of interval data: Europe/Berlin")
-    private Optional<ZoneId> zone;
-
-    @Option(names = "--stamps", description = "what the stamps of intervals mark, if they do not show it: start or end")
-    private Optional<StampAt> stamps;
-
-    @Option(
-            names = "--gaps",
-            description = "missing intervals: refuse, leave_out or interpolate (${DEFAULT-VALUE} unless said)",
-            defaultValue = "refuse")
-    private GapRule gaps;
-
-    @Option(
-            names = "--demand-minutes",
-            paramLabel = "MINUTES",
-            description = "what a peak is averaged over; one interval unless said")
-    private Optional<Integer> demandMinutes;
+    @Mixin
+    private IntervalOptions said;
 
     /** Reads the files; how they were understood is told on {@code notes}. */
     Metered read(PrintWriter notes) {
@@ -128,34 +106,11 @@ final class MeterFile {
     }
 
     private Metered intervals(Rate under, Path file, PrintWriter notes) {
-        IntervalReading read = Files.intervals(file, intervalChoices(notes));
+        IntervalTerms terms = said.terms(dates, notes);
+        IntervalReading read = Files.intervals(file, terms.file());
         read.warnings().forEach(notes::println);
-        MonthlySums sums = new MonthlySums(
-                read.series(),
-                new WindowCalendar(read.series(), under.windows()),
-                DemandInterval.block(demandMinutes.orElse(read.series().stepMinutes())),
-                under.reads(Register.APPARENT_KVAH));
-        return new Metered(
-                under, completed(Site.unnamed()), sums.calendarMonths(), Optional.of(sums), read.assumptions());
-    }
-
-    private IntervalFileOptions intervalChoices(PrintWriter notes) {
-        IntervalFileOptions choices = IntervalFileOptions.defaults().gaps(gaps).progress(rows -> {
-            if (rows >= ROWS_WORTH_NEWS) {
-                notes.println(rows + " rows read");
-                notes.flush();
-            }
-        });
-        if (zone.isPresent()) {
-            choices = choices.zone(zone.get());
-        }
-        if (stamps.isPresent()) {
-            choices = choices.stampAt(stamps.get());
-        }
-        return dates.isPresent()
-                ? choices.dateOrder(
-                        tariff.intervalfile.DateOrder.valueOf(dates.get().name()))
-                : choices;
+        MonthlySums sums = terms.sums(read.series(), under);
+        return new Metered(under, completed(Site.unnamed()), sums.months(), Optional.of(sums), read.assumptions());
     }
 
     private Site completed(Site site) {

@@ -3,6 +3,7 @@ package tariff.service.http;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Supplier;
 import org.jspecify.annotations.Nullable;
 import tariff.bill.Billing;
 import tariff.json.ClauseEffectsJson;
@@ -31,17 +32,18 @@ record Clauses(Shelf shelf) implements Question {
         List<MeteredMonth> months = bills.orElseThrow().months();
         ClauseEffects effects =
                 ClauseEffects.of(billing, months, terms.orElseThrow().kvar());
-        JsonObject json = ClauseEffectsJson.write(effects);
-        return terms.orElseThrow().charts() ? json.with("charts", charts(billing, months, effects)) : json;
+        return write(effects, terms.orElseThrow(), () -> SavingsBySize.of(billing, months, SavingsBySize.USUAL_STEPS));
     }
 
-    private static JsonObject charts(Billing billing, List<MeteredMonth> months, ClauseEffects effects) {
+    /** The answer with its charts, if they are wanted; only then is it asked what other sizes save. */
+    static JsonObject write(ClauseEffects effects, ClauseTerms terms, Supplier<SavingsBySize> sizes) {
+        JsonObject json = ClauseEffectsJson.write(effects);
+        if (!terms.charts()) {
+            return json;
+        }
         JsonObject charts = new JsonObject();
-        ProposalCharts.documents(
-                        effects.assessment(),
-                        SavingsBySize.of(billing, months, SavingsBySize.USUAL_STEPS),
-                        Optional.empty())
+        ProposalCharts.documents(effects.assessment(), sizes.get(), Optional.empty())
                 .forEach(charts::with);
-        return charts;
+        return json.with("charts", charts);
     }
 }

@@ -16,8 +16,11 @@ import tariff.meter.MonthlySums;
 import tariff.meter.Site;
 import tariff.notice.Assumption;
 import tariff.proposal.Assessment;
+import tariff.proposal.ClauseEffects;
 import tariff.proposal.Proposal;
+import tariff.proposal.SavingsBySize;
 import tariff.rate.Rate;
+import tariff.service.request.ClauseTerms;
 import tariff.service.request.IntervalRequest;
 import tariff.service.request.IntervalTerms;
 import tariff.service.shelf.Shelf;
@@ -33,7 +36,7 @@ record Intervals(Shelf shelf) {
         IntervalReading read = data.read(terms.file());
         MonthlySums sums = terms.sums(read.series(), rate.orElseThrow());
         Billing billing = new Billing(rate.orElseThrow(), site);
-        List<Statement> statements = billing.statements(sums.calendarMonths());
+        List<Statement> statements = billing.statements(sums.months());
         List<Assumption> assumptions = new ArrayList<>(read.assumptions());
         ByTheTotals.note(billing, statements).ifPresent(assumptions::add);
         JsonObject answer =
@@ -52,6 +55,23 @@ record Intervals(Shelf shelf) {
         Billing billing = new Billing(rate.orElseThrow(), site);
         Assessment assessment = Assessment.of(billing, sums, proposal.orElseThrow());
         return warned(AssessmentJson.write(assessment.with(read.assumptions())), read);
+    }
+
+    JsonObject clauseEffects(IntervalRequest request, Uploads.Data data) {
+        Optional<Rate> rate = request.rate(shelf);
+        Site site = request.site();
+        IntervalTerms terms = request.intervals();
+        Optional<ClauseTerms> asked = request.clauses();
+        request.refuseIfWrong();
+        IntervalReading read = data.read(terms.file());
+        MonthlySums sums = terms.sums(read.series(), rate.orElseThrow());
+        Billing billing = new Billing(rate.orElseThrow(), site);
+        ClauseEffects effects =
+                ClauseEffects.of(billing, sums, asked.orElseThrow().kvar()).with(read.assumptions());
+        return warned(
+                Clauses.write(
+                        effects, asked.orElseThrow(), () -> SavingsBySize.of(billing, sums, SavingsBySize.USUAL_STEPS)),
+                read);
     }
 
     private static JsonObject warned(JsonObject answer, IntervalReading read) {

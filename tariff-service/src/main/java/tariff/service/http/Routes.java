@@ -35,6 +35,7 @@ public final class Routes {
                 new Route(POST, "/screenings", exchange.of(new Screenings())),
                 new Route(POST, "/reports", exchange.of(Reports.TYPE, new Reports(shelf)::page)),
                 new Route(POST, "/interval-statements", uploads.of(intervals::statements)),
-                new Route(POST, "/interval-assessments", uploads.of(intervals::assessment)));
+                new Route(POST, "/interval-assessments", uploads.of(intervals::assessment)),
+                new Route(POST, "/interval-clause-effects", uploads.of(intervals::clauseEffects)));
     }
 }

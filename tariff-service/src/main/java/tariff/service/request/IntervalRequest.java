@@ -20,7 +20,9 @@ import tariff.service.shelf.Shelf;
 
 /** What is asked of interval data that come in a body of their own: the parameters of the query, read part by part. */
 public final class IntervalRequest {
-    private static final Set<String> SAID_OF_DATA = Set.of("zone", "stamps", "dates", "gaps", "demandMinutes");
+    private static final Set<String> SAID_OF_DATA =
+            Set.of("zone", "stamps", "dates", "gaps", "demandMinutes", "slidingDemand", "readOn");
+    private static final Set<String> CLAUSES = Set.of("kvar", "charts");
     private static final Set<String> BANK = Set.of(
             "fixedKvar",
             "stepsKvar",
@@ -71,6 +73,11 @@ public final class IntervalRequest {
     /** How the data are to be read. */
     public IntervalTerms intervals() {
         return IntervalTerms.read(part(SAID_OF_DATA), findings);
+    }
+
+    /** The next few kvar, and whether charts are wanted. */
+    public Optional<ClauseTerms> clauses() {
+        return declared(ClauseTerms.read(part(CLAUSES)));
     }
 
     /** Bank, price and outlook; empty if the bank cannot be read. */

@@ -1,6 +1,9 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.service.request;
 
+import jakarta.validation.constraints.AssertTrue;
+import jakarta.validation.constraints.Max;
+import jakarta.validation.constraints.Min;
 import java.time.DateTimeException;
 import java.time.ZoneId;
 import java.util.List;
@@ -13,6 +16,7 @@ import tariff.intervalfile.StampAt;
 import tariff.meter.DemandInterval;
 import tariff.meter.IntervalSeries;
 import tariff.meter.MonthlySums;
+import tariff.meter.ReadingDay;
 import tariff.meter.Register;
 import tariff.meter.WindowCalendar;
 import tariff.notice.Finding;
@@ -25,8 +29,20 @@ import tariff.rate.clause.Written;
  *
  * @param file how the rows are read
  * @param demandMinutes what a peak is averaged over; one interval unless said
+ * @param slidingDemand whether that time moves on by each interval, in place of one block after another
+ * @param readOn the day of the month on which a billing period begins
  */
-public record IntervalTerms(IntervalFileOptions file, Optional<Integer> demandMinutes) {
+public record IntervalTerms(
+        IntervalFileOptions file,
+
+        Optional<@Min(value = 5, message = MINUTES) @Max(value = 60, message = MINUTES) Integer> demandMinutes,
+
+        boolean slidingDemand,
+
+        @Min(value = 1, message = DAY) @Max(value = ReadingDay.LAST, message = DAY)
+        int readOn) {
+    private static final String MINUTES = "5 to 60 minutes";
+    private static final String DAY = "1 to 28, a day that every month has";
     private static final Map<String, StampAt> STAMPS = Map.of("start", StampAt.START, "end", StampAt.END);
     private static final Map<String, DateOrder> DATES =
             Map.of("day-first", DateOrder.DAY_FIRST, "month-first", DateOrder.MONTH_FIRST);
@@ -45,8 +61,18 @@ public record IntervalTerms(IntervalFileOptions file, Optional<Integer> demandMi
         if (in.has("dates")) {
             file = file.dateOrder(in.word("dates", DATES, DateOrder.DAY_FIRST));
         }
-        return new IntervalTerms(
-                file, in.has("demandMinutes") ? Optional.of(in.wholeNumber("demandMinutes", 5, 60)) : Optional.empty());
+        IntervalTerms terms = new IntervalTerms(
+                file,
+                in.has("demandMinutes") ? Optional.of(in.wholeNumber("demandMinutes", 5, 60)) : Optional.empty(),
+                in.flag("slidingDemand"),
+                in.has("readOn") ? in.wholeNumber("readOn", 1, ReadingDay.LAST) : 1);
+        findings.addAll(Declared.check(terms, ""));
+        return terms;
+    }
+
+    @AssertTrue(message = "a sliding demand with the minutes that it is averaged over")
+    boolean isAveragedOver() {
+        return !slidingDemand || demandMinutes.isPresent();
     }
 
     private static Optional<ZoneId> zone(Written in, List<Finding> findings) {
@@ -70,7 +96,8 @@ public record IntervalTerms(IntervalFileOptions file, Optional<Integer> demandMi
             return new MonthlySums(
                     series,
                     new WindowCalendar(series, rate.windows()),
-                    DemandInterval.block(demandMinutes.orElse(series.stepMinutes())),
+                    new DemandInterval(demandMinutes.orElse(series.stepMinutes()), slidingDemand),
+                    new ReadingDay(readOn),
                     rate.reads(Register.APPARENT_KVAH));
         } catch (IllegalArgumentException step) {
             throw new Refusal(Finding.error(

@@ -9,10 +9,12 @@ import java.util.TreeMap;
 import java.util.stream.Stream;
 import tariff.notice.Finding;
 
-/** The values of a query as a JSON document would hold them: lists, decimals and texts. */
+/** The values of a query as a JSON document would hold them: lists, decimals, texts, true and false. */
 record QueryValues(List<Finding> findings) {
     private static final Set<String> TEXTS = Set.of("rate", "zone", "stamps", "dates", "gaps", "site");
     private static final Set<String> REPEATED = Set.of("option", "agreed");
+    private static final Set<String> FLAGS = Set.of("slidingDemand", "charts");
+    private static final Set<String> EITHER = Set.of("true", "false");
     private static final String STEPS = "stepsKvar";
     private static final String NUMBER = "[+-]?(\\d{1,40}(\\.\\d{0,40})?|\\.\\d{1,40})([eE][+-]?\\d{1,3})?";
 
@@ -36,6 +38,9 @@ record QueryValues(List<Finding> findings) {
     private static Object value(String name, String text) {
         if (name.equals(STEPS)) {
             return Stream.of(text.split(",", -1)).map(QueryValues::number).toList();
+        }
+        if (FLAGS.contains(name)) {
+            return EITHER.contains(text) ? (Object) Boolean.valueOf(text) : text;
         }
         return TEXTS.contains(name) ? text : number(text);
     }

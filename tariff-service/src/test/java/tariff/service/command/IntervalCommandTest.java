@@ -6,12 +6,15 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.io.IOException;
 import java.io.PrintWriter;
 import java.io.StringWriter;
+import java.math.BigDecimal;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import picocli.CommandLine;
 import tariff.service.http.Examples;
 
@@ -56,6 +59,52 @@ class IntervalCommandTest {
                 .contains("Reactive excess")
                 .contains("2025-01 to 2025-12: the rate counts by the hour")
                 .contains("good hours");
+    }
+
+    /** The year's penalty is the sum of what the statements charge as reactive excess, all of it for being below 0.92. */
+    @Test
+    void theClausesBiteHourByHour() {
+        assertThat(run("clauses", "--kvar", "25", "--demand-minutes", "60", "--sliding"))
+                .contains("  Reactive excess  43560.31  43560.31  43560.31\n", "Next 25 kvar", "counts by the hour");
+        assertThat(run("statement", "--format", "csv")
+                        .lines()
+                        .filter(row -> row.contains(",Reactive excess,"))
+                        .map(row -> new BigDecimal(row.split(",")[3]))
+                        .reduce(BigDecimal.ZERO, BigDecimal::add))
+                .isEqualByComparingTo("43560.31");
+    }
+
+    @Test
+    void periodsBeginOnTheDayTheMeterIsRead() {
+        assertThat(run("statement", "--read-on", "14").lines().filter(line -> line.startsWith("2025-")))
+                .hasSize(13)
+                .startsWith("2025-01-01 to 2025-01-13", "2025-01-14 to 2025-02-13")
+                .endsWith("2025-12-14 to 2025-12-31");
+        assertThat(run("statement", "--read-on", "14"))
+                .contains("- 2025-01-01 to 2025-12-31: the rate counts by the hour");
+    }
+
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = '|',
+            value = {
+                "--read-on=29 | /readOn: is out of range; found 29; allowed: 1 to 28, a day that every month has",
+                "--demand-minutes=3 | /demandMinutes: is out of range; found 3; allowed: 5 to 60 minutes",
+                "--demand-minutes=45 | /demandMinutes: is not a time that peaks of these data can be averaged over; found 45;"
+                        + " allowed: a multiple of 60 minutes that divides an hour",
+                "--sliding | does not hold together; allowed: a sliding demand with the minutes that it is averaged over",
+            })
+    void whatIntervalsCannotGiveIsAFinding(String option, String finding) {
+        Printed printed = Printed.by(
+                "statement",
+                Examples.path("examples/rates/ilha-verde-hourly.json").toString(),
+                "--intervals",
+                Examples.path("examples/intervals/palmeira-cold-store.csv").toString(),
+                "--zone",
+                "America/Sao_Paulo",
+                option);
+        assertThat(printed.exit()).isEqualTo(Exit.FINDINGS);
+        assertThat(printed.err()).isEqualTo(finding + "\n");
     }
 
     @Test

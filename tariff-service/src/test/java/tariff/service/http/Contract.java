@@ -54,6 +54,13 @@ final class Contract implements Filter {
         return all;
     }
 
+    /** The parameters that an operation documents. */
+    List<String> parameters(String path) {
+        Object documented = map(map(paths.get(path)).get("post")).get("parameters");
+        return ((List<?>) documented)
+                .stream().map(each -> String.valueOf(map(each).get("name"))).toList();
+    }
+
     @Override
     public Response filter(
             FilterableRequestSpecification request, FilterableResponseSpecification expected, FilterContext context) {

@@ -2,19 +2,26 @@
 package tariff.service.http;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.hamcrest.Matchers.containsInAnyOrder;
 import static org.hamcrest.Matchers.equalTo;
+import static org.hamcrest.Matchers.hasItem;
 import static org.hamcrest.Matchers.hasItems;
 import static org.hamcrest.Matchers.hasSize;
+import static org.hamcrest.Matchers.not;
+import static org.hamcrest.Matchers.nullValue;
+import static org.hamcrest.Matchers.startsWith;
 
 import io.restassured.RestAssured;
 import io.restassured.response.ValidatableResponse;
 import java.io.IOException;
 import java.net.Socket;
 import java.nio.charset.StandardCharsets;
+import java.time.LocalDateTime;
 import java.time.ZonedDateTime;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.TreeMap;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -32,6 +39,16 @@ class UploadTest extends Served {
         for (int hour = 0; hour < 24; hour++) {
             rows.append("2026-03-02 ").append(hour < 10 ? "0" : "").append(hour).append(":00,100,");
             rows.append(hour < 12 ? "75\n" : "10\n");
+        }
+        return rows.toString();
+    }
+
+    /** A day of quarter-hours of 10 kWh but for 40 and 50 from 00:15, which alone have kvarh: 30 each. */
+    private static String quarterHours() {
+        StringBuilder rows = new StringBuilder("start,kWh,lagging kvarh\n");
+        for (int i = 0; i < 96; i++) {
+            rows.append(LocalDateTime.of(2026, 3, 2, 0, 0).plusMinutes(15L * i))
+                    .append(i == 1 ? ",40,30\n" : i == 2 ? ",50,30\n" : ",10,0\n");
         }
         return rows.toString();
     }
@@ -116,6 +133,113 @@ class UploadTest extends Served {
                 .body("inService.leadingKvarhCreated", equalTo(0.0f));
     }
 
+    /**
+     * Own arithmetic: half-hours one after another have 50 and 60 kWh, so 120 kW ×
+     * 21.35 = 2,562.00; the half-hour from 00:15 has 90 kWh, so 180 kW × 21.35 = 3,843.00.
+     */
+    @ParameterizedTest
+    @CsvSource({"false, 2562.00", "true, 3843.00"})
+    void aPeakMayMoveOnByEachInterval(boolean sliding, float amount) {
+        upload(
+                        "/interval-statements",
+                        quarterHours(),
+                        Map.of("rate", HOURLY, "zone", ZONE, "demandMinutes", "30", "slidingDemand", sliding))
+                .statusCode(200)
+                .body("statements[0].lines[1].name", equalTo("Demand"))
+                .body("statements[0].lines[1].amount", equalTo(amount));
+    }
+
+    /** Own arithmetic: 120 kvar are wanted in two quarter-hours; both steps are in for half an hour and leave 20 kvar, 10 kvarh. */
+    @Test
+    void switchedStepsAreWalkedWithASlidingDemandToo() {
+        upload(
+                        "/interval-assessments",
+                        quarterHours(),
+                        Map.of(
+                                "rate",
+                                HOURLY,
+                                "zone",
+                                ZONE,
+                                "demandMinutes",
+                                "30",
+                                "slidingDemand",
+                                "true",
+                                "stepsKvar",
+                                "50,50"))
+                .statusCode(200)
+                .body("inService.stepOperations", equalTo(List.of(2, 2)))
+                .body("inService.hoursAtFullOutput", equalTo(0.5f))
+                .body("inService.months[0].after.laggingKvarh", equalTo(10.0f));
+    }
+
+    /** Own arithmetic: 24 hours of 100 kWh × 0.4120 = 988.80 on the day before the meter is read and on that day. */
+    @Test
+    void periodsBeginOnTheDayTheMeterIsRead() {
+        String second = day().substring(day().indexOf('\n') + 1).replace("03-02", "03-14");
+        upload(
+                        "/interval-statements",
+                        day().replace("03-02", "03-13") + second,
+                        Map.of("rate", HOURLY, "zone", ZONE, "readOn", "14"))
+                .statusCode(200)
+                .body("statements.from", equalTo(List.of("2026-03-13", "2026-03-14")))
+                .body("statements.to", equalTo(List.of("2026-03-13", "2026-03-14")))
+                .body("statements.lines.collect { it[0].amount }", equalTo(List.of(988.80f, 988.80f)))
+                .body("assumptions.where", hasItem("2026-03-13 to 2026-03-14"));
+    }
+
+    /**
+     * Own arithmetic: 49.61 as above. 25 kvar leave 50 kvarh in twelve hours, PF 100 ÷ √(100² + 50²) = 0.894427: 12 × 100 × (0.92 ÷ 0.894427
+     * − 1) = 34.3095 kWh × 0.2756 = 9.46, so 40.15 are saved.
+     */
+    @Test
+    void theClausesOfUploadedHoursAreTold() {
+        upload("/interval-clause-effects", day(), Map.of("rate", HOURLY, "zone", ZONE, "kvar", "25"))
+                .statusCode(200)
+                .body("kvar", equalTo(25))
+                .body("lines[2].name", equalTo("Reactive excess"))
+                .body("lines[2].penalty", equalTo(49.61f))
+                .body("nextBank.low", equalTo(40.15f))
+                .body("nextBank.high", equalTo(40.15f))
+                .body("charts", nullValue())
+                .body("warnings", hasSize(0));
+    }
+
+    @Test
+    void chartsOfClausesAreDrawnWhereTheyAreAskedFor() {
+        upload("/interval-clause-effects", day(), Map.of("rate", HOURLY, "zone", ZONE, "charts", "true"))
+                .statusCode(200)
+                .body("kvar", equalTo(50))
+                .body("charts.bill", startsWith("<svg"))
+                .body("charts.savings", startsWith("<svg"));
+    }
+
+    @Test
+    void whatCannotBeAskedOfClausesIsSaidAtOnce() {
+        upload(
+                        "/interval-clause-effects",
+                        day(),
+                        Map.of("rate", HOURLY, "kvar", "0", "charts", "yes", "readOn", "29", "fixedKvar", "50"))
+                .statusCode(422)
+                .body("findings.pointer", containsInAnyOrder("/readOn", "/charts", "/kvar", "/fixedKvar"))
+                .body("findings.find { it.pointer == '/readOn' }.allowed", equalTo("a whole number from 1 to 28"));
+    }
+
+    @Test
+    void aSlidingDemandNeedsItsMinutes() {
+        upload("/interval-statements", day(), Map.of("rate", HOURLY, "zone", ZONE, "slidingDemand", "true"))
+                .statusCode(422)
+                .body("findings[0].message", equalTo("does not hold together"))
+                .body("findings[0].allowed", equalTo("a sliding demand with the minutes that it is averaged over"));
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"/interval-statements", "/interval-assessments", "/interval-clause-effects"})
+    void everyDocumentedParameterIsKnown(String path) {
+        Map<String, String> all = new TreeMap<>();
+        CONTRACT.parameters(path).forEach(name -> all.put(name, "%3F"));
+        upload(path, day(), all).statusCode(422).body("findings.message", not(hasItem(startsWith("is not a key"))));
+    }
+
     @Test
     void everythingWrongWithTheQueryIsSaidAtOnce() {
         upload(
@@ -160,14 +284,16 @@ class UploadTest extends Served {
                         equalTo("The body must be text/csv, or application/atom+xml for a feed of NAESB REQ.21."));
     }
 
-    @Test
-    void dataAreTakenUpToTheLimitWhetherTheirLengthIsSaidOrNot() throws IOException {
+    @ParameterizedTest
+    @CsvSource({"/interval-statements, ''", "/interval-assessments, &fixedKvar=50", "/interval-clause-effects, &kvar=50"
+    })
+    void dataAreTakenUpToTheLimitWhetherTheirLengthIsSaidOrNot(String asked, String more) throws IOException {
         byte[] csv = day().getBytes(StandardCharsets.UTF_8);
         for (int spare : new int[] {0, -1}) {
             Service small = Service.build(Shelf.read(Examples.path("examples/rates")), 0, csv.length + spare)
                     .start(0);
             int expected = spare == 0 ? 200 : 413;
-            String path = "/interval-statements?rate=" + HOURLY + "&zone=" + ZONE;
+            String path = asked + "?rate=" + HOURLY + "&zone=" + ZONE + more;
             RestAssured.given()
                     .port(small.port())
                     .filter(CONTRACT)

@@ -1,0 +1,74 @@
+// SPDX-License-Identifier: Apache-2.0
+package tariff.service.command;
+
+import java.io.PrintWriter;
+import java.time.ZoneId;
+import java.util.Optional;
+import picocli.CommandLine.Option;
+import tariff.csv.DateOrder;
+import tariff.intervalfile.GapRule;
+import tariff.intervalfile.IntervalFileOptions;
+import tariff.intervalfile.StampAt;
+import tariff.service.request.Declared;
+import tariff.service.request.IntervalTerms;
+
+/** What interval data may leave out, and what the bill makes of them. */
+@SuppressWarnings("NullAway.Init") // picocli fills them in
+final class IntervalOptions {
+    private static final long ROWS_WORTH_NEWS = 1_000_000;
+
+    @Option(names = "--zone", paramLabel = "ZONE", description = "the clock of interval data: Europe/Berlin")
+    private Optional<ZoneId> zone;
+
+    @Option(names = "--stamps", description = "what the stamps of intervals mark, if they do not show it: start or end")
+    private Optional<StampAt> stamps;
+
+    @Option(
+            names = "--gaps",
+            description = "missing intervals: refuse, leave_out or interpolate (${DEFAULT-VALUE} unless said)",
+            defaultValue = "refuse")
+    private GapRule gaps;
+
+    @Option(
+            names = "--demand-minutes",
+            paramLabel = "MINUTES",
+            description = "what a peak is averaged over; one interval unless said")
+    private Optional<Integer> demandMinutes;
+
+    @Option(
+            names = "--sliding",
+            description = "the minutes of a peak move on by each interval; one block after another unless said")
+    private boolean sliding;
+
+    @Option(
+            names = "--read-on",
+            paramLabel = "DAY",
+            description =
+                    "the day of the month on which a billing period begins, 1 to 28 (${DEFAULT-VALUE} unless said)",
+            defaultValue = "1")
+    private int readOn;
+
+    /** @param dates the order of dates, which bills may need too */
+    IntervalTerms terms(Optional<DateOrder> dates, PrintWriter notes) {
+        return Declared.require(new IntervalTerms(file(dates, notes), demandMinutes, sliding, readOn));
+    }
+
+    private IntervalFileOptions file(Optional<DateOrder> dates, PrintWriter notes) {
+        IntervalFileOptions choices = IntervalFileOptions.defaults().gaps(gaps).progress(rows -> {
+            if (rows >= ROWS_WORTH_NEWS) {
+                notes.println(rows + " rows read");
+                notes.flush();
+            }
+        });
+        if (zone.isPresent()) {
+            choices = choices.zone(zone.get());
+        }
+        if (stamps.isPresent()) {
+            choices = choices.stampAt(stamps.get());
+        }
+        return dates.isPresent()
+                ? choices.dateOrder(
+                        tariff.intervalfile.DateOrder.valueOf(dates.get().name()))
+                : choices;
+    }
+}
