@@ -54,8 +54,7 @@ record BetterPowerFactor(Leading leading) {
         month.windows().forEach((name, readings) -> windows.put(name, better(readings, by)));
         MeteredMonth after = month.with(better(month.totals(), by)).withWindows(windows);
         return month.detail()
-                .map(detail -> after.withDetail(cut ->
-                        detail.each(cut).stream().map(part -> month(part, by)).toList()))
+                .map(detail -> after.withDetail(new BetterHours(detail, this, by)))
                 .orElse(after);
     }
 

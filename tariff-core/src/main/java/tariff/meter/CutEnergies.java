@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.meter;
 
+import java.util.stream.LongStream;
+
 /**
  * The energies of each hour, day … of a period, as whole multiples of 10<sup>−scale</sup> kWh or kvarh: exact, and quick to add.
  *
@@ -15,5 +17,32 @@ public record CutEnergies(int scale, long[] kwh, long[] laggingKvarh, long[] lea
 
     public int size() {
         return kwh.length;
+    }
+
+    /**
+     * The same energies with at least so many decimals.
+     *
+     * @throws ArithmeticException if one does not fit
+     */
+    public CutEnergies scaledTo(int decimals) {
+        if (decimals <= scale) {
+            return this;
+        }
+        long factor = LongStream.iterate(10, power -> 10 * power)
+                .skip(decimals - scale - 1L)
+                .findFirst()
+                .orElseThrow();
+        return new CutEnergies(
+                decimals,
+                times(factor, kwh),
+                times(factor, laggingKvarh),
+                times(factor, leadingKvarh),
+                times(factor, exportedKwh));
+    }
+
+    private static long[] times(long factor, long[] values) {
+        return LongStream.of(values)
+                .map(value -> Math.multiplyExact(factor, value))
+                .toArray();
     }
 }
