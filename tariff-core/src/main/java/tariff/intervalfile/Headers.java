@@ -55,7 +55,7 @@ final class Headers {
     }
 
     private void missing(String what, Role role, List<String> headers) {
-        notices.add(Finding.error("column-missing", "headers", what + " is missing; name the column for " + role)
+        notices.add(Finding.error("column-missing", "headers", what + " is missing; name the column of " + role.words())
                 .found(Texts.quoted(String.join(", ", headers))));
     }
 

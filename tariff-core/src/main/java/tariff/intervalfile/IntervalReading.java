@@ -2,7 +2,9 @@
 package tariff.intervalfile;
 
 import java.util.List;
+import java.util.stream.Stream;
 import tariff.meter.IntervalSeries;
+import tariff.meter.MonthlySums;
 import tariff.notice.Assumption;
 import tariff.notice.Finding;
 
@@ -17,5 +19,10 @@ public record IntervalReading(IntervalSeries series, List<Finding> warnings, Lis
     public IntervalReading {
         warnings = List.copyOf(warnings);
         assumptions = List.copyOf(assumptions);
+    }
+
+    /** The assumptions, with the periods that the file holds only part of. */
+    public List<Assumption> assumptions(MonthlySums sums) {
+        return Stream.concat(assumptions.stream(), sums.partPeriods().stream()).toList();
     }
 }

@@ -4,17 +4,24 @@ package tariff.intervalfile;
 /** What a column of figures holds. */
 public enum Role {
     /** Energy taken, or its average power; negative is export if no column of its own has that. */
-    ACTIVE("kWh"),
-    LAGGING("lagging kvarh"),
-    LEADING("leading kvarh"),
+    ACTIVE("active", "kWh"),
+    LAGGING("lagging", "lagging kvarh"),
+    LEADING("leading", "leading kvarh"),
     /** Lagging positive, leading negative. */
-    REACTIVE("kvarh"),
-    EXPORTED("exported kWh");
+    REACTIVE("reactive", "kvarh"),
+    EXPORTED("exported", "exported kWh");
 
+    private final String word;
     private final String words;
 
-    Role(String words) {
+    Role(String word, String words) {
+        this.word = word;
         this.words = words;
+    }
+
+    /** The word that a user picks it by. */
+    public String word() {
+        return word;
     }
 
     /** As messages say it. */

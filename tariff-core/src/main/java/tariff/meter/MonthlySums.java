@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
 import java.util.stream.Stream;
+import tariff.notice.Assumption;
 
 /**
  * An interval series as the bill will see it: registers of billing periods, of their windows, and of the hours or days inside.
@@ -57,6 +58,33 @@ public record MonthlySums(
 
     public List<MeteredMonth> months(List<Period> periods) {
         return periods.stream().map(this::month).toList();
+    }
+
+    /** The periods at the ends of the series that it holds only part of, which are billed as they stand. */
+    public List<Assumption> partPeriods() {
+        Period days = series.days();
+        Period first = readOn.around(days.first());
+        Period last = readOn.around(days.last());
+        List<Assumption> parts = new ArrayList<>();
+        if (series.start().isAfter(midnight(first.first()))) {
+            parts.add(part(first));
+        }
+        if (series.end().isBefore(midnight(last.last().plusDays(1)))) {
+            parts.add(part(last));
+        }
+        return parts.stream().distinct().toList();
+    }
+
+    private static Assumption part(Period whole) {
+        return new Assumption(
+                "part-period",
+                whole.toString(),
+                "the data hold only part of this billing period; it is billed as if that were all of it",
+                "give data that begin and end with a billing period");
+    }
+
+    private Instant midnight(LocalDate date) {
+        return date.atStartOfDay(series.zone()).toInstant();
     }
 
     /** The period's registers from the intervals that are present; see {@link IntervalSeries#coverage} for the others. */

@@ -22,15 +22,20 @@ public record ReadingDay(int day) {
         }
     }
 
+    /** The whole period that a date lies in. */
+    public Period around(LocalDate date) {
+        LocalDate here = date.withDayOfMonth(day);
+        LocalDate start = here.isAfter(date) ? here.minusMonths(1) : here;
+        return new Period(start, start.plusMonths(1).minusDays(1));
+    }
+
     /** The periods that the days lie in, in order; the first and the last only as far as the days go. */
     public List<Period> periods(Period days) {
-        LocalDate inFirst = days.first().withDayOfMonth(day);
-        LocalDate start = inFirst.isAfter(days.first()) ? inFirst.minusMonths(1) : inFirst;
         List<Period> periods = new ArrayList<>();
-        for (; !start.isAfter(days.last()); start = start.plusMonths(1)) {
-            LocalDate end = start.plusMonths(1).minusDays(1);
-            periods.add(new Period(
-                    start.isBefore(days.first()) ? days.first() : start, end.isAfter(days.last()) ? days.last() : end));
+        for (LocalDate next = days.first(); !next.isAfter(days.last()); ) {
+            LocalDate last = around(next).last();
+            periods.add(new Period(next, last.isAfter(days.last()) ? days.last() : last));
+            next = last.plusDays(1);
         }
         return periods;
     }

@@ -14,6 +14,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
+import tariff.notice.Assumption;
 
 class ReadingDayTest {
     private static final IntervalSeries YEAR = InventedYear.of(17, "Europe/Berlin", 15);
@@ -35,6 +36,21 @@ class ReadingDayTest {
         assertThat(new ReadingDay(day).periods(new Period(first, last)))
                 .extracting(Period::toString)
                 .containsExactly(periods.split("; "));
+    }
+
+    @Test
+    void periodsThatTheDataHoldOnlyPartOfAreNamed() {
+        assertThat(readOn(YEAR, 14).partPeriods())
+                .extracting(Assumption::where)
+                .containsExactly("2025-12-14 to 2026-01-13", "2026-12-14 to 2027-01-13");
+        assertThat(readOn(YEAR, 1).partPeriods())
+                .as("a whole year of calendar months")
+                .isEmpty();
+        IntervalSeries threeWeeks = InventedYear.between(
+                3, "Europe/Berlin", 60, LocalDate.of(2026, 3, 14), LocalDate.of(2026, 4, 2), new BitSet());
+        assertThat(MonthlySums.of(threeWeeks).partPeriods())
+                .extracting(Assumption::where)
+                .containsExactly("2026-03", "2026-04");
     }
 
     /** Nothing is billed twice, nothing is left out: the same kWh and kvarh however the year is cut. */

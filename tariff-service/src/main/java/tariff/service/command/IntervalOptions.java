@@ -3,11 +3,13 @@ package tariff.service.command;
 
 import java.io.PrintWriter;
 import java.time.ZoneId;
+import java.util.Map;
 import java.util.Optional;
 import picocli.CommandLine.Option;
 import tariff.csv.DateOrder;
 import tariff.intervalfile.GapRule;
 import tariff.intervalfile.IntervalFileOptions;
+import tariff.intervalfile.Role;
 import tariff.intervalfile.StampAt;
 import tariff.service.request.Declared;
 import tariff.service.request.IntervalTerms;
@@ -25,9 +27,22 @@ final class IntervalOptions {
 
     @Option(
             names = "--gaps",
-            description = "missing intervals: refuse, leave_out or interpolate (${DEFAULT-VALUE} unless said)",
+            description = "missing intervals: refuse, leave-out or interpolate (${DEFAULT-VALUE} unless said)",
             defaultValue = "refuse")
     private GapRule gaps;
+
+    @Option(
+            names = "--counter",
+            description = "energies are readings of registers that count up, each taken at its stamp")
+    private boolean counter;
+
+    @Option(
+            names = "--column",
+            paramLabel = "WHAT=HEADER",
+            description =
+                    "a column of intervals that its header does not tell, or a MeterReading of a feed by its link;"
+                            + " active, lagging, leading, reactive or exported: \"active=Meter 3\"")
+    private Map<Role, String> columns = Map.of();
 
     @Option(
             names = "--demand-minutes",
@@ -54,12 +69,16 @@ final class IntervalOptions {
     }
 
     private IntervalFileOptions file(Optional<DateOrder> dates, PrintWriter notes) {
-        IntervalFileOptions choices = IntervalFileOptions.defaults().gaps(gaps).progress(rows -> {
-            if (rows >= ROWS_WORTH_NEWS) {
-                notes.println(rows + " rows read");
-                notes.flush();
-            }
-        });
+        IntervalFileOptions choices = IntervalFileOptions.defaults()
+                .gaps(gaps)
+                .counter(counter)
+                .columns(columns)
+                .progress(rows -> {
+                    if (rows >= ROWS_WORTH_NEWS) {
+                        notes.println(rows + " rows read");
+                        notes.flush();
+                    }
+                });
         if (zone.isPresent()) {
             choices = choices.zone(zone.get());
         }

@@ -110,7 +110,7 @@ final class MeterFile {
         IntervalReading read = Files.intervals(file, terms.file());
         read.warnings().forEach(notes::println);
         MonthlySums sums = terms.sums(read.series(), under);
-        return new Metered(under, completed(Site.unnamed()), sums.months(), Optional.of(sums), read.assumptions());
+        return new Metered(under, completed(Site.unnamed()), sums.months(), Optional.of(sums), read.assumptions(sums));
     }
 
     private Site completed(Site site) {

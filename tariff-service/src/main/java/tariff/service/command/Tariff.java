@@ -16,6 +16,8 @@ import picocli.CommandLine.Spec;
 import picocli.CommandLine.TypeConversionException;
 import tariff.csv.DateOrder;
 import tariff.csv.DecimalMark;
+import tariff.intervalfile.GapRule;
+import tariff.intervalfile.Role;
 import tariff.meter.Unit;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
@@ -58,6 +60,8 @@ public final class Tariff implements Runnable {
         line.registerConverter(Unit.class, word -> one("unit", Unit.values(), Unit::symbol, word));
         line.registerConverter(DateOrder.class, word -> one("order", DateOrder.values(), DateOrder::word, word));
         line.registerConverter(DecimalMark.class, word -> one("mark", DecimalMark.values(), DecimalMark::word, word));
+        line.registerConverter(GapRule.class, word -> one("rule", GapRule.values(), GapRule::word, word));
+        line.registerConverter(Role.class, word -> one("column", Role.values(), Role::word, word));
         line.setUsageHelpWidth(Wrapped.WIDTH);
         line.setExecutionExceptionHandler(Tariff::explain);
         line.getSubcommands().values().forEach(each -> each.getCommandSpec().exitCodeOnInvalidInput(Exit.USAGE));

@@ -29,52 +29,50 @@ import tariff.service.shelf.Shelf;
 record Intervals(Shelf shelf) {
 
     JsonObject statements(IntervalRequest request, Uploads.Data data) {
-        Optional<Rate> rate = request.rate(shelf);
-        Site site = request.site();
-        IntervalTerms terms = request.intervals();
-        request.refuseIfWrong();
-        IntervalReading read = data.read(terms.file());
-        MonthlySums sums = terms.sums(read.series(), rate.orElseThrow());
-        Billing billing = new Billing(rate.orElseThrow(), site);
-        List<Statement> statements = billing.statements(sums.months());
-        List<Assumption> assumptions = new ArrayList<>(read.assumptions());
-        ByTheTotals.note(billing, statements).ifPresent(assumptions::add);
-        JsonObject answer =
-                StatementsJson.write(billing.rate(), statements).withAll("assumptions", assumptions, NoticeJson::write);
-        return warned(answer, read);
+        Upload upload = upload(request, data);
+        List<Statement> statements = upload.billing().statements(upload.sums().months());
+        List<Assumption> assumptions = new ArrayList<>(upload.assumptions());
+        ByTheTotals.note(upload.billing(), statements).ifPresent(assumptions::add);
+        return upload.warned(StatementsJson.write(upload.billing().rate(), statements)
+                .withAll("assumptions", assumptions, NoticeJson::write));
     }
 
     JsonObject assessment(IntervalRequest request, Uploads.Data data) {
-        Optional<Rate> rate = request.rate(shelf);
-        Site site = request.site();
-        IntervalTerms terms = request.intervals();
         Optional<Proposal> proposal = request.proposal();
-        request.refuseIfWrong();
-        IntervalReading read = data.read(terms.file());
-        MonthlySums sums = terms.sums(read.series(), rate.orElseThrow());
-        Billing billing = new Billing(rate.orElseThrow(), site);
-        Assessment assessment = Assessment.of(billing, sums, proposal.orElseThrow());
-        return warned(AssessmentJson.write(assessment.with(read.assumptions())), read);
+        Upload upload = upload(request, data);
+        Assessment assessment = Assessment.of(upload.billing(), upload.sums(), proposal.orElseThrow());
+        return upload.warned(AssessmentJson.write(assessment.with(upload.assumptions())));
     }
 
     JsonObject clauseEffects(IntervalRequest request, Uploads.Data data) {
+        Optional<ClauseTerms> asked = request.clauses();
+        Upload upload = upload(request, data);
+        ClauseEffects effects = ClauseEffects.of(
+                upload.billing(), upload.sums(), asked.orElseThrow().kvar());
+        return upload.warned(Clauses.write(
+                effects.with(upload.assumptions()),
+                asked.orElseThrow(),
+                () -> SavingsBySize.of(upload.billing(), upload.sums(), SavingsBySize.USUAL_STEPS)));
+    }
+
+    /** Reads the data once nothing is wrong with what is said beside them. */
+    private Upload upload(IntervalRequest request, Uploads.Data data) {
         Optional<Rate> rate = request.rate(shelf);
         Site site = request.site();
         IntervalTerms terms = request.intervals();
-        Optional<ClauseTerms> asked = request.clauses();
         request.refuseIfWrong();
         IntervalReading read = data.read(terms.file());
         MonthlySums sums = terms.sums(read.series(), rate.orElseThrow());
-        Billing billing = new Billing(rate.orElseThrow(), site);
-        ClauseEffects effects =
-                ClauseEffects.of(billing, sums, asked.orElseThrow().kvar()).with(read.assumptions());
-        return warned(
-                Clauses.write(
-                        effects, asked.orElseThrow(), () -> SavingsBySize.of(billing, sums, SavingsBySize.USUAL_STEPS)),
-                read);
+        return new Upload(new Billing(rate.orElseThrow(), site), sums, read);
     }
 
-    private static JsonObject warned(JsonObject answer, IntervalReading read) {
-        return answer.withAll("warnings", read.warnings(), NoticeJson::write);
+    private record Upload(Billing billing, MonthlySums sums, IntervalReading read) {
+        List<Assumption> assumptions() {
+            return read.assumptions(sums);
+        }
+
+        JsonObject warned(JsonObject answer) {
+            return answer.withAll("warnings", read.warnings(), NoticeJson::write);
+        }
     }
 }

@@ -20,8 +20,6 @@ import tariff.service.shelf.Shelf;
 
 /** What is asked of interval data that come in a body of their own: the parameters of the query, read part by part. */
 public final class IntervalRequest {
-    private static final Set<String> SAID_OF_DATA =
-            Set.of("zone", "stamps", "dates", "gaps", "demandMinutes", "slidingDemand", "readOn");
     private static final Set<String> CLAUSES = Set.of("kvar", "charts");
     private static final Set<String> BANK = Set.of(
             "fixedKvar",
@@ -72,7 +70,7 @@ public final class IntervalRequest {
 
     /** How the data are to be read. */
     public IntervalTerms intervals() {
-        return IntervalTerms.read(part(SAID_OF_DATA), findings);
+        return IntervalTerms.read(part(IntervalTerms.names()), findings);
     }
 
     /** The next few kvar, and whether charts are wanted. */

@@ -6,12 +6,18 @@ import jakarta.validation.constraints.Max;
 import jakarta.validation.constraints.Min;
 import java.time.DateTimeException;
 import java.time.ZoneId;
+import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
+import java.util.TreeSet;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import tariff.intervalfile.DateOrder;
 import tariff.intervalfile.GapRule;
 import tariff.intervalfile.IntervalFileOptions;
+import tariff.intervalfile.Role;
 import tariff.intervalfile.StampAt;
 import tariff.meter.DemandInterval;
 import tariff.meter.IntervalSeries;
@@ -47,10 +53,14 @@ public record IntervalTerms(
     private static final Map<String, DateOrder> DATES =
             Map.of("day-first", DateOrder.DAY_FIRST, "month-first", DateOrder.MONTH_FIRST);
     private static final Map<String, GapRule> GAPS =
-            Map.of("refuse", GapRule.REFUSE, "leave-out", GapRule.LEAVE_OUT, "interpolate", GapRule.INTERPOLATE);
+            Stream.of(GapRule.values()).collect(Collectors.toMap(GapRule::word, rule -> rule));
+    private static final String COLUMN = "Column";
 
     static IntervalTerms read(Written in, List<Finding> findings) {
-        IntervalFileOptions file = IntervalFileOptions.defaults().gaps(in.word("gaps", GAPS, GapRule.REFUSE));
+        IntervalFileOptions file = IntervalFileOptions.defaults()
+                .gaps(in.word("gaps", GAPS, GapRule.REFUSE))
+                .counter(in.flag("counter"))
+                .columns(columns(in));
         Optional<ZoneId> zone = in.has("zone") ? zone(in.at("zone"), findings) : Optional.empty();
         if (zone.isPresent()) {
             file = file.zone(zone.get());
@@ -68,6 +78,29 @@ public record IntervalTerms(
                 in.has("readOn") ? in.wholeNumber("readOn", 1, ReadingDay.LAST) : 1);
         findings.addAll(Declared.check(terms, ""));
         return terms;
+    }
+
+    /** What {@link #read} knows, as names of a query. */
+    static Set<String> names() {
+        Set<String> names = new TreeSet<>(
+                Set.of("zone", "stamps", "dates", "gaps", "counter", "demandMinutes", "slidingDemand", "readOn"));
+        names.addAll(columnNames());
+        return names;
+    }
+
+    /** {@code activeColumn} and so on, each the header of a column. */
+    static Set<String> columnNames() {
+        return Stream.of(Role.values()).map(role -> role.word() + COLUMN).collect(Collectors.toUnmodifiableSet());
+    }
+
+    private static Map<Role, String> columns(Written in) {
+        Map<Role, String> columns = new EnumMap<>(Role.class);
+        for (Role role : Role.values()) {
+            if (in.has(role.word() + COLUMN)) {
+                columns.put(role, in.at(role.word() + COLUMN).text());
+            }
+        }
+        return columns;
     }
 
     @AssertTrue(message = "a sliding demand with the minutes that it is averaged over")

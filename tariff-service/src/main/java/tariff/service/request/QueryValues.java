@@ -13,7 +13,7 @@ import tariff.notice.Finding;
 record QueryValues(List<Finding> findings) {
     private static final Set<String> TEXTS = Set.of("rate", "zone", "stamps", "dates", "gaps", "site");
     private static final Set<String> REPEATED = Set.of("option", "agreed");
-    private static final Set<String> FLAGS = Set.of("slidingDemand", "charts");
+    private static final Set<String> FLAGS = Set.of("slidingDemand", "charts", "counter");
     private static final Set<String> EITHER = Set.of("true", "false");
     private static final String STEPS = "stepsKvar";
     private static final String NUMBER = "[+-]?(\\d{1,40}(\\.\\d{0,40})?|\\.\\d{1,40})([eE][+-]?\\d{1,3})?";
@@ -42,7 +42,7 @@ record QueryValues(List<Finding> findings) {
         if (FLAGS.contains(name)) {
             return EITHER.contains(text) ? (Object) Boolean.valueOf(text) : text;
         }
-        return TEXTS.contains(name) ? text : number(text);
+        return TEXTS.contains(name) || IntervalTerms.columnNames().contains(name) ? text : number(text);
     }
 
     /** What is no number stays a text, to be refused where a number is asked for. */

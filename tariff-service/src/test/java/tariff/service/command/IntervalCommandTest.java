@@ -81,7 +81,8 @@ class IntervalCommandTest {
                 .startsWith("2025-01-01 to 2025-01-13", "2025-01-14 to 2025-02-13")
                 .endsWith("2025-12-14 to 2025-12-31");
         assertThat(run("statement", "--read-on", "14"))
-                .contains("- 2025-01-01 to 2025-12-31: the rate counts by the hour");
+                .contains("- 2025-01-01 to 2025-12-31: the rate counts by the hour")
+                .contains("- 2024-12-14 to 2025-01-13, 2025-12-14 to 2026-01-13: the data hold only part");
     }
 
     @ParameterizedTest
@@ -92,6 +93,7 @@ class IntervalCommandTest {
                 "--demand-minutes=3 | /demandMinutes: is out of range; found 3; allowed: 5 to 60 minutes",
                 "--demand-minutes=45 | /demandMinutes: is not a time that peaks of these data can be averaged over; found 45;"
                         + " allowed: a multiple of 60 minutes that divides an hour",
+                "--column=leading=kVAh | headers: there is no column \"kVAh\" for leading kvarh",
                 "--sliding | does not hold together; allowed: a sliding demand with the minutes that it is averaged over",
             })
     void whatIntervalsCannotGiveIsAFinding(String option, String finding) {

@@ -29,12 +29,14 @@ final class Contract implements Filter {
     private static final String JSON = "application/json";
 
     private final Map<?, ?> paths;
+    private final Map<?, ?> shared;
     private final SchemaRegistry registry;
 
     Contract() {
         String openapi = Examples.text("openapi/openapi.json");
-        paths = map(map(JsonTree.read(openapi.getBytes(java.nio.charset.StandardCharsets.UTF_8)))
-                .get("paths"));
+        Map<?, ?> contract = map(JsonTree.read(openapi.getBytes(java.nio.charset.StandardCharsets.UTF_8)));
+        paths = map(contract.get("paths"));
+        shared = map(map(contract.get("components")).get("parameters"));
         registry = SchemaRegistry.withDialects(
                 List.of(Dialects.getOpenApi31(), Dialects.getDraft202012()),
                 builder -> builder.defaultDialectId(Dialects.getOpenApi31().getId())
@@ -56,9 +58,22 @@ final class Contract implements Filter {
 
     /** The parameters that an operation documents. */
     List<String> parameters(String path) {
-        Object documented = map(map(paths.get(path)).get("post")).get("parameters");
-        return ((List<?>) documented)
-                .stream().map(each -> String.valueOf(map(each).get("name"))).toList();
+        return parameters(map(map(paths.get(path)).get("post"))).stream()
+                .map(each -> String.valueOf(each.get("name")))
+                .toList();
+    }
+
+    /** With those that several operations share in full. */
+    private List<Map<?, ?>> parameters(Map<?, ?> operation) {
+        List<Map<?, ?>> all = new ArrayList<>();
+        for (Object each : operation.get("parameters") instanceof List<?> list ? list : List.of()) {
+            String reference = String.valueOf(map(each).get("$ref"));
+            all.add(
+                    map(each).containsKey("$ref")
+                            ? map(shared.get(reference.substring(reference.lastIndexOf('/') + 1)))
+                            : map(each));
+        }
+        return all;
     }
 
     @Override
@@ -104,13 +119,12 @@ final class Contract implements Filter {
     }
 
     /** Parameters that the contract does not know, and those it requires that are missing. */
-    private static List<String> undocumented(Map<?, ?> operation, Map<String, String> given) {
+    private List<String> undocumented(Map<?, ?> operation, Map<String, String> given) {
         List<String> wrong = new ArrayList<>(given.keySet());
-        Object documented = operation.get("parameters");
-        for (Object each : documented instanceof List<?> list ? list : List.of()) {
-            String name = String.valueOf(map(each).get("name"));
-            boolean query = "query".equals(map(each).get("in"));
-            if (query && !wrong.remove(name) && Boolean.TRUE.equals(map(each).get("required"))) {
+        for (Map<?, ?> each : parameters(operation)) {
+            String name = String.valueOf(each.get("name"));
+            boolean query = "query".equals(each.get("in"));
+            if (query && !wrong.remove(name) && Boolean.TRUE.equals(each.get("required"))) {
                 wrong.add(name + " is missing");
             }
         }

@@ -224,6 +224,22 @@ class UploadTest extends Served {
                 .body("findings.find { it.pointer == '/readOn' }.allowed", equalTo("a whole number from 1 to 28"));
     }
 
+    /** Registers at 1,000 kWh and 500 kvarh that add 100 and 75 an hour, and a second meter's column beside them; own arithmetic. */
+    @Test
+    void countersAndColumnsThatHeadersDoNotTellAreReadAsSaid() {
+        StringBuilder rows = new StringBuilder("end,kWh meter 1,kWh meter 2,kvarh\n");
+        for (int hour = 0; hour < 24; hour++) {
+            rows.append("2026-03-02 ").append(hour < 10 ? "0" : "").append(hour).append(":00,");
+            rows.append(1000 + 100 * hour).append(",7,").append(500 + 75 * hour).append('\n');
+        }
+        Map<String, String> said =
+                Map.of("rate", HOURLY, "zone", ZONE, "counter", "true", "activeColumn", "kWh%20meter%201");
+        upload("/interval-statements", rows.toString(), said)
+                .statusCode(200)
+                .body("statements[0].lines[2].derivation.how", equalTo("345 kWh × 0.2756"))
+                .body("assumptions.code", hasItem("part-period"));
+    }
+
     @Test
     void aSlidingDemandNeedsItsMinutes() {
         upload("/interval-statements", day(), Map.of("rate", HOURLY, "zone", ZONE, "slidingDemand", "true"))
