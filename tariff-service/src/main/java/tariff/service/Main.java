@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.service;
 
+import java.time.Duration;
+import tariff.service.command.Patience;
 import tariff.service.command.Tariff;
 
 /** The entry point. */
@@ -9,6 +11,8 @@ public final class Main {
 
     /** Runs a command and ends with its exit code: see {@link tariff.service.command.Exit}. */
     public static void main(String[] args) {
-        System.exit(Tariff.commandLine().execute(args));
+        System.exit(Tariff.commandLine()
+                .setExecutionStrategy(new Patience(Duration.ofSeconds(2)))
+                .execute(args));
     }
 }
