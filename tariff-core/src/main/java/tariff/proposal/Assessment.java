@@ -99,7 +99,8 @@ public record Assessment(
         assumptions.addAll(MonthOrder.gaps(sorted));
         exact.flatMap(walked -> ByTheTotals.note(billing, statements(today))).ifPresent(assumptions::add);
         Agreement.of(billing, past, year).assumption().ifPresent(assumptions::add);
-        assumptions.addAll(BankAssumptions.of(billing.rate(), proposal, year, exact.isPresent()));
+        assumptions.addAll(
+                BankAssumptions.of(billing.rate(), proposal, year, exact.isPresent(), SampleWeeks.of(savings)));
         return new Assessment(
                 billing,
                 proposal,

@@ -6,6 +6,7 @@ import static tariff.meter.Register.PEAK_LAGGING_KVAR;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import tariff.correction.CapacitorBank;
 import tariff.meter.MeteredMonth;
 import tariff.notice.Assumption;
@@ -19,11 +20,13 @@ final class BankAssumptions {
 
     private BankAssumptions() {}
 
-    static List<Assumption> of(Rate rate, Proposal proposal, List<MeteredMonth> year, boolean exact) {
+    /** @param open how many weeks of interval data would settle what totals leave open, if they leave much */
+    static List<Assumption> of(
+            Rate rate, Proposal proposal, List<MeteredMonth> year, boolean exact, Optional<SampleWeeks> open) {
         CapacitorBank bank = proposal.bank();
         List<Assumption> all = new ArrayList<>();
         if (!exact) {
-            all.addAll(ofTotals(rate, year));
+            all.addAll(ofTotals(rate, year, open));
         }
         all.add(new Assumption(
                 "bank-always-on",
@@ -59,14 +62,18 @@ final class BankAssumptions {
     }
 
     /** What monthly totals leave open. */
-    private static List<Assumption> ofTotals(Rate rate, List<MeteredMonth> year) {
+    private static List<Assumption> ofTotals(Rate rate, List<MeteredMonth> year, Optional<SampleWeeks> open) {
         List<Assumption> all = new ArrayList<>();
         all.add(new Assumption(
                 "kvarh-spread",
                 YEAR,
                 "a month's kvarh do not say when they were drawn: the low savings take them as all drawn at the peak, the high as drawn"
                         + " evenly, the central lie between by an assumed load curve",
-                INTERVALS));
+                INTERVALS
+                        + open.map(
+                                        weeks -> "; " + weeks.words()
+                                                + " of them, spread over the year, bring the kvarh taken off to within about 10 %")
+                                .orElse("")));
         if (year.stream().anyMatch(month -> !month.totals().has(PEAK_LAGGING_KVAR))) {
             all.add(new Assumption(
                     "highest-kvar",

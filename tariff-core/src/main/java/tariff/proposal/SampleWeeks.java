@@ -14,7 +14,7 @@ import tariff.correction.Estimate;
 import tariff.meter.Register;
 
 /**
- * How many weeks of interval data, spread over the year, would say to within ±10 %, nine times in ten, what a bank takes off the lagging
+ * How many weeks of interval data, spread over the year, would say to within ±10 %, about nine times in ten, what a bank takes off the lagging
  * kvarh of the bills.
  *
  * <p>Each week shows the share of its kvarh that the bank takes off; the bills give the kvarh. Shares of n weeks that vary by a coefficient

@@ -84,7 +84,7 @@ final class SizeAnswers {
         Set<Assumption> all = new LinkedHashSet<>();
         today.months().forEach(month -> all.addAll(month.asItIs().assumptions()));
         all.addAll(gaps);
-        all.addAll(BankAssumptions.of(billing.rate(), Proposal.of(bank), year, exact));
+        all.addAll(BankAssumptions.of(billing.rate(), Proposal.of(bank), year, exact, Optional.empty()));
         return List.copyOf(all);
     }
 
