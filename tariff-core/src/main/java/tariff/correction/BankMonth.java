@@ -6,9 +6,7 @@ import static tariff.meter.Register.ENERGY_KWH;
 import static tariff.meter.Register.LAGGING_KVARH;
 import static tariff.meter.Register.LEADING_KVARH;
 import static tariff.meter.Register.PEAK_KVA;
-import static tariff.meter.Register.PEAK_KW;
 import static tariff.meter.Register.PEAK_LAGGING_KVAR;
-import static tariff.meter.Register.PEAK_LEADING_KVAR;
 import static tariff.meter.Register.POWER_FACTOR;
 
 import java.math.BigDecimal;
@@ -38,9 +36,6 @@ import tariff.meter.Window;
  * @param zone the clock that windows and months go by
  */
 public record BankMonth(CapacitorBank bank, Map<String, Window> windows, ZoneId zone) {
-    private static final BigDecimal WATTS_A_KILOWATT = BigDecimal.valueOf(1000);
-    private static final BigDecimal DEAD_BAND = new BigDecimal("0.6666666667");
-
     /** Hours of a period, and those in which the bank may be on. */
     private record Hours(BigDecimal all, BigDecimal on) {
         boolean isInterrupted() {
@@ -94,7 +89,7 @@ public record BankMonth(CapacitorBank bank, Map<String, Window> windows, ZoneId 
             after = after.with(LAGGING_KVARH, left).with(LEADING_KVARH, sent);
             after = energies(known, after, ownLosses(delivered, hours.on()), left, sent);
         }
-        return peaks(known, after, hours, estimate);
+        return new BankPeaks(bank, hours.isInterrupted(), estimate).in(known, after);
     }
 
     /** Fills in what the correction needs and the bill leaves out. */
@@ -121,7 +116,9 @@ public record BankMonth(CapacitorBank bank, Map<String, Window> windows, ZoneId 
             return left;
         }
         BigDecimal kept = switch (estimate) {
-            case LOW -> left.add(targetKvarh(known).min(on.laggingKvarh())).add(deadBandKvarh(hours.on()));
+            case LOW ->
+                left.add(targetKvarh(known).min(on.laggingKvarh()))
+                        .add(bank.deadBandKvar().multiply(hours.on()));
             case CENTRAL -> {
                 BigDecimal aim = targetKvarh(known).multiply(hours.on()).divide(hours.all(), Triangle.PRECISION);
                 yield left.max(aim.min(on.laggingKvarh()));
@@ -140,17 +137,12 @@ public record BankMonth(CapacitorBank bank, Map<String, Window> windows, ZoneId 
                 .orElse(BigDecimal.ZERO);
     }
 
-    /** A controller does not answer within two thirds of its smallest step. Common practice, no source. */
-    private BigDecimal deadBandKvarh(BigDecimal hours) {
-        return bank.smallestStepKvar().multiply(DEAD_BAND).multiply(hours);
-    }
-
     /** Leading kvarh: only the fixed kvar send any back, c × T′ less what they remove; and steps within their dead band, at the worst. */
     private BigDecimal created(ReactiveMonth load, Hours hours, Estimate estimate) {
         BigDecimal fixed = bank.effectiveFixedKvar();
         ReactiveMonth on = load.during(hours.on(), estimate);
         BigDecimal sent = on.left(fixed, estimate).subtract(on.laggingKvarh()).add(fixed.multiply(hours.on()));
-        BigDecimal hunting = estimate == Estimate.LOW ? deadBandKvarh(hours.on()) : BigDecimal.ZERO;
+        BigDecimal hunting = estimate == Estimate.LOW ? bank.deadBandKvar().multiply(hours.on()) : BigDecimal.ZERO;
         return sent.max(BigDecimal.ZERO).add(hunting);
     }
 
@@ -161,12 +153,7 @@ public record BankMonth(CapacitorBank bank, Map<String, Window> windows, ZoneId 
     private BigDecimal ownLosses(BigDecimal delivered, BigDecimal hours) {
         BigDecimal least = bank.effectiveFixedKvar().multiply(hours);
         BigDecimal most = bank.effectiveKvar().multiply(hours);
-        return ownKilowatts(delivered.max(least).min(most));
-    }
-
-    /** kW for kvar, kWh for kvarh. */
-    private BigDecimal ownKilowatts(BigDecimal kvar) {
-        return kvar.multiply(bank.wattsPerKvar()).divide(WATTS_A_KILOWATT, Triangle.PRECISION);
+        return bank.ownKilowatts(delivered.max(least).min(most));
     }
 
     private static Readings energies(
@@ -184,55 +171,6 @@ public record BankMonth(CapacitorBank bank, Map<String, Window> windows, ZoneId 
             }
         }
         return result;
-    }
-
-    private Readings peaks(Readings known, Readings before, Hours hours, Estimate estimate) {
-        BigDecimal fixed = bank.effectiveFixedKvar();
-        BigDecimal switched = bank.effectiveSwitchedKvar();
-        BigDecimal slack = estimate == Estimate.LOW ? bank.smallestStepKvar().multiply(DEAD_BAND) : BigDecimal.ZERO;
-        boolean asBefore = estimate == Estimate.LOW && hours.isInterrupted();
-        Readings after = before;
-        Optional<BigDecimal> kw = known.get(PEAK_KW);
-        Optional<BigDecimal> kva = known.get(PEAK_KVA);
-        if (kw.isPresent()) {
-            after = after.with(PEAK_KW, kw.get().add(ownPeak(hours, estimate)));
-        }
-        if (kw.isPresent() && kva.isPresent()) {
-            BigDecimal lost = ownPeak(hours, estimate);
-            BigDecimal apparent = new PeakApparent(kw.get(), kva.get().max(kw.get())).after(fixed, switched, estimate);
-            BigDecimal aimed = bank.isAutomatic() && estimate != Estimate.HIGH
-                    ? bank.controller()
-                            .targetPowerFactor()
-                            .map(pf -> kw.get().divide(pf, Triangle.PRECISION))
-                            .orElse(kw.get())
-                    : kw.get();
-            BigDecimal reached = apparent.max(aimed).add(slack);
-            BigDecimal bounded = bank.isAutomatic() && fixed.signum() == 0 ? reached.min(kva.get()) : reached;
-            BigDecimal highest = asBefore ? bounded.max(kva.get()) : bounded;
-            after = after.with(
-                    PEAK_KVA, estimate == Estimate.HIGH ? highest.max(kw.get().add(lost)) : highest.add(lost));
-        }
-        Optional<BigDecimal> kvar = known.get(PEAK_LAGGING_KVAR);
-        if (kvar.isPresent() && !asBefore) {
-            after = after.with(
-                    PEAK_LAGGING_KVAR,
-                    kvar.get()
-                            .subtract(fixed)
-                            .subtract(switched)
-                            .add(slack)
-                            .max(BigDecimal.ZERO)
-                            .min(kvar.get()));
-        }
-        BigDecimal sent = known.get(PEAK_LEADING_KVAR).orElse(BigDecimal.ZERO);
-        return after.with(PEAK_LEADING_KVAR, estimate == Estimate.HIGH ? sent : sent.add(fixed));
-    }
-
-    /** The bank's own kW at the highest kW: all of them, but only what is always on in the high estimate. */
-    private BigDecimal ownPeak(Hours hours, Estimate estimate) {
-        if (estimate != Estimate.HIGH) {
-            return ownKilowatts(bank.effectiveKvar());
-        }
-        return hours.isInterrupted() ? BigDecimal.ZERO : ownKilowatts(bank.effectiveFixedKvar());
     }
 
     /** A safe upper limit of the lagging kvar: the demand read, else the highest kVA. */

@@ -30,6 +30,8 @@ public record CapacitorBank(
         BigDecimal wattsPerKvar,
         Optional<Window> off) {
     private static final BigDecimal MOST_WATTS = BigDecimal.valueOf(1000);
+    private static final BigDecimal WATTS_A_KILOWATT = BigDecimal.valueOf(1000);
+    private static final BigDecimal DEAD_BAND = new BigDecimal("0.6666666667");
     private static final BigDecimal MOST_REACTOR = new BigDecimal("0.3");
 
     /** Throws {@link IllegalArgumentException} for a value outside its range, naming it. */
@@ -154,6 +156,16 @@ public record CapacitorBank(
                 .min(BigDecimal::compareTo)
                 .map(this::effective)
                 .orElse(BigDecimal.ZERO);
+    }
+
+    /** A controller does not answer within two thirds of its smallest step. Common practice, no source. */
+    BigDecimal deadBandKvar() {
+        return smallestStepKvar().multiply(DEAD_BAND);
+    }
+
+    /** What the bank burns: kW for kvar that it gives, kWh for kvarh. */
+    BigDecimal ownKilowatts(BigDecimal kvar) {
+        return kvar.multiply(wattsPerKvar).divide(WATTS_A_KILOWATT, Triangle.PRECISION);
     }
 
     public boolean isAutomatic() {

@@ -34,8 +34,9 @@ import tariff.rate.Rate;
  * rise with its fixed kvar and smallest step; kVA falls with all kvar and rises with fixed kvar and smallest step. A time switch is the same
  * for all of them: it leaves each the same hours, so the same holds in those.
  *
- * <p>A bank's own losses raise kWh and kW, the larger bank's most. Their amounts are those of the smaller bank. A larger one's might help a
- * power factor or a share of the kWh, so everything reactive and the kVA are lowered in the same ratio.
+ * <p>A bank's own losses raise kWh and kW, the larger bank's most. Their amounts are those of the smaller bank; in the high estimate, where
+ * coarse steps deliver least, those of its fixed kvar alone. More losses might help a power factor or a share of the kWh, so everything
+ * reactive and the kVA are lowered in the same ratio.
  */
 final class KindestMonth {
     /** A step too small to leave a trace, for a bank that has none. */
@@ -51,7 +52,8 @@ final class KindestMonth {
         BigDecimal step = smaller.stepsKvar().stream()
                 .min(BigDecimal::compareTo)
                 .orElse(larger.isAutomatic() ? TRACE : BigDecimal.ZERO);
-        this.withSmaller = month(smaller, rate);
+        this.withSmaller =
+                month(estimate == Estimate.HIGH ? smaller.withKvar(smaller.fixedKvar(), List.of()) : smaller, rate);
         this.withLarger = month(larger, rate);
         this.leastLagging = month(larger.isAutomatic() ? divided(larger, larger.fixedKvar(), step) : larger, rate);
         this.leastApparent =
