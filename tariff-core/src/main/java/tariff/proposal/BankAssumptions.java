@@ -60,11 +60,12 @@ final class BankAssumptions {
     }
 
     private static String inService(CapacitorBank bank) {
-        String hours = bank.off().isPresent() ? "always" : "in every hour";
+        boolean always = bank.off().isEmpty();
         if (!bank.isAutomatic()) {
-            return bank.off().isPresent() ? "it is always on" : "the bank is on in every hour of the year";
+            return always ? "the bank is on in every hour of the year" : "it is always on";
         }
-        return (bank.fixedKvar().signum() > 0 ? "the fixed kvar are on " + hours + "; " : "")
+        String fixed = always ? "the fixed kvar are on in every hour; " : "the fixed kvar are always on; ";
+        return (bank.fixedKvar().signum() > 0 ? fixed : "")
                 + "the steps follow the load and send nothing back but for two thirds of the smallest step, which the low savings"
                 + " count against the bank";
     }

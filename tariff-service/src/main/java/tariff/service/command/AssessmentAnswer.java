@@ -38,9 +38,9 @@ record AssessmentAnswer(Assessment assessment) implements Format.Printable {
                 Wrapped.text(
                         "\"To that point\" and \"to unity\" are what the bill would fall by if reactive load were lower and"
                                 + " nothing else changed: kWh, kW, fixed charges and floors stand on both sides, for no capacitor removes them."));
-        out.append("\nThe proposal: ")
-                .append(ProposedText.of(assessment.proposal()))
-                .append("\n\n")
+        out.append('\n')
+                .append(Wrapped.text("The proposal: " + ProposedText.of(assessment.proposal())))
+                .append('\n')
                 .append(savings());
         assessment.whyNoPayback().ifPresent(why -> out.append(Wrapped.text("  No payback: " + why + ".")));
         reasons().forEach(reason -> out.append(Wrapped.text("  " + reason + ".")));
