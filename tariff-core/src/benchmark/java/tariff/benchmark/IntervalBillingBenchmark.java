@@ -50,7 +50,7 @@ public class IntervalBillingBenchmark {
     private final Rate rate = RateFile.parse(RATE);
     private final Billing billing = new Billing(rate, Site.unnamed());
     private final Map<String, Window> windows =
-            Map.of("day", rate.definition().windows().get("day").window());
+            Map.of("day", rate.definition().windows().get("day"));
     private final WindowCalendar calendar = new WindowCalendar(series, windows);
     private final boolean[] inDay = inDay();
 

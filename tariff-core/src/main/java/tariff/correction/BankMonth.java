@@ -6,37 +6,41 @@ import static tariff.meter.Register.ENERGY_KWH;
 import static tariff.meter.Register.LAGGING_KVARH;
 import static tariff.meter.Register.LEADING_KVARH;
 import static tariff.meter.Register.PEAK_KVA;
-import static tariff.meter.Register.PEAK_KW;
 import static tariff.meter.Register.PEAK_LAGGING_KVAR;
-import static tariff.meter.Register.PEAK_LEADING_KVAR;
 import static tariff.meter.Register.POWER_FACTOR;
 
 import java.math.BigDecimal;
+import java.time.ZoneId;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
 import java.util.function.Function;
+import org.jspecify.annotations.Nullable;
 import tariff.meter.Derivable;
 import tariff.meter.MeteredMonth;
+import tariff.meter.Period;
 import tariff.meter.Readings;
 import tariff.meter.Triangle;
+import tariff.meter.Window;
 
 /**
- * A month as the meter would have shown it with a bank in service. kW stay as they are but for the bank's own losses; kvarh and kVA move
- * as far as physics allows.
+ * A month as the meter would have shown it with a bank in service. kW and kWh stay as they are but for the bank's own losses; kvarh and kVA
+ * move as far as physics allows.
+ *
+ * <p>A time switch leaves the bank T′ of a period's T hours. The kvarh move in those alone, see {@link ReactiveMonth#during}. The highest
+ * kVA and kvar may have fallen while the bank was off: the low estimate leaves them as high as they were, central and high take them to
+ * have fallen while it was on. How often a controller may switch is not seen in a month's totals.
  *
  * @param bank the bank
- * @param windowHours hours of each of the rate's windows in a period; a window it does not know keeps its readings
+ * @param windows the rate's windows by name; one that is not among them keeps its readings
+ * @param zone the clock that windows and months go by
  */
-public record BankMonth(CapacitorBank bank, WindowHours windowHours) {
-    private static final BigDecimal HOURS_A_DAY = BigDecimal.valueOf(24);
-    private static final BigDecimal WATTS_A_KILOWATT = BigDecimal.valueOf(1000);
-    private static final BigDecimal DEAD_BAND = new BigDecimal("0.6666666667");
-
-    /** The hours of a window in a month. */
-    @FunctionalInterface
-    public interface WindowHours {
-        Optional<BigDecimal> of(MeteredMonth month, String window);
+public record BankMonth(CapacitorBank bank, Map<String, Window> windows, ZoneId zone) {
+    /** Hours of a period, and those in which the bank may be on. */
+    private record Hours(BigDecimal all, BigDecimal on) {
+        boolean isInterrupted() {
+            return on.compareTo(all) < 0;
+        }
     }
 
     /** The month with the bank in service. */
@@ -44,35 +48,48 @@ public record BankMonth(CapacitorBank bank, WindowHours windowHours) {
         if (bank.ratedKvar().signum() == 0) {
             return month;
         }
-        BigDecimal hours = BigDecimal.valueOf(month.period().days()).multiply(HOURS_A_DAY);
-        Readings totals = corrected(month.totals(), month.totals(), hours, estimate);
-        Map<String, Readings> windows = new TreeMap<>();
-        month.windows()
-                .forEach((name, readings) -> windows.put(
-                        name,
-                        windowHours
-                                .of(month, name)
-                                .map(inWindow -> corrected(readings, month.totals(), inWindow, estimate))
-                                .orElse(readings)));
-        return month.with(totals).withWindows(windows);
+        Period period = month.period();
+        Readings totals = corrected(month.totals(), month.totals(), hours(period), estimate);
+        Map<String, Readings> corrected = new TreeMap<>(month.windows());
+        corrected.replaceAll((name, readings) -> {
+            @Nullable Window window = windows.get(name);
+            return window == null ? readings : corrected(readings, month.totals(), hours(period, window), estimate);
+        });
+        return month.with(totals).withWindows(corrected);
+    }
+
+    private Hours hours(Period period) {
+        BigDecimal all = period.hours(zone);
+        return hours(all, bank.off().map(off -> off.hoursIn(period, zone)));
+    }
+
+    private Hours hours(Period period, Window window) {
+        return hours(window.hoursIn(period, zone), bank.off().map(off -> off.hoursIn(period, zone, window)));
+    }
+
+    private static Hours hours(BigDecimal all, Optional<BigDecimal> off) {
+        return new Hours(all, all.subtract(off.orElse(BigDecimal.ZERO)));
     }
 
     /** @param whole the whole month's readings, whose peaks bound those of a window that prints none */
-    private Readings corrected(Readings before, Readings whole, BigDecimal hours, Estimate estimate) {
+    private Readings corrected(Readings before, Readings whole, Hours hours, Estimate estimate) {
+        if (hours.on().signum() == 0) {
+            return before;
+        }
         Readings known = completed(before);
         Readings after = known;
         Optional<BigDecimal> lagging = known.get(LAGGING_KVARH);
-        if (lagging.isPresent() && hours.signum() > 0) {
-            ReactiveMonth load = new ReactiveMonth(lagging.get(), hours, highest(known, whole), likely(known, whole));
-            BigDecimal left = laggingLeft(load, known, hours, estimate);
-            BigDecimal sent = leadingAfter(load, known.get(LEADING_KVARH).orElse(BigDecimal.ZERO), hours, estimate);
+        if (lagging.isPresent()) {
+            ReactiveMonth load =
+                    new ReactiveMonth(lagging.get(), hours.all(), highest(known, whole), likely(known, whole));
+            BigDecimal left = lagging.get().subtract(removed(load, known, hours, estimate));
+            BigDecimal created = created(load, hours, estimate);
+            BigDecimal sent = known.get(LEADING_KVARH).orElse(BigDecimal.ZERO).add(created);
+            BigDecimal delivered = created.add(removed(load, known, hours, estimate.opposite()));
             after = after.with(LAGGING_KVARH, left).with(LEADING_KVARH, sent);
-            BigDecimal switched = lagging.get()
-                    .subtract(laggingLeft(load, known, hours, estimate.opposite()))
-                    .max(BigDecimal.ZERO);
-            after = energies(known, after, ownLosses(hours, switched), left, sent);
+            after = energies(known, after, ownLosses(delivered, hours.on()), left, sent);
         }
-        return peaks(known, after, estimate);
+        return new BankPeaks(bank, hours.isInterrupted(), estimate).in(known, after);
     }
 
     /** Fills in what the correction needs and the bill leaves out. */
@@ -87,49 +104,56 @@ public record BankMonth(CapacitorBank bank, WindowHours windowHours) {
         return known;
     }
 
-    private BigDecimal laggingLeft(ReactiveMonth load, Readings known, BigDecimal hours, Estimate estimate) {
-        BigDecimal left = load.left(bank.effectiveKvar(), estimate);
+    /** Lagging kvarh that the bank takes from the meter. */
+    private BigDecimal removed(ReactiveMonth load, Readings known, Hours hours, Estimate estimate) {
+        ReactiveMonth on = load.during(hours.on(), estimate);
+        return on.laggingKvarh().subtract(laggingLeft(on, known, hours, estimate));
+    }
+
+    private BigDecimal laggingLeft(ReactiveMonth on, Readings known, Hours hours, Estimate estimate) {
+        BigDecimal left = on.left(bank.effectiveKvar(), estimate);
         if (!bank.isAutomatic()) {
             return left;
         }
-        BigDecimal aim = targetKvarh(known).min(load.laggingKvarh());
         BigDecimal kept = switch (estimate) {
-            case LOW -> left.add(aim).add(deadBandKvarh(hours));
-            case CENTRAL -> left.max(aim);
+            case LOW ->
+                left.add(targetKvarh(known).min(on.laggingKvarh()))
+                        .add(bank.deadBandKvar().multiply(hours.on()));
+            case CENTRAL -> {
+                BigDecimal aim = targetKvarh(known).multiply(hours.on()).divide(hours.all(), Triangle.PRECISION);
+                yield left.max(aim.min(on.laggingKvarh()));
+            }
             case HIGH -> left;
         };
-        BigDecimal withFixedAlone = load.left(bank.effectiveFixedKvar(), estimate);
+        BigDecimal withFixedAlone = on.left(bank.effectiveFixedKvar(), estimate);
         return kept.min(withFixedAlone);
     }
 
-    /** What a controller leaves on purpose: the kvarh of the power factor it aims at. */
+    /** What a controller leaves on purpose at the most: the kvarh of the power factor it aims at. */
     private BigDecimal targetKvarh(Readings known) {
-        return bank.targetPowerFactor()
+        return bank.controller()
+                .targetPowerFactor()
                 .flatMap(pf -> known.get(ENERGY_KWH).map(kwh -> kwh.multiply(Triangle.tangent(pf))))
                 .orElse(BigDecimal.ZERO);
     }
 
-    /** A controller does not answer within two thirds of its smallest step. Common practice, no source. */
-    private BigDecimal deadBandKvarh(BigDecimal hours) {
-        return bank.smallestStepKvar().multiply(DEAD_BAND).multiply(hours);
-    }
-
-    /** Only what is always on sends kvarh back: lagging after − leading after = lagging − leading − c × T. */
-    private BigDecimal leadingAfter(ReactiveMonth load, BigDecimal before, BigDecimal hours, Estimate estimate) {
+    /** Leading kvarh: only the fixed kvar send any back, c × T′ less what they remove; and steps within their dead band, at the worst. */
+    private BigDecimal created(ReactiveMonth load, Hours hours, Estimate estimate) {
         BigDecimal fixed = bank.effectiveFixedKvar();
-        BigDecimal created =
-                load.left(fixed, estimate).subtract(load.laggingKvarh()).add(fixed.multiply(hours));
-        BigDecimal hunting = estimate == Estimate.LOW ? deadBandKvarh(hours) : BigDecimal.ZERO;
-        return before.add(created.max(BigDecimal.ZERO)).add(hunting);
+        ReactiveMonth on = load.during(hours.on(), estimate);
+        BigDecimal sent = on.left(fixed, estimate).subtract(on.laggingKvarh()).add(fixed.multiply(hours.on()));
+        BigDecimal hunting = estimate == Estimate.LOW ? bank.deadBandKvar().multiply(hours.on()) : BigDecimal.ZERO;
+        return sent.max(BigDecimal.ZERO).add(hunting);
     }
 
-    /** kWh of the bank itself, which is dearest where the steps work most: so least in the high estimate, most in the low. */
-    private BigDecimal ownLosses(BigDecimal hours, BigDecimal switchedKvarh) {
-        BigDecimal delivered = bank.effectiveFixedKvar().multiply(hours);
-        if (bank.isAutomatic()) {
-            delivered = delivered.add(switchedKvarh);
-        }
-        return delivered.multiply(bank.wattsPerKvar()).divide(WATTS_A_KILOWATT, Triangle.PRECISION);
+    /**
+     * kWh of the bank itself. What it delivers is what lags less and what leads more; that is dearest where the steps work most, so the
+     * least goes with the high estimate and the most with the low. The fixed kvar deliver while they are on, whatever the load.
+     */
+    private BigDecimal ownLosses(BigDecimal delivered, BigDecimal hours) {
+        BigDecimal least = bank.effectiveFixedKvar().multiply(hours);
+        BigDecimal most = bank.effectiveKvar().multiply(hours);
+        return bank.ownKilowatts(delivered.max(least).min(most));
     }
 
     private static Readings energies(
@@ -147,38 +171,6 @@ public record BankMonth(CapacitorBank bank, WindowHours windowHours) {
             }
         }
         return result;
-    }
-
-    private Readings peaks(Readings known, Readings before, Estimate estimate) {
-        BigDecimal fixed = bank.effectiveFixedKvar();
-        BigDecimal switched = bank.effectiveSwitchedKvar();
-        BigDecimal slack = estimate == Estimate.LOW ? bank.smallestStepKvar().multiply(DEAD_BAND) : BigDecimal.ZERO;
-        Readings after = before;
-        Optional<BigDecimal> kw = known.get(PEAK_KW);
-        Optional<BigDecimal> kva = known.get(PEAK_KVA);
-        if (kw.isPresent() && kva.isPresent()) {
-            BigDecimal apparent = new PeakApparent(kw.get(), kva.get().max(kw.get())).after(fixed, switched, estimate);
-            BigDecimal aimed = bank.isAutomatic() && estimate != Estimate.HIGH
-                    ? bank.targetPowerFactor()
-                            .map(pf -> kw.get().divide(pf, Triangle.PRECISION))
-                            .orElse(kw.get())
-                    : kw.get();
-            BigDecimal reached = apparent.max(aimed).add(slack);
-            after = after.with(PEAK_KVA, bank.isAutomatic() && fixed.signum() == 0 ? reached.min(kva.get()) : reached);
-        }
-        Optional<BigDecimal> kvar = known.get(PEAK_LAGGING_KVAR);
-        if (kvar.isPresent()) {
-            after = after.with(
-                    PEAK_LAGGING_KVAR,
-                    kvar.get()
-                            .subtract(fixed)
-                            .subtract(switched)
-                            .add(slack)
-                            .max(BigDecimal.ZERO)
-                            .min(kvar.get()));
-        }
-        BigDecimal sent = known.get(PEAK_LEADING_KVAR).orElse(BigDecimal.ZERO);
-        return after.with(PEAK_LEADING_KVAR, estimate == Estimate.HIGH ? sent : sent.add(fixed));
     }
 
     /** A safe upper limit of the lagging kvar: the demand read, else the highest kVA. */

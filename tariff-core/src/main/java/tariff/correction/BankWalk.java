@@ -3,12 +3,14 @@ package tariff.correction;
 
 import java.math.BigDecimal;
 import java.math.RoundingMode;
+import java.util.Optional;
 import tariff.meter.DemandInterval;
 import tariff.meter.IntervalRange;
 import tariff.meter.IntervalSeries;
+import tariff.meter.Window;
 
 /**
- * A fixed bank run through an interval series, always on: each interval's lagging − leading kvar less the bank's. The bank's
+ * A fixed bank run through an interval series, on unless a time switch says otherwise: each interval's lagging − leading kvar less the bank's. The bank's
  * effective kvar are taken as constant; voltage, frequency and ageing are for the caller to put in.
  */
 public final class BankWalk {
@@ -39,10 +41,16 @@ public final class BankWalk {
      * @throws IllegalArgumentException as {@link #fixed}
      */
     public static IntervalSeries corrected(IntervalSeries series, BigDecimal kvar) {
+        return corrected(series, kvar, Optional.empty());
+    }
+
+    /** @param off when a time switch keeps the bank off; an interval goes by its start */
+    static IntervalSeries corrected(IntervalSeries series, BigDecimal kvar, Optional<Window> off) {
+        TimeSwitch timeSwitch = new TimeSwitch(series, off);
         long bankKvarh = Math.floorDiv(2 * scaled(series, kvar) + series.perHour(), 2 * series.perHour());
         Correction correction = new Correction(series);
         for (int i = 0; i < series.size(); i++) {
-            correction.set(i, bankKvarh);
+            correction.set(i, timeSwitch.isOff(i) ? 0 : bankKvarh);
         }
         return correction.series();
     }

@@ -3,7 +3,6 @@ package tariff.correction;
 
 import java.math.BigDecimal;
 import java.math.RoundingMode;
-import java.util.List;
 import java.util.Optional;
 import tariff.meter.IntervalSeries;
 import tariff.meter.MeteredMonth;
@@ -12,7 +11,8 @@ import tariff.meter.Period;
 
 /**
  * A bank run through a series of intervals: what the meter would have recorded, with nothing left to bounds. The fixed kvar are on in
- * every interval; the steps follow what is left, aiming at the bank's target power factor.
+ * every interval but those in which a time switch keeps the bank off; the steps follow what is left, as their controller is told. The
+ * bank's own losses are counted as kWh where its kvar are given.
  *
  * @param before the meter without the bank
  * @param after the meter with it
@@ -29,21 +29,24 @@ public record BankYear(MonthlySums before, MonthlySums after, Optional<SteppedWa
         IntervalSeries series = before.series();
         IntervalSeries fixed = bank.fixedKvar().signum() == 0
                 ? series
-                : BankWalk.corrected(series, atScale(bank.effectiveFixedKvar(), series));
-        if (!bank.isAutomatic()) {
-            return new BankYear(before, before.on(fixed), Optional.empty());
-        }
-        List<BigDecimal> kvar = bank.effectiveStepsKvar().stream()
-                .map(step -> atScale(step, series))
-                .toList();
-        SteppedBank.Target target =
-                SteppedBank.Target.powerFactor(bank.targetPowerFactor().orElse(BigDecimal.ONE));
-        SteppedWalk walk = SteppedWalk.of(
-                fixed,
-                fixed.all(),
-                before.demand(),
-                new SteppedBank(kvar, target, 0, Optional.empty(), Optional.empty()));
-        return new BankYear(before, before.on(walk.corrected()), Optional.of(walk));
+                : BankWalk.corrected(series, atScale(bank.effectiveFixedKvar(), series), bank.off());
+        Optional<SteppedWalk> steps = bank.isAutomatic()
+                ? Optional.of(SteppedWalk.of(fixed, fixed.all(), before.demand(), stepped(bank, series)))
+                : Optional.empty();
+        IntervalSeries corrected = steps.map(SteppedWalk::corrected).orElse(fixed);
+        return new BankYear(before, before.on(OwnLosses.in(series, corrected, bank.wattsPerKvar())), steps);
+    }
+
+    private static SteppedBank stepped(CapacitorBank bank, IntervalSeries series) {
+        Controller told = bank.controller();
+        return new SteppedBank(
+                bank.effectiveStepsKvar().stream()
+                        .map(step -> atScale(step, series))
+                        .toList(),
+                SteppedBank.Target.powerFactor(told.targetPowerFactor().orElse(BigDecimal.ONE)),
+                told.delayIntervals(series.stepMinutes()),
+                told.operationsPerHour(),
+                bank.off());
     }
 
     /** The month as the meter would have recorded it with the bank. */

@@ -6,26 +6,32 @@ import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
 import tariff.meter.Triangle;
+import tariff.meter.Window;
 
 /**
  * A capacitor bank as offered.
  *
  * @param fixedKvar rated kvar that is always on, 0 or more
  * @param stepsKvar rated kvar of each switched step; empty for a fixed bank
- * @param targetPowerFactor what the controller of the steps aims at, in (0, 1]; empty for unity
+ * @param controller what the controller of the steps is told; a fixed bank has none and does not ask
  * @param ratedVolts the voltage the kvar are rated at, above zero; empty for the service voltage
  * @param serviceVolts the voltage at the place, above zero
  * @param reactorShare reactance of a detuning reactor ÷ reactance of the capacitor, 0 for a plain bank, below 0.3
- * @param wattsPerKvar the bank's own losses; 0 leaves them out
+ * @param wattsPerKvar the bank's own losses, 0 to 1000 W for each kvar given; 0 leaves them out
+ * @param off when a time switch takes the whole bank off the network, the fixed kvar too; empty if nothing does
  */
 public record CapacitorBank(
         BigDecimal fixedKvar,
         List<BigDecimal> stepsKvar,
-        Optional<BigDecimal> targetPowerFactor,
+        Controller controller,
         Optional<BigDecimal> ratedVolts,
         Optional<BigDecimal> serviceVolts,
         BigDecimal reactorShare,
-        BigDecimal wattsPerKvar) {
+        BigDecimal wattsPerKvar,
+        Optional<Window> off) {
+    private static final BigDecimal MOST_WATTS = BigDecimal.valueOf(1000);
+    private static final BigDecimal WATTS_A_KILOWATT = BigDecimal.valueOf(1000);
+    private static final BigDecimal DEAD_BAND = new BigDecimal("0.6666666667");
     private static final BigDecimal MOST_REACTOR = new BigDecimal("0.3");
 
     /** Throws {@link IllegalArgumentException} for a value outside its range, naming it. */
@@ -33,8 +39,6 @@ public record CapacitorBank(
         stepsKvar = List.copyOf(stepsKvar);
         require(fixedKvar.signum() >= 0, "fixedKvar", fixedKvar, "0 or more");
         stepsKvar.forEach(step -> require(step.signum() > 0, "a step", step, "above 0 kvar"));
-        targetPowerFactor.ifPresent(pf -> require(
-                pf.signum() > 0 && pf.compareTo(BigDecimal.ONE) <= 0, "targetPowerFactor", pf, "above 0, at most 1"));
         ratedVolts.ifPresent(volts -> require(volts.signum() > 0, "ratedVolts", volts, "above 0"));
         serviceVolts.ifPresent(volts -> require(volts.signum() > 0, "serviceVolts", volts, "above 0"));
         require(
@@ -42,7 +46,11 @@ public record CapacitorBank(
                 "reactorShare",
                 reactorShare,
                 "0 to below 0.3");
-        require(wattsPerKvar.signum() >= 0, "wattsPerKvar", wattsPerKvar, "0 or more");
+        require(
+                wattsPerKvar.signum() >= 0 && wattsPerKvar.compareTo(MOST_WATTS) <= 0,
+                "wattsPerKvar",
+                wattsPerKvar,
+                "0 to 1000");
     }
 
     /** A plain bank, always on, rated at the service voltage. */
@@ -59,9 +67,61 @@ public record CapacitorBank(
         return plain(BigDecimal.ZERO, Stream.of(stepsKvar).map(BigDecimal::new).toList());
     }
 
-    private static CapacitorBank plain(BigDecimal fixed, List<BigDecimal> steps) {
+    /** A plain bank rated at the service voltage, whose steps aim at unity and which no time switch holds off. */
+    public static CapacitorBank plain(BigDecimal fixedKvar, List<BigDecimal> stepsKvar) {
         return new CapacitorBank(
-                fixed, steps, Optional.empty(), Optional.empty(), Optional.empty(), BigDecimal.ZERO, BigDecimal.ZERO);
+                fixedKvar,
+                stepsKvar,
+                Controller.quick(),
+                Optional.empty(),
+                Optional.empty(),
+                BigDecimal.ZERO,
+                BigDecimal.ZERO,
+                Optional.empty());
+    }
+
+    /** A bank like this one with other capacitors. */
+    public CapacitorBank withKvar(BigDecimal newFixedKvar, List<BigDecimal> newStepsKvar) {
+        return new CapacitorBank(
+                newFixedKvar, newStepsKvar, controller, ratedVolts, serviceVolts, reactorShare, wattsPerKvar, off);
+    }
+
+    public CapacitorBank withController(Controller told) {
+        return new CapacitorBank(fixedKvar, stepsKvar, told, ratedVolts, serviceVolts, reactorShare, wattsPerKvar, off);
+    }
+
+    public CapacitorBank withVolts(BigDecimal rated, BigDecimal service) {
+        return new CapacitorBank(
+                fixedKvar,
+                stepsKvar,
+                controller,
+                Optional.of(rated),
+                Optional.of(service),
+                reactorShare,
+                wattsPerKvar,
+                off);
+    }
+
+    public CapacitorBank withReactor(BigDecimal share) {
+        return new CapacitorBank(fixedKvar, stepsKvar, controller, ratedVolts, serviceVolts, share, wattsPerKvar, off);
+    }
+
+    public CapacitorBank withLosses(BigDecimal newWattsPerKvar) {
+        return new CapacitorBank(
+                fixedKvar, stepsKvar, controller, ratedVolts, serviceVolts, reactorShare, newWattsPerKvar, off);
+    }
+
+    /** The same bank behind a time switch. */
+    public CapacitorBank offIn(Window window) {
+        return new CapacitorBank(
+                fixedKvar,
+                stepsKvar,
+                controller,
+                ratedVolts,
+                serviceVolts,
+                reactorShare,
+                wattsPerKvar,
+                Optional.of(window));
     }
 
     /** kvar on the nameplate, all steps in. */
@@ -96,6 +156,16 @@ public record CapacitorBank(
                 .min(BigDecimal::compareTo)
                 .map(this::effective)
                 .orElse(BigDecimal.ZERO);
+    }
+
+    /** A controller does not answer within two thirds of its smallest step. Common practice, no source. */
+    BigDecimal deadBandKvar() {
+        return smallestStepKvar().multiply(DEAD_BAND);
+    }
+
+    /** What the bank burns: kW for kvar that it gives, kWh for kvarh. */
+    BigDecimal ownKilowatts(BigDecimal kvar) {
+        return kvar.multiply(wattsPerKvar).divide(WATTS_A_KILOWATT, Triangle.PRECISION);
     }
 
     public boolean isAutomatic() {

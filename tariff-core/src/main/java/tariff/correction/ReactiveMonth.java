@@ -26,6 +26,33 @@ record ReactiveMonth(
         Optional<BigDecimal> likelyPeakKvar) {
     private static final int DECIMALS = 3;
 
+    /**
+     * What is known of the hours in which a time switch lets the bank be on, T′ of the T hours. Their lagging kvarh Q′ lie between
+     * max(0, Q − M (T − T′)), everything else drawn at M while the bank was off, and min(Q, M T′). What a bank removes of them rises with
+     * Q′, at the least Q′ × min(1, c ÷ M) and at the most min(Q′, c T′); so the low estimate takes the least Q′, the high the most, the
+     * central Q′ = Q × T′ ÷ T, which lies between, for M is at least Q ÷ T. Own derivation.
+     *
+     * @param hoursOn T′, above zero, at most T
+     */
+    ReactiveMonth during(BigDecimal hoursOn, Estimate estimate) {
+        if (hoursOn.compareTo(hours) == 0) {
+            return this;
+        }
+        Optional<BigDecimal> peak = highestKvar.map(highest -> highest.max(meanKvar()));
+        BigDecimal hoursOff = hours.subtract(hoursOn);
+        BigDecimal laggingOn = switch (estimate) {
+            case LOW ->
+                peak.map(highest -> laggingKvarh
+                                .subtract(highest.multiply(hoursOff))
+                                .max(BigDecimal.ZERO))
+                        .orElse(BigDecimal.ZERO);
+            case CENTRAL -> laggingKvarh.multiply(hoursOn).divide(hours, Triangle.PRECISION);
+            case HIGH ->
+                peak.map(highest -> highest.multiply(hoursOn).min(laggingKvarh)).orElse(laggingKvarh);
+        };
+        return new ReactiveMonth(laggingOn, hoursOn, peak, likelyPeakKvar);
+    }
+
     /** R, the lagging kvarh that a constant bank leaves. */
     BigDecimal left(BigDecimal bankKvar, Estimate estimate) {
         if (bankKvar.signum() == 0) {

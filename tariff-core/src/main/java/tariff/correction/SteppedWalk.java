@@ -5,11 +5,9 @@ import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 import tariff.meter.DemandInterval;
 import tariff.meter.IntervalRange;
 import tariff.meter.IntervalSeries;
-import tariff.meter.WindowCalendar;
 
 /**
  * An automatic bank run through an interval series.
@@ -22,8 +20,6 @@ import tariff.meter.WindowCalendar;
  */
 public record SteppedWalk(
         ReactiveOutcome outcome, List<Integer> operations, BigDecimal hoursAtFullOutput, IntervalSeries corrected) {
-    private static final String OFF = "off";
-
     /**
      * Within an interval the bank is as it was set at its start, from that interval's own averages. An absent interval leaves
      * it as it stands. The bank starts switched off.
@@ -32,8 +28,7 @@ public record SteppedWalk(
      *     cannot give such demand blocks
      */
     public static SteppedWalk of(IntervalSeries series, IntervalRange range, DemandInterval demand, SteppedBank bank) {
-        WindowCalendar calendar = new WindowCalendar(
-                series, bank.off().map(off -> Map.of(OFF, off)).orElse(Map.of()));
+        TimeSwitch timeSwitch = new TimeSwitch(series, bank.off());
         Regulator regulator = new Regulator(series, bank);
         Wear wear = new Wear(regulator.steps());
         ReactiveTally tally = new ReactiveTally(series, demand);
@@ -43,7 +38,7 @@ public record SteppedWalk(
         }
         int full = 0;
         for (int i = range.from(); i < range.to(); i++) {
-            regulator.regulate(i, calendar.mask(i) != 0);
+            regulator.regulate(i, timeSwitch.isOff(i));
             wear.follow(regulator.on(), regulator.sizes());
             full += regulator.isFull() ? 1 : 0;
             long output = regulator.output();

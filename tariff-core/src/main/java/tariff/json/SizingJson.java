@@ -6,6 +6,7 @@ import java.math.RoundingMode;
 import java.util.Optional;
 import tariff.bill.Billing;
 import tariff.correction.CapacitorBank;
+import tariff.correction.Controller;
 import tariff.correction.Estimate;
 import tariff.payback.Answer;
 import tariff.proposal.LineReach;
@@ -69,7 +70,15 @@ public final class SizingJson {
         if (bank.isAutomatic()) {
             json.withNumbers("stepsKvar", bank.stepsKvar());
         }
-        return json.withIf("targetPowerFactor", bank.targetPowerFactor())
+        Controller told = bank.controller();
+        if (bank.isAutomatic() && told.delayMinutes() > 0) {
+            json.with("switchingDelayMinutes", told.delayMinutes());
+        }
+        if (bank.isAutomatic()) {
+            told.operationsPerHour().ifPresent(most -> json.with("operationsPerHour", most));
+        }
+        bank.off().ifPresent(off -> json.with("off", WindowJson.write(off)));
+        return json.withIf("targetPowerFactor", told.targetPowerFactor())
                 .withIf("ratedVolts", bank.ratedVolts())
                 .withIf("serviceVolts", bank.serviceVolts())
                 .withIf("reactorShare", given(bank.reactorShare()))

@@ -198,12 +198,21 @@ public final class IntervalSeries {
 
     /** The same meter with other reactive energies, as a bank would leave them. */
     public IntervalSeries withReactive(long[] newLaggingKvarh, long[] newLeadingKvarh) {
+        return with(kwh, newLaggingKvarh, newLeadingKvarh);
+    }
+
+    /** The same meter with another active energy taken, as losses behind it would leave it. */
+    public IntervalSeries withActive(long[] newKwh) {
+        return with(newKwh, laggingKvarh, leadingKvarh);
+    }
+
+    private IntervalSeries with(long[] newKwh, long[] newLaggingKvarh, long[] newLeadingKvarh) {
         return new IntervalSeries(
                 start,
                 stepMinutes,
                 zone,
                 scale,
-                kwh,
+                newKwh,
                 newLaggingKvarh,
                 newLeadingKvarh,
                 Optional.ofNullable(exportedKwh),

@@ -1,8 +1,10 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.meter;
 
+import java.math.BigDecimal;
 import java.time.LocalDate;
 import java.time.YearMonth;
+import java.time.ZoneId;
 import java.time.temporal.ChronoUnit;
 
 /**
@@ -27,6 +29,12 @@ public record Period(LocalDate first, LocalDate last) implements Comparable<Peri
     /** Days billed, at least 1. */
     public int days() {
         return (int) ChronoUnit.DAYS.between(first, last) + 1;
+    }
+
+    /** Hours from the first midnight to the last by a clock: the hour that daylight saving skips or repeats is counted so. */
+    public BigDecimal hours(ZoneId zone) {
+        return MinutesHeld.hours(ChronoUnit.MINUTES.between(
+                first.atStartOfDay(zone), last.plusDays(1).atStartOfDay(zone)));
     }
 
     /** The calendar month that holds most of the period's days, the earlier of two that hold as many. */

@@ -2,18 +2,15 @@
 package tariff.meter;
 
 import java.math.BigDecimal;
-import java.math.RoundingMode;
 import java.time.DayOfWeek;
-import java.time.Instant;
 import java.time.LocalDate;
 import java.time.LocalDateTime;
 import java.time.LocalTime;
 import java.time.Month;
 import java.time.ZoneId;
-import java.time.zone.ZoneOffsetTransition;
 import java.util.EnumSet;
+import java.util.List;
 import java.util.Set;
-import org.jspecify.annotations.Nullable;
 
 /**
  * A time-of-use window by the local clock.
@@ -36,7 +33,7 @@ public record Window(
         Set<Month> months,
         HolidayRule holidayRule,
         Set<LocalDate> holidays) {
-    private static final int DAY = 24 * 60;
+    static final int DAY = 24 * 60;
 
     /** @throws IllegalArgumentException if a time is not on a whole minute, or no weekday or month is named */
     public Window {
@@ -101,45 +98,31 @@ public record Window(
 
     /** Minutes of the window in the period, as they pass: the hour that daylight saving skips or repeats is counted so. */
     public long minutesIn(Period period, ZoneId zone) {
-        long minutes = 0;
-        for (LocalDate date = period.first(); !date.isAfter(period.last()); date = date.plusDays(1)) {
-            minutes += appliesOn(date) ? minutesOn(date, zone) : 0;
-        }
-        return minutes;
+        return MinutesHeld.in(period, zone, List.of(this));
+    }
+
+    /** Minutes of the period in which this window and another both hold, counted likewise. */
+    public long minutesIn(Period period, ZoneId zone, Window other) {
+        return MinutesHeld.in(period, zone, List.of(this, other));
     }
 
     /** Hours of the window in the period, to six decimals where a third or a sixth of an hour asks for them. */
     public BigDecimal hoursIn(Period period, ZoneId zone) {
-        return BigDecimal.valueOf(minutesIn(period, zone))
-                .divide(BigDecimal.valueOf(60), 6, RoundingMode.HALF_UP)
-                .stripTrailingZeros();
+        return MinutesHeld.hours(minutesIn(period, zone));
     }
 
-    private long minutesOn(LocalDate date, ZoneId zone) {
-        Instant at = date.atStartOfDay(zone).toInstant();
-        Instant end = date.plusDays(1).atStartOfDay(zone).toInstant();
-        long minutes = 0;
-        while (at.isBefore(end)) {
-            @Nullable ZoneOffsetTransition next = zone.getRules().nextTransition(at);
-            Instant until = next == null || next.getInstant().isAfter(end) ? end : next.getInstant();
-            int first = minute(at.atZone(zone).toLocalTime());
-            int last = first + (int) ((until.getEpochSecond() - at.getEpochSecond()) / 60);
-            minutes += inside(first, last);
-            at = until;
-        }
-        return minutes;
+    /** Hours of the period in which this window and another both hold, likewise. */
+    public BigDecimal hoursIn(Period period, ZoneId zone, Window other) {
+        return MinutesHeld.hours(minutesIn(period, zone, other));
     }
 
-    private int inside(int first, int last) {
+    /** The parts of a day on which the window applies, from a minute to the one after the last; one that passes midnight has two. */
+    List<MinutesHeld.Span> spans() {
         int start = minute(from);
         int end = minute(to);
         return start < end
-                ? overlap(first, last, start, end)
-                : overlap(first, last, 0, end) + overlap(first, last, start, DAY);
-    }
-
-    private static int overlap(int first, int last, int start, int end) {
-        return Math.max(0, Math.min(last, end) - Math.max(first, start));
+                ? List.of(new MinutesHeld.Span(start, end))
+                : List.of(new MinutesHeld.Span(0, end), new MinutesHeld.Span(start, DAY));
     }
 
     private static int minute(LocalTime time) {

@@ -67,8 +67,8 @@ public record Assessment(
      * @throws Refusal naming the months that overlap, or every month that lacks what the rate bills
      */
     public static Assessment of(Billing billing, List<MeteredMonth> months, Proposal proposal) {
-        BankMonth bank =
-                new BankMonth(proposal.bank(), (month, window) -> billing.rate().hours(month.period(), window));
+        BankMonth bank = new BankMonth(
+                proposal.bank(), billing.rate().windows(), billing.rate().zone());
         return of(billing, months, proposal, bank::with, Optional.empty());
     }
 

@@ -11,6 +11,7 @@ import tariff.correction.CapacitorBank;
 import tariff.meter.MeteredMonth;
 import tariff.notice.Assumption;
 import tariff.rate.Rate;
+import tariff.rate.WindowWords;
 import tariff.rate.clause.Metered;
 
 /** What an assessment takes to be so about a bank and the year it would meet. */
@@ -28,26 +29,26 @@ final class BankAssumptions {
         if (!exact) {
             all.addAll(ofTotals(rate, year, open));
         }
+        if (!exact) {
+            all.addAll(ofSwitching(bank));
+        }
         all.add(new Assumption(
                 "bank-always-on",
                 YEAR,
-                bank.isAutomatic()
-                        ? (bank.fixedKvar().signum() > 0 ? "the fixed kvar are on in every hour; " : "")
-                                + "the steps follow the load and send nothing back but for two thirds of the smallest step, which"
-                                + " the low savings count against the bank"
-                        : "the bank is on in every hour of the year",
-                "switch it by time, and say in which hours"));
+                bank.off()
+                                .map(off -> "a time switch keeps the whole bank off " + WindowWords.of(off)
+                                        + "; in the other hours ")
+                                .orElse("")
+                        + inService(bank),
+                bank.off().isPresent() ? "none" : "switch it by time, and say in which hours"));
         all.add(new Assumption(
                 "rated-output",
                 YEAR,
                 "the bank gives its rated kvar at the stated voltage; new capacitors may differ by −5 to +10 % (IEC 60831-1:2014, from memory)",
                 "give the measured kvar"));
-        if (exact || bank.wattsPerKvar().signum() == 0) {
+        if (bank.wattsPerKvar().signum() == 0) {
             all.add(new Assumption(
-                    "bank-losses",
-                    YEAR,
-                    "the bank's own losses are left out",
-                    exact ? "none" : "give its losses in W per kvar"));
+                    "bank-losses", YEAR, "the bank's own losses are left out", "give its losses in W per kvar"));
         }
         all.add(new Assumption(
                 "year-repeats", YEAR, "every later year has the same load as the year of the bills", "none"));
@@ -57,6 +58,39 @@ final class BankAssumptions {
                     YEAR,
                     "the bank goes into service on the first day of the first month; the ratchet then remembers the year before",
                     "none"));
+        }
+        return all;
+    }
+
+    private static String inService(CapacitorBank bank) {
+        boolean always = bank.off().isEmpty();
+        if (!bank.isAutomatic()) {
+            return always ? "the bank is on in every hour of the year" : "it is always on";
+        }
+        String fixed = always ? "the fixed kvar are on in every hour; " : "the fixed kvar are always on; ";
+        return (bank.fixedKvar().signum() > 0 ? fixed : "")
+                + "the steps follow the load and send nothing back but for two thirds of the smallest step, which the low savings"
+                + " count against the bank";
+    }
+
+    /** What monthly totals do not show of a bank that is switched off or held back. */
+    private static List<Assumption> ofSwitching(CapacitorBank bank) {
+        List<Assumption> all = new ArrayList<>();
+        bank.off()
+                .ifPresent(off -> all.add(new Assumption(
+                        "off-hours",
+                        YEAR,
+                        "a month's totals do not show what flows while the time switch keeps the bank off: the low savings take as much"
+                                + " of the kvarh to fall there as can be and the highest kVA and kvar too, the high as little, the"
+                                + " central in proportion to the hours",
+                        INTERVALS)));
+        if (bank.isAutomatic() && bank.controller().isHeldBack()) {
+            all.add(new Assumption(
+                    "switching-not-seen",
+                    YEAR,
+                    "a month's totals do not show how often the load changes: the switching delay and the limit of operations an hour are"
+                            + " not counted",
+                    INTERVALS));
         }
         return all;
     }
@@ -72,7 +106,7 @@ final class BankAssumptions {
                 INTERVALS
                         + open.map(
                                         weeks -> "; " + weeks.words()
-                                                + " of them, spread over the year, bring the kvarh taken off to within about 10 %")
+                                                + " of them, spread over the year, would bring the kvarh taken off to within about 10 %")
                                 .orElse("")));
         if (year.stream().anyMatch(month -> !month.totals().has(PEAK_LAGGING_KVAR))) {
             all.add(new Assumption(

@@ -13,7 +13,7 @@ import tariff.correction.CapacitorBank;
  *
  * @param fixedShare part that is always on, 0 to 1
  * @param steps equal switched steps of the rest; 0 only where all is fixed
- * @param like gives what does not depend on the size: aim of the controller, voltages, reactor, losses
+ * @param like gives what does not depend on the size: controller, voltages, reactor, losses, time switch
  */
 public record BankShape(BigDecimal fixedShare, int steps, CapacitorBank like) {
     private static final int STEP_DECIMALS = 2;
@@ -59,13 +59,6 @@ public record BankShape(BigDecimal fixedShare, int steps, CapacitorBank like) {
     }
 
     CapacitorBank with(BigDecimal fixedKvar, List<BigDecimal> stepsKvar) {
-        return new CapacitorBank(
-                fixedKvar,
-                stepsKvar,
-                like.targetPowerFactor(),
-                like.ratedVolts(),
-                like.serviceVolts(),
-                like.reactorShare(),
-                like.wattsPerKvar());
+        return like.withKvar(fixedKvar, stepsKvar);
     }
 }

@@ -11,8 +11,8 @@ public final class DurationOfDemand {
     private DurationOfDemand() {}
 
     /**
-     * The curve of lagging − leading kvar over the intervals that were recorded. A bank with switched steps follows the load, so only one
-     * without is drawn as always on.
+     * The curve of lagging − leading kvar over the intervals that were recorded. A bank with switched steps follows the load, and a time
+     * switch takes one off in hours that the curve does not tell apart, so only one without either is drawn as always on.
      *
      * @throws IllegalArgumentException if no interval was recorded
      */
@@ -31,7 +31,7 @@ public final class DurationOfDemand {
                 (double) falling.length / series.perHour(),
                 falling,
                 bank.effectiveKvar().doubleValue(),
-                !bank.isAutomatic());
+                !bank.isAutomatic() && bank.off().isEmpty());
     }
 
     private static double kvarh(IntervalSeries series, long scaled) {

@@ -5,90 +5,129 @@ import static tariff.meter.Register.APPARENT_KVAH;
 import static tariff.meter.Register.ENERGY_KWH;
 import static tariff.meter.Register.LAGGING_KVARH;
 import static tariff.meter.Register.LEADING_KVARH;
+import static tariff.meter.Register.PEAK_KVA;
+import static tariff.meter.Register.PEAK_KW;
+import static tariff.meter.Register.PEAK_LAGGING_KVAR;
+import static tariff.meter.Register.PEAK_LEADING_KVAR;
 import static tariff.meter.Register.POWER_FACTOR;
 
 import java.math.BigDecimal;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
+import java.util.Optional;
 import java.util.TreeMap;
 import tariff.correction.BankMonth;
 import tariff.correction.CapacitorBank;
+import tariff.correction.Controller;
 import tariff.correction.Estimate;
 import tariff.meter.MeteredMonth;
 import tariff.meter.Readings;
+import tariff.meter.Register;
 import tariff.meter.Triangle;
+import tariff.rate.Rate;
 
 /**
  * A month whose every reading is at least as good as with any bank between two: nothing lags more than with the larger one, nothing leads
  * more than with the smaller one, the controller is as fine as the finer one. No single bank need reach it; its bill is a floor under the
  * bills of all of them. Own derivation: lagging kvarh and kvar fall with all kvar of a bank and rise with its smallest step; leading ones
- * rise with its fixed kvar and smallest step; kVA falls with all kvar and rises with fixed kvar and smallest step.
+ * rise with its fixed kvar and smallest step; kVA falls with all kvar and rises with fixed kvar and smallest step. A time switch is the same
+ * for all of them: it leaves each the same hours, so the same holds in those.
+ *
+ * <p>A bank's own losses raise kWh and kW, the larger bank's most. Their amounts are those of the smaller bank; in the high estimate, where
+ * coarse steps deliver least, those of its fixed kvar alone. More losses might help a power factor or a share of the kWh, so everything
+ * reactive and the kVA are lowered in the same ratio.
  */
 final class KindestMonth {
     /** A step too small to leave a trace, for a bank that has none. */
     private static final BigDecimal TRACE = new BigDecimal("0.000000001");
 
     private final BankMonth withSmaller;
+    private final BankMonth withLarger;
     private final BankMonth leastLagging;
     private final BankMonth leastApparent;
     private final Estimate estimate;
 
-    KindestMonth(CapacitorBank smaller, CapacitorBank larger, BankMonth.WindowHours hours, Estimate estimate) {
+    KindestMonth(CapacitorBank smaller, CapacitorBank larger, Rate rate, Estimate estimate) {
         BigDecimal step = smaller.stepsKvar().stream()
                 .min(BigDecimal::compareTo)
                 .orElse(larger.isAutomatic() ? TRACE : BigDecimal.ZERO);
-        this.withSmaller = new BankMonth(smaller, hours);
-        this.leastLagging =
-                new BankMonth(larger.isAutomatic() ? divided(larger, larger.fixedKvar(), step) : larger, hours);
-        this.leastApparent = new BankMonth(divided(larger, smaller.fixedKvar(), step.max(TRACE)), hours);
+        this.withSmaller =
+                month(estimate == Estimate.HIGH ? smaller.withKvar(smaller.fixedKvar(), List.of()) : smaller, rate);
+        this.withLarger = month(larger, rate);
+        this.leastLagging = month(larger.isAutomatic() ? divided(larger, larger.fixedKvar(), step) : larger, rate);
+        this.leastApparent =
+                month(divided(larger, smaller.fixedKvar(), step.max(TRACE)).withLosses(BigDecimal.ZERO), rate);
         this.estimate = estimate;
+    }
+
+    private static BankMonth month(CapacitorBank bank, Rate rate) {
+        return new BankMonth(bank, rate.windows(), rate.zone());
     }
 
     MeteredMonth of(MeteredMonth month) {
         MeteredMonth small = withSmaller.with(month, estimate);
+        MeteredMonth large = withLarger.with(month, estimate);
         MeteredMonth lagging = leastLagging.with(month, estimate);
         MeteredMonth apparent = leastApparent.with(month, estimate);
         Map<String, Readings> windows = new TreeMap<>();
-        apparent.windows()
-                .forEach((name, readings) ->
-                        windows.put(name, best(readings, window(lagging, name), window(small, name))));
-        return month.with(best(apparent.totals(), lagging.totals(), small.totals()))
+        month.windows()
+                .keySet()
+                .forEach(name -> windows.put(
+                        name,
+                        best(window(small, name), window(large, name), window(lagging, name), window(apparent, name))));
+        return month.with(best(small.totals(), large.totals(), lagging.totals(), apparent.totals()))
                 .withWindows(windows);
     }
 
-    private static Readings best(Readings apparent, Readings lagging, Readings small) {
-        Readings best = apparent;
+    private static Readings best(Readings small, Readings large, Readings lagging, Readings apparent) {
+        Readings best = peaks(small, large, apparent);
         if (lagging.has(LAGGING_KVARH)) {
             BigDecimal lags = lagging.get(LAGGING_KVARH).orElseThrow();
             BigDecimal leads = small.get(LEADING_KVARH).orElse(BigDecimal.ZERO);
-            best = best.with(LAGGING_KVARH, lags).with(LEADING_KVARH, leads);
             if (small.has(ENERGY_KWH)) {
                 BigDecimal kwh = small.get(ENERGY_KWH).orElseThrow();
-                BigDecimal most = lagging.get(ENERGY_KWH).orElse(kwh).max(kwh);
+                BigDecimal ratio = ratio(kwh, large.get(ENERGY_KWH), lagging.get(ENERGY_KWH));
+                lags = lags.multiply(ratio);
+                leads = leads.multiply(ratio);
                 best = best.with(ENERGY_KWH, kwh);
                 if (best.has(APPARENT_KVAH)) {
                     best = best.with(APPARENT_KVAH, Triangle.apparent(kwh, lags.add(leads)));
                 }
-                if (best.has(POWER_FACTOR) && most.signum() > 0) {
-                    best = best.with(POWER_FACTOR, Triangle.powerFactor(most, Triangle.apparent(most, lags)));
+                if (best.has(POWER_FACTOR) && kwh.signum() > 0) {
+                    best = best.with(POWER_FACTOR, Triangle.powerFactor(kwh, Triangle.apparent(kwh, lags)));
                 }
+            }
+            best = best.with(LAGGING_KVARH, lags).with(LEADING_KVARH, leads);
+        }
+        return best;
+    }
+
+    private static Readings peaks(Readings small, Readings large, Readings apparent) {
+        Readings best = apparent;
+        if (small.has(PEAK_KW)) {
+            BigDecimal kw = small.get(PEAK_KW).orElseThrow();
+            BigDecimal ratio = ratio(kw, large.get(PEAK_KW), Optional.empty());
+            best = best.with(PEAK_KW, kw);
+            for (Register register : List.of(PEAK_KVA, PEAK_LAGGING_KVAR, PEAK_LEADING_KVAR)) {
+                Optional<BigDecimal> peak = best.get(register);
+                best = peak.isPresent() ? best.with(register, peak.get().multiply(ratio)) : best;
             }
         }
         return best;
     }
 
+    /** The least ÷ the most, at most 1. */
+    private static BigDecimal ratio(BigDecimal least, Optional<BigDecimal> one, Optional<BigDecimal> other) {
+        BigDecimal most = least.max(one.orElse(least)).max(other.orElse(least));
+        return most.signum() > 0 ? least.divide(most, Triangle.PRECISION) : BigDecimal.ONE;
+    }
+
     /** All kvar of a bank with so many of them fixed, the others in steps of which the smallest is given. */
     private static CapacitorBank divided(CapacitorBank bank, BigDecimal fixed, BigDecimal smallest) {
         BigDecimal rest = bank.ratedKvar().subtract(fixed).subtract(smallest);
-        return new CapacitorBank(
-                fixed,
-                rest.signum() > 0 ? List.of(smallest, rest) : List.of(smallest),
-                bank.targetPowerFactor().filter(pf -> bank.isAutomatic()),
-                bank.ratedVolts(),
-                bank.serviceVolts(),
-                bank.reactorShare(),
-                bank.wattsPerKvar());
+        return bank.withKvar(fixed, rest.signum() > 0 ? List.of(smallest, rest) : List.of(smallest))
+                .withController(bank.isAutomatic() ? bank.controller() : Controller.quick());
     }
 
     private static Readings window(MeteredMonth month, String name) {

@@ -28,7 +28,6 @@ final class RepeatedYear {
     private final boolean looksBack;
     private final boolean netsLeading;
     private final Optional<MonthlySums> exact;
-    private final BankMonth.WindowHours hours;
     private final Map<Asked, BankSavings> known = new HashMap<>();
     private final Map<AskedBetween, Saved> bounds = new HashMap<>();
 
@@ -55,7 +54,6 @@ final class RepeatedYear {
         this.before = looksBack && !fullPast
                 ? billing.statements(year, year)
                 : today.months().stream().map(PowerFactorCost.Month::asItIs).toList();
-        this.hours = (month, window) -> billing.rate().hours(month.period(), window);
     }
 
     /** The months as they would be metered with a bank. */
@@ -64,7 +62,8 @@ final class RepeatedYear {
             BankYear walked = BankYear.of(exact.get(), bank);
             return year.stream().map(month -> walked.month(month.period())).toList();
         }
-        BankMonth with = new BankMonth(bank, hours);
+        BankMonth with =
+                new BankMonth(bank, billing.rate().windows(), billing.rate().zone());
         return year.stream().map(month -> with.with(month, estimate)).toList();
     }
 
@@ -91,7 +90,7 @@ final class RepeatedYear {
             return NO_CEILING;
         }
         return Objects.requireNonNull(bounds.computeIfAbsent(new AskedBetween(smaller, larger, estimate), asked -> {
-            KindestMonth kindest = new KindestMonth(smaller, larger, hours, estimate);
+            KindestMonth kindest = new KindestMonth(smaller, larger, billing.rate(), estimate);
             return sums(billed(year.stream().map(kindest::of).toList()));
         }));
     }

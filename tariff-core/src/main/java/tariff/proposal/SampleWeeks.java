@@ -20,11 +20,11 @@ import tariff.meter.Register;
  * <p>Each week shows the share of its kvarh that the bank takes off; the bills give the kvarh. Shares of n weeks that vary by a coefficient
  * v have a mean within 10 % nine times in ten where 1.645 v ÷ √n is 0.1 (normal distribution). What bills show of v is how the central
  * shares of the months differ. If weeks differ no more than months do, that is v; if they are independent of one another, a month is the
- * mean of 52 ÷ 12 of them and v is √(52 ÷ 12) times as large. Own derivation. On a small steel plant's year (UCI 851) and fixed banks of 10
- * to 160 kvar, 10, 8, 5, 4, 3, 1 and 1 weeks were needed, each within the two answers. Demands need the peak of every month, which no
+ * mean of 52 ÷ 12 of them and v is √(52 ÷ 12) times as large. Own derivation. On a small steel plant's year (UCI 851)
+ * 10, 8, 5, 4 and 3 weeks were needed for fixed banks of 10, 20, 40, 60 and 80 kvar, each between the two answers. Demands need the peak of every month, which no
  * sample has.
  *
- * @param fewest 1 to 52
+ * @param fewest 2 to 52
  * @param most at least as many
  */
 record SampleWeeks(int fewest, int most) {
@@ -32,6 +32,9 @@ record SampleWeeks(int fewest, int most) {
     private static final double WITHIN = 0.1;
     private static final double WEEKS = 52;
     private static final double WEEKS_A_MONTH = WEEKS / 12;
+    /** One week alone may be a holiday. */
+    private static final int LEAST = 2;
+
     private static final int LEAST_MONTHS = 6;
 
     /** Empty where bills alone say it to within 10 %, or too few months have lagging kvarh. */
@@ -74,11 +77,11 @@ record SampleWeeks(int fewest, int most) {
     }
 
     private static int weeks(double needed) {
-        return (int) Math.max(1, Math.min(WEEKS, Math.ceil(needed)));
+        return (int) Math.max(LEAST, Math.min(WEEKS, Math.ceil(needed)));
     }
 
     /** A noun phrase: {@code 2 to 8 weeks}. */
     String words() {
-        return (fewest == most ? "" : fewest + " to ") + most + (most == 1 ? " week" : " weeks");
+        return (fewest == most ? "" : fewest + " to ") + most + " weeks";
     }
 }

@@ -74,7 +74,8 @@ public record SavingsBySize(String currency, List<Size> sizes) {
      */
     public static SavingsBySize of(Billing billing, List<MeteredMonth> months, int steps) {
         return of(billing, months, steps, bank -> {
-            BankMonth in = new BankMonth(bank, (month, window) -> billing.rate().hours(month.period(), window));
+            BankMonth in =
+                    new BankMonth(bank, billing.rate().windows(), billing.rate().zone());
             return in::with;
         });
     }

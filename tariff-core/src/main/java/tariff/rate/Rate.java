@@ -1,8 +1,8 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.rate;
 
-import java.math.BigDecimal;
 import java.time.LocalDate;
+import java.time.ZoneId;
 import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
@@ -13,7 +13,6 @@ import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
-import tariff.meter.Period;
 import tariff.meter.Register;
 import tariff.meter.Window;
 import tariff.notice.Finding;
@@ -145,9 +144,12 @@ public final class Rate {
 
     /** The rate's windows by name. */
     public Map<String, Window> windows() {
-        Map<String, Window> windows = new LinkedHashMap<>();
-        definition.windows().forEach((name, clause) -> windows.put(name, clause.window()));
-        return windows;
+        return definition.windows();
+    }
+
+    /** The clock that the rate goes by. */
+    public ZoneId zone() {
+        return definition.zone();
     }
 
     /** Whether a bill under this rate looks at a register, directly or through a power factor. */
@@ -160,11 +162,6 @@ public final class Rate {
     /** The name of the season that a day lies in; the rate must define seasons. */
     public String season(LocalDate day) {
         return seasons.of(day);
-    }
-
-    /** The hours of one of the rate's windows in a period; empty if the rate does not define it. */
-    public Optional<BigDecimal> hours(Period period, String window) {
-        return Optional.ofNullable(definition.windows().get(window)).map(each -> each.hours(period));
     }
 
     /** The rate in plain words, clause by clause, worked out from what computes it. */

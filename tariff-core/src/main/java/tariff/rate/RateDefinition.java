@@ -13,6 +13,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
+import tariff.meter.Window;
 import tariff.rate.clause.Line;
 import tariff.rate.clause.PowerFactorRule;
 import tariff.rate.clause.Quantity;
@@ -30,6 +31,7 @@ import tariff.rate.clause.Written;
  * @param source where the rate was printed
  * @param follows which published family of rules it follows, for rates that serve as examples
  * @param powerFactors power factors by the names that clauses use
+ * @param zone the clock that the rate goes by, UTC if it names none
  * @param windows windows of the day and week by name
  * @param seasons parts of the year by name
  * @param seasonBy which day decides the season of a period
@@ -45,7 +47,8 @@ public record RateDefinition(
         Optional<String> source,
         Optional<String> follows,
         Map<String, PowerFactorRule> powerFactors,
-        Map<String, WindowClause> windows,
+        ZoneId zone,
+        Map<String, Window> windows,
         Map<String, Season> seasons,
         SeasonBy seasonBy,
         Map<String, Quantity> quantities,
@@ -70,6 +73,7 @@ public record RateDefinition(
                 in.optionalText("source"),
                 in.optionalText("follows"),
                 in.named("powerFactors", PowerFactorRule::read),
+                zone(in),
                 windows(in),
                 in.named("seasons", Season::read),
                 in.word("seasonBy", SeasonBy.WORDS, SeasonBy.DAYS),
@@ -81,7 +85,7 @@ public record RateDefinition(
         return definition;
     }
 
-    private static Map<String, WindowClause> windows(Written in) {
+    private static Map<String, Window> windows(Written in) {
         Set<LocalDate> holidays = new TreeSet<>();
         for (Written each : in.has("holidays") ? in.list("holidays") : List.<Written>of()) {
             try {
@@ -90,8 +94,7 @@ public record RateDefinition(
                 each.wrong("date", "is not a day", "a day such as 2026-01-01");
             }
         }
-        ZoneId zone = zone(in);
-        return in.named("windows", window -> WindowClause.read(window, holidays, zone));
+        return in.named("windows", window -> WindowClause.read(window, holidays));
     }
 
     private static ZoneId zone(Written in) {

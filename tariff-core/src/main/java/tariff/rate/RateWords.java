@@ -26,7 +26,9 @@ public record RateWords(String heading, List<String> definitions, List<String> l
         List<String> definitions = new ArrayList<>();
         rate.powerFactors()
                 .forEach((name, rule) -> definitions.add("Power factor \"" + name + "\": " + rule.words() + "."));
-        rate.windows().forEach((name, window) -> definitions.add("Window \"" + name + "\": " + window.words() + "."));
+        rate.windows()
+                .forEach((name, window) ->
+                        definitions.add("Window \"" + name + "\": " + WindowWords.of(window, rate.zone()) + "."));
         if (!rate.seasons().isEmpty()) {
             definitions.add("Seasons: " + seasons(rate) + "; " + rate.seasonBy().words() + ".");
         }

@@ -7,30 +7,22 @@ import java.time.DayOfWeek;
 import java.time.LocalDate;
 import java.time.LocalTime;
 import java.time.Month;
-import java.time.ZoneId;
 import java.time.format.TextStyle;
-import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.LinkedHashMap;
-import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Set;
 import java.util.TreeSet;
-import java.util.stream.Collectors;
 import tariff.meter.HolidayRule;
-import tariff.meter.Period;
 import tariff.meter.Window;
 import tariff.rate.clause.Written;
 
 /**
- * A window of the day and week as a rate writes it: {@code { "weekdays": "Mon-Fri", "from": "07:00", "to": "21:00", "months": [11, 12, 1],
+ * How a window of the day and week is written: {@code { "weekdays": "Mon-Fri", "from": "07:00", "to": "21:00", "months": [11, 12, 1],
  * "holidays": "sunday" }}. What is left out does not limit it.
- *
- * @param window the window itself
- * @param zone whose clock it goes by
  */
-public record WindowClause(Window window, ZoneId zone) {
+public final class WindowClause {
     private static final Map<String, DayOfWeek> DAYS = new LinkedHashMap<>();
     private static final Map<String, HolidayRule> HOLIDAYS = new LinkedHashMap<>();
 
@@ -43,19 +35,34 @@ public record WindowClause(Window window, ZoneId zone) {
         HOLIDAYS.put("excluded", HolidayRule.EXCLUDED);
     }
 
-    static WindowClause read(Written in, Set<LocalDate> holidays, ZoneId zone) {
+    private WindowClause() {}
+
+    /** @param holidays the dates that the rate calls holidays */
+    static Window read(Written in, Set<LocalDate> holidays) {
+        Window window = daysAndTimes(in, "an object with any of: weekdays, from, to, months, holidays")
+                .withHolidays(in.word("holidays", HOLIDAYS, HolidayRule.AS_ITS_WEEKDAY), holidays);
+        in.refuseOtherKeys();
+        return window;
+    }
+
+    /** A window of something that knows no holidays, such as a time switch. */
+    public static Window readWithoutHolidays(Written in) {
+        Window window = daysAndTimes(in, "an object with any of: weekdays, from, to, months");
+        in.refuseOtherKeys();
+        return window;
+    }
+
+    private static Window daysAndTimes(Written in, String allowed) {
         if (!in.isObject()) {
-            in.wrong("type", "must be a window", "an object with any of: weekdays, from, to, months, holidays");
+            in.wrong("type", "must be a window", allowed);
         }
-        Window window = new Window(
+        return new Window(
                 in.has("weekdays") ? weekdays(in.at("weekdays")) : EnumSet.allOf(DayOfWeek.class),
                 time(in, "from"),
                 time(in, "to"),
                 in.has("months") ? months(in) : EnumSet.allOf(Month.class),
-                in.word("holidays", HOLIDAYS, HolidayRule.AS_ITS_WEEKDAY),
-                holidays);
-        in.refuseOtherKeys();
-        return new WindowClause(window, zone);
+                HolidayRule.AS_ITS_WEEKDAY,
+                Set.of());
     }
 
     private static Set<DayOfWeek> weekdays(Written in) {
@@ -106,58 +113,5 @@ public record WindowClause(Window window, ZoneId zone) {
             }
         }
         return months.isEmpty() ? EnumSet.allOf(Month.class) : months;
-    }
-
-    /** Hours of the window in a period. */
-    public BigDecimal hours(Period period) {
-        return window.hoursIn(period, zone);
-    }
-
-    String words() {
-        String days = window.weekdays().size() == 7 ? "every day" : names(window.weekdays());
-        String hours = window.from().equals(window.to())
-                ? "all day"
-                : window.from() + " to " + (window.to().equals(LocalTime.MIDNIGHT) ? "24:00" : window.to());
-        String months = window.months().size() == 12
-                ? ""
-                : ", only in "
-                        + window.months().stream()
-                                .sorted()
-                                .map(month -> month.getDisplayName(TextStyle.FULL, Locale.ENGLISH))
-                                .collect(Collectors.joining(", "));
-        String holidays = switch (window.holidayRule()) {
-            case AS_ITS_WEEKDAY -> "";
-            case AS_SUNDAY -> ", " + holidays() + " as Sundays";
-            case EXCLUDED -> ", not on " + holidays();
-        };
-        return days + " " + hours + " (" + zone.getId() + " time)" + months + holidays;
-    }
-
-    private String holidays() {
-        int count = window.holidays().size();
-        return "holidays (" + (count == 0 ? "none" : count) + " given)";
-    }
-
-    /** Three days or more in a row are a range. */
-    private static String names(Set<DayOfWeek> days) {
-        List<String> names = new ArrayList<>();
-        List<DayOfWeek> run = new ArrayList<>();
-        for (DayOfWeek day : DayOfWeek.values()) {
-            if (days.contains(day)) {
-                run.add(day);
-            }
-            if (!run.isEmpty() && (!days.contains(day) || day == DayOfWeek.SUNDAY)) {
-                names.add(
-                        run.size() < 3
-                                ? run.stream().map(WindowClause::name).collect(Collectors.joining(", "))
-                                : name(run.get(0)) + " to " + name(run.get(run.size() - 1)));
-                run.clear();
-            }
-        }
-        return String.join(", ", names);
-    }
-
-    private static String name(DayOfWeek day) {
-        return day.getDisplayName(TextStyle.SHORT, Locale.ENGLISH);
     }
 }

@@ -5,9 +5,11 @@ import java.math.BigDecimal;
 import java.util.List;
 import java.util.Optional;
 import tariff.correction.CapacitorBank;
+import tariff.correction.Controller;
 import tariff.payback.Investment;
 import tariff.payback.Outlook;
 import tariff.payback.Replacement;
+import tariff.rate.WindowWords;
 
 /** The bank that is proposed, what it costs, and what is expected of the years ahead. */
 final class TheBank implements Section {
@@ -37,20 +39,31 @@ final class TheBank implements Section {
     private static void capacitors(Table table, CapacitorBank bank) {
         table.row("Rated, all steps in", Shown.plain(bank.ratedKvar()), "kvar");
         table.row("Given at the service voltage", Shown.plain(round(bank.effectiveKvar())), "kvar");
-        table.row("Always on", Shown.plain(bank.fixedKvar()), "kvar");
+        table.row(bank.off().isPresent() ? "Fixed" : "Always on", Shown.plain(bank.fixedKvar()), "kvar");
         for (int i = 0; i < bank.stepsKvar().size(); i++) {
             table.row("Switched step " + (i + 1), Shown.plain(bank.stepsKvar().get(i)), "kvar");
         }
         if (bank.isAutomatic()) {
             table.row(
                     "Power factor that the steps aim at",
-                    bank.targetPowerFactor().map(Shown::plain).orElse("1"),
+                    bank.controller().targetPowerFactor().map(Shown::plain).orElse("1"),
                     "");
+            controller(table, bank.controller());
         }
+        bank.off().ifPresent(off -> table.row("Kept off by a time switch", WindowWords.of(off), ""));
         bank.ratedVolts().ifPresent(volts -> table.row("Rated voltage", Shown.plain(volts), "V"));
         bank.serviceVolts().ifPresent(volts -> table.row("Service voltage", Shown.plain(volts), "V"));
         table.row("Detuning reactor, share of the capacitor's reactance", Shown.percent(bank.reactorShare()), "%");
         table.row("Own losses", Shown.plain(bank.wattsPerKvar()), "W/kvar");
+    }
+
+    private static void controller(Table table, Controller controller) {
+        if (controller.delayMinutes() > 0) {
+            table.row("Switching delay", Integer.toString(controller.delayMinutes()), "minutes");
+        }
+        controller
+                .operationsPerHour()
+                .ifPresent(most -> table.row("Steps switched in or out, at most", most.toString(), "an hour"));
     }
 
     private static void cost(Table table, Investment investment, String currency) {

@@ -34,6 +34,36 @@ class ReactiveMonthTest {
         assertThat(month.left(new BigDecimal(bank), Estimate.LOW).doubleValue()).isCloseTo(most, within(1e-3));
     }
 
+    // Q kvarh | T h | M kvar | T' h | least Q' | in proportion | most Q' | source
+    @ParameterizedTest
+    @CsvSource({
+        // 120,000 − 300 × 240 = 48,000; 120,000 × 480 ÷ 720 = 80,000; 300 × 480 is more than all
+        "120000, 720, 300, 480, 48000, 80000, 120000",
+        // 300 × 480 is more than all; 120,000 × 240 ÷ 720; 300 × 240
+        "120000, 720, 300, 240, 0, 40000, 72000",
+        // an even load: everything in proportion
+        "144000, 720, 200, 180, 36000, 36000, 36000",
+        // never off
+        "120000, 720, 300, 720, 120000, 120000, 120000"
+    })
+    void kvarhOfTheHoursThatATimeSwitchLeaves(
+            String kvarh, String hours, String peak, String on, String least, String even, String most) {
+        ReactiveMonth month = month(kvarh, hours, peak);
+        BigDecimal hoursOn = new BigDecimal(on);
+        assertThat(month.during(hoursOn, Estimate.LOW).laggingKvarh()).isEqualByComparingTo(least);
+        assertThat(month.during(hoursOn, Estimate.CENTRAL).laggingKvarh()).isEqualByComparingTo(even);
+        assertThat(month.during(hoursOn, Estimate.HIGH).laggingKvarh()).isEqualByComparingTo(most);
+    }
+
+    @Test
+    void withoutAnyPeakAllMayHaveFlownWhileTheBankWasOff() {
+        ReactiveMonth month =
+                new ReactiveMonth(new BigDecimal("120000"), new BigDecimal("720"), Optional.empty(), Optional.empty());
+        BigDecimal hoursOn = new BigDecimal("480");
+        assertThat(month.during(hoursOn, Estimate.LOW).laggingKvarh()).isZero();
+        assertThat(month.during(hoursOn, Estimate.HIGH).laggingKvarh()).isEqualByComparingTo("120000");
+    }
+
     @Test
     void withoutAnyPeakNothingIsPromised() {
         ReactiveMonth month =

@@ -82,6 +82,41 @@ class WindowTest {
                 .isEqualTo(365L * 24 * 60);
     }
 
+    // own arithmetic: from 22:00 to 07:00 and from 21:00 on 20 Mondays to Fridays in February, 2 h before midnight and
+    // 7 h
+    // after; the night of the clock in March is a Sunday's, so 21 workdays keep theirs
+    @ParameterizedTest
+    @CsvSource({"2026-02, 180", "2026-03, 198"})
+    void hoursOfTwoWindowsAreThoseInWhichBothHold(java.time.YearMonth month, String hours) {
+        Window night = Window.daily("22:00", "07:00");
+        Window rest = Window.daily("21:00", "07:00").on(WORKDAYS);
+        ZoneId zone = ZoneId.of("Europe/Berlin");
+        assertThat(night.hoursIn(Period.of(month), zone, rest)).isEqualByComparingTo(hours);
+        assertThat(rest.hoursIn(Period.of(month), zone, night)).isEqualByComparingTo(hours);
+    }
+
+    /** The minutes of every interval that both windows hold, counted one by one. */
+    @Test
+    void theMinutesOfTwoWindowsAgreeWithTheCalendarOfASeries() {
+        Window weeknights = NIGHT.on(WORKDAYS);
+        Window early = Window.daily("00:30", "07:00").in(EnumSet.range(Month.MARCH, Month.OCTOBER));
+        for (String zone : new String[] {"Europe/Berlin", "America/New_York", "Australia/Lord_Howe"}) {
+            IntervalSeries series = InventedYear.of(3, zone, 30);
+            WindowCalendar calendar = new WindowCalendar(series, Map.of("one", weeknights, "other", early));
+            for (java.time.YearMonth month = java.time.YearMonth.of(2026, 1);
+                    month.getYear() == 2026;
+                    month = month.plusMonths(1)) {
+                IntervalRange range = series.range(Period.of(month));
+                long held = java.util.stream.IntStream.range(range.from(), range.to())
+                        .filter(i -> calendar.mask(i) == 3)
+                        .count();
+                assertThat(weeknights.minutesIn(Period.of(month), series.zone(), early))
+                        .as("%s %s", zone, month)
+                        .isEqualTo(30 * held);
+            }
+        }
+    }
+
     @Test
     void theCalendarOfASeriesAgreesWithTheWindowMomentByMoment() {
         for (String zone : new String[] {"Europe/Berlin", "America/New_York", "Asia/Kolkata"}) {

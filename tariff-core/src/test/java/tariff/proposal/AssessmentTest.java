@@ -22,6 +22,7 @@ import org.junit.jupiter.params.provider.EnumSource;
 import tariff.bill.Billing;
 import tariff.bill.Bills;
 import tariff.correction.CapacitorBank;
+import tariff.correction.Controller;
 import tariff.correction.Estimate;
 import tariff.json.RateFile;
 import tariff.meter.Charged;
@@ -138,14 +139,9 @@ class AssessmentTest {
     /** The bank's own 10 W per kvar are dearest where its steps work most; that must not turn the estimates round. */
     @Test
     void theBanksOwnLossesKeepTheEstimatesInOrder() {
-        CapacitorBank lossy = new CapacitorBank(
-                BigDecimal.ZERO,
-                List.of(new BigDecimal("150"), new BigDecimal("150")),
-                Optional.of(new BigDecimal("0.98")),
-                Optional.empty(),
-                Optional.empty(),
-                BigDecimal.ZERO,
-                BigDecimal.TEN);
+        CapacitorBank lossy = CapacitorBank.automatic("150", "150")
+                .withController(Controller.aimingAt(new BigDecimal("0.98")))
+                .withLosses(BigDecimal.TEN);
         Assessment assessment = assess(EXCESS, year(), lossy);
         assertThat(assessment.savings(Estimate.LOW).settledYearTotal())
                 .isLessThan(assessment.savings(Estimate.CENTRAL).settledYearTotal());

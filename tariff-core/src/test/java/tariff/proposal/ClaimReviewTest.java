@@ -13,6 +13,7 @@ import org.junit.jupiter.api.Test;
 import tariff.bill.Billing;
 import tariff.bill.Bills;
 import tariff.correction.CapacitorBank;
+import tariff.correction.Controller;
 import tariff.electrical.KwhShare.Place;
 import tariff.json.RateFile;
 import tariff.meter.MeteredMonth;
@@ -85,14 +86,7 @@ class ClaimReviewTest {
         Map<String, BigDecimal> parts = new LinkedHashMap<>();
         parts.put("kVA demand", number("9000"));
         parts.put("power factor penalty", number("8000"));
-        CapacitorBank bank = new CapacitorBank(
-                number("100"),
-                List.of(),
-                Optional.empty(),
-                Optional.of(number("480")),
-                Optional.of(number("400")),
-                BigDecimal.ZERO,
-                BigDecimal.ZERO);
+        CapacitorBank bank = CapacitorBank.fixed("100").withVolts(number("480"), number("400"));
         Offer offer = new Offer(
                 proposal(bank, "12000", "2000"),
                 Optional.of(Place.AT_THE_METER),
@@ -204,11 +198,12 @@ class ClaimReviewTest {
         CapacitorBank bank = new CapacitorBank(
                 number("100"),
                 List.of(),
-                Optional.empty(),
+                Controller.quick(),
                 Optional.of(number("480")),
                 Optional.empty(),
                 BigDecimal.ZERO,
-                BigDecimal.ZERO);
+                BigDecimal.ZERO,
+                Optional.empty());
         Offer offer = Offer.of(
                 Proposal.of(bank),
                 SavingsClaim.yearly(number("100")),

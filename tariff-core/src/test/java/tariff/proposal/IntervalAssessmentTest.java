@@ -15,6 +15,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 import tariff.bill.Billing;
 import tariff.bill.Bills;
 import tariff.correction.CapacitorBank;
+import tariff.correction.Controller;
 import tariff.correction.Estimate;
 import tariff.json.RateFile;
 import tariff.meter.IntervalSeries;
@@ -96,13 +97,7 @@ class IntervalAssessmentTest {
     }
 
     private static CapacitorBank mixed(String kvar) {
-        return new CapacitorBank(
-                new BigDecimal(kvar),
-                List.of(new BigDecimal(kvar)),
-                Optional.of(new BigDecimal("0.98")),
-                Optional.empty(),
-                Optional.empty(),
-                BigDecimal.ZERO,
-                BigDecimal.ZERO);
+        return CapacitorBank.plain(new BigDecimal(kvar), List.of(new BigDecimal(kvar)))
+                .withController(Controller.aimingAt(new BigDecimal("0.98")));
     }
 }

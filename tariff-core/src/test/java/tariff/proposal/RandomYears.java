@@ -14,7 +14,10 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Random;
 import tariff.bill.Bills;
+import tariff.correction.CapacitorBank;
+import tariff.correction.Controller;
 import tariff.meter.MeteredMonth;
+import tariff.meter.Window;
 import tariff.payback.Outlook;
 
 /** Invented rates, years and prices from a seed. */
@@ -92,11 +95,22 @@ final class RandomYears {
     }
 
     static BankShape shape(Random random) {
+        CapacitorBank like = like(random);
         return switch (random.nextInt(3)) {
-            case 0 -> BankShape.fixed();
-            case 1 -> BankShape.automatic(1 + random.nextInt(8));
-            default -> BankShape.mixed(new BigDecimal("0.3"), 1 + random.nextInt(6));
+            case 0 -> new BankShape(BigDecimal.ONE, 0, like);
+            case 1 -> new BankShape(BigDecimal.ZERO, 1 + random.nextInt(8), like);
+            default -> new BankShape(new BigDecimal("0.3"), 1 + random.nextInt(6), like);
         };
+    }
+
+    /** With a time switch or without, with losses or without, aiming at unity or below. */
+    private static CapacitorBank like(Random random) {
+        CapacitorBank bank = CapacitorBank.fixed("0");
+        bank = random.nextBoolean()
+                ? bank.offIn(Window.daily(random.nextBoolean() ? "22:00" : "13:00", "06:00"))
+                : bank;
+        bank = random.nextBoolean() ? bank.withLosses(BigDecimal.valueOf(random.nextInt(10))) : bank;
+        return random.nextInt(3) == 0 ? bank.withController(Controller.aimingAt(new BigDecimal("0.96"))) : bank;
     }
 
     static Outlook outlook() {

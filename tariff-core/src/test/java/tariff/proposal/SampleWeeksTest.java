@@ -72,7 +72,7 @@ class SampleWeeksTest {
                 .filteredOn(each -> each.code().equals("kvarh-spread"))
                 .extracting(Assumption::remedy)
                 .containsExactly("interval data settle it; " + weeks.words()
-                        + " of them, spread over the year, bring the kvarh taken off to within about 10 %");
+                        + " of them, spread over the year, would bring the kvarh taken off to within about 10 %");
     }
 
     private static Optional<SampleWeeks> answer(IntervalSeries year, int kvar) {

@@ -61,6 +61,31 @@ class SizingPropertiesTest {
         }
     }
 
+    /** The bill of the kindest month is a floor: no bank between two saves more than its ceiling. */
+    @ParameterizedTest
+    @MethodSource("seeds")
+    void noBankBetweenTwoSavesMoreThanTheirCeiling(int seed) {
+        Random random = new Random(seed);
+        Billing billing = new Billing(RateFile.parse(RandomYears.rate(random)), Site.unnamed());
+        List<MeteredMonth> year = RandomYears.year(random);
+        BankShape shape = RandomYears.shape(random);
+        PowerFactorCost today = PowerFactorCost.of(billing, List.of(), year);
+        RepeatedYear repeated = new RepeatedYear(billing, today, year, false, Optional.empty());
+        for (int draw = 0; draw < 12; draw++) {
+            int from = 1 + random.nextInt(MOST);
+            int to = from + random.nextInt(MOST);
+            int between = from + random.nextInt(to - from + 1);
+            for (Estimate estimate : Estimate.values()) {
+                RepeatedYear.Saved ceiling =
+                        repeated.atMost(shape.of(BigDecimal.valueOf(from)), shape.of(BigDecimal.valueOf(to)), estimate);
+                CapacitorBank bank = shape.of(BigDecimal.valueOf(between));
+                assertThat(repeated.saved(bank, estimate).settledYear())
+                        .as("%s, %d between %d and %d kvar, %s", bank, between, from, to, estimate)
+                        .isLessThanOrEqualTo(ceiling.settledYear());
+            }
+        }
+    }
+
     /** What the search adds up in four numbers is what a whole cash flow gives. */
     @ParameterizedTest
     @MethodSource("seeds")

@@ -255,7 +255,7 @@ class RateCheckTest {
                 "/lines/0: \"name\" is missing",
                 "/lines/1/price: must be a number; found null; allowed: a number such as 0.95, without quotes",
                 "/line: is not a key here; did you mean \"lines\"?; found line; allowed: name, currency, validFrom, source, follows,"
-                        + " powerFactors, holidays, timeZone, windows, seasons, seasonBy, quantities, lines, roundLines, roundTotal",
+                        + " powerFactors, timeZone, holidays, windows, seasons, seasonBy, quantities, lines, roundLines, roundTotal",
                 "/lines/0/quantity: there is no quantity \"kw\"; found kw; allowed: none is defined");
     }
 

@@ -25,7 +25,7 @@ class WindowClauseTest {
                                 + " 'holidays': 'excluded' } },")
                 .rate()
                 .orElseThrow();
-        assertThat(rate.hours(Period.of(YearMonth.of(2026, 1)), "day").orElseThrow())
+        assertThat(rate.windows().get("day").hoursIn(Period.of(YearMonth.of(2026, 1)), rate.zone()))
                 .isEqualByComparingTo("294");
         assertThat(rate.words().definitions())
                 .containsExactly("Window \"day\": Mon to Fri 07:00 to 21:00 (UTC time), not on holidays (1 given).");

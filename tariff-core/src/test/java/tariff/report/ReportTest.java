@@ -3,9 +3,11 @@ package tariff.report;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.math.BigDecimal;
 import java.time.LocalDate;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
@@ -13,10 +15,14 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.w3c.dom.Element;
 import tariff.bill.Bills;
+import tariff.correction.CapacitorBank;
+import tariff.correction.Controller;
 import tariff.electrical.Screening;
+import tariff.meter.Window;
 import tariff.notice.Assumption;
 import tariff.notice.Caution;
 import tariff.proposal.Assessment;
+import tariff.proposal.Proposal;
 import tariff.proposal.Reviewed;
 
 /** What a report holds, where, and in what form. */
@@ -88,6 +94,21 @@ class ReportTest {
         assertThat(html)
                 .contains("<p>When it pays back is not told: no price is given.</p>")
                 .contains("<p>No payback: no price is given.</p>");
+    }
+
+    @Test
+    void whatTheBankIsToldStandsBesideIt() {
+        CapacitorBank bank = CapacitorBank.plain(new BigDecimal("50"), List.of(new BigDecimal("25")))
+                .withController(new Controller(Optional.empty(), 5, Optional.of(12)))
+                .offIn(Window.daily("22:00", "06:00"));
+        Report report = Report.of(
+                Assessment.of(Handed.billing("", Bills.rate(Handed.LINES)), Handed.year(), Proposal.of(bank)));
+        assertThat(Pages.read(report.html()).rows("bank-table"))
+                .contains(
+                        List.of("Fixed", "50", "kvar"),
+                        List.of("Switching delay", "5", "minutes"),
+                        List.of("Steps switched in or out, at most", "12", "an hour"),
+                        List.of("Kept off by a time switch", "every day 22:00 to 06:00", ""));
     }
 
     @ParameterizedTest

@@ -34,6 +34,11 @@ public final class Written {
         this.findings = findings;
     }
 
+    /** The same value, whose findings somebody else is told too. */
+    public Written toldAlso(Consumer<Finding> other) {
+        return new Written(value, pointer, findings.andThen(other));
+    }
+
     public String pointer() {
         return pointer;
     }

@@ -10,7 +10,6 @@ import java.util.Optional;
 import java.util.function.Function;
 import java.util.stream.Stream;
 import tariff.bill.PowerFactorCost;
-import tariff.correction.CapacitorBank;
 import tariff.correction.Estimate;
 import tariff.json.AssessmentJson;
 import tariff.json.JsonObject;
@@ -20,7 +19,6 @@ import tariff.meter.Readings;
 import tariff.meter.Register;
 import tariff.payback.Answer;
 import tariff.payback.Appraisal;
-import tariff.payback.Investment;
 import tariff.proposal.Assessment;
 import tariff.proposal.BankSavings;
 
@@ -40,7 +38,10 @@ record AssessmentAnswer(Assessment assessment) implements Format.Printable {
                 Wrapped.text(
                         "\"To that point\" and \"to unity\" are what the bill would fall by if reactive load were lower and"
                                 + " nothing else changed: kWh, kW, fixed charges and floors stand on both sides, for no capacitor removes them."));
-        out.append("\nThe proposal: ").append(bank()).append("\n\n").append(savings());
+        out.append('\n')
+                .append(Wrapped.text("The proposal: " + ProposedText.of(assessment.proposal())))
+                .append('\n')
+                .append(savings());
         assessment.whyNoPayback().ifPresent(why -> out.append(Wrapped.text("  No payback: " + why + ".")));
         reasons().forEach(reason -> out.append(Wrapped.text("  " + reason + ".")));
         if (!assessment.proposal().screens().isEmpty()) {
@@ -93,27 +94,6 @@ record AssessmentAnswer(Assessment assessment) implements Format.Printable {
                 .or(() -> Derivable.POWER_FACTOR.from(readings))
                 .map(value -> value.setScale(3, RoundingMode.HALF_UP).toPlainString())
                 .orElse("-");
-    }
-
-    private String bank() {
-        CapacitorBank bank = assessment.proposal().bank();
-        String fixed = bank.fixedKvar().signum() == 0 ? "" : bank.fixedKvar().toPlainString() + " kvar always on";
-        String steps = bank.stepsKvar().isEmpty()
-                ? ""
-                : "switched steps of "
-                        + String.join(
-                                ", ",
-                                bank.stepsKvar().stream()
-                                        .map(BigDecimal::toPlainString)
-                                        .toList())
-                        + " kvar";
-        String cost = assessment
-                .proposal()
-                .investment()
-                .map(Investment::netCost)
-                .map(net -> ", cost " + money(net))
-                .orElse(", no price given");
-        return fixed + (fixed.isEmpty() || steps.isEmpty() ? "" : " and ") + steps + cost;
     }
 
     private String savings() {

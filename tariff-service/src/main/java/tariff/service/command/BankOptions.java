@@ -10,6 +10,7 @@ import tariff.proposal.Proposal;
 import tariff.service.request.BankTerms;
 import tariff.service.request.Declared;
 import tariff.service.request.InvestmentTerms;
+import tariff.service.request.OffHours;
 import tariff.service.request.OutlookTerms;
 
 /** The bank that a command is asked about: from a file, or from options. */
@@ -33,6 +34,25 @@ final class BankOptions {
             description = "power factor that the steps aim at; unity unless said")
     private Optional<BigDecimal> target;
 
+    @Option(
+            names = "--delay",
+            paramLabel = "MINUTES",
+            description =
+                    "how long switching must be wanted before a step is switched; less than an interval counts as quick")
+    private Optional<Integer> delayMinutes;
+
+    @Option(
+            names = "--operations-per-hour",
+            paramLabel = "N",
+            description = "steps switched in or out in any hour, at most; no limit unless said")
+    private Optional<Integer> operationsPerHour;
+
+    @Option(
+            names = "--off",
+            paramLabel = "TIMES",
+            description = "when a time switch keeps the whole bank off, every day: 22:00-06:00")
+    private Optional<String> off;
+
     @Option(names = "--cost", paramLabel = "MONEY", description = "what the bank costs until it is in service")
     private Optional<BigDecimal> cost;
 
@@ -49,16 +69,8 @@ final class BankOptions {
         if (file.isPresent()) {
             return Files.proposal(file.get());
         }
-        BankTerms plain = BankTerms.plain(fixedKvar, stepsKvar);
-        BankTerms bank = Declared.require(new BankTerms(
-                plain.fixedKvar(),
-                plain.stepsKvar(),
-                target,
-                plain.ratedVolts(),
-                plain.serviceVolts(),
-                plain.reactorShare(),
-                plain.wattsPerKvar(),
-                plain.duty()));
+        BankTerms bank = Declared.require(BankTerms.plain(fixedKvar, stepsKvar)
+                .told(target, delayMinutes, operationsPerHour, off.map(times -> OffHours.daily("--off", times))));
         Optional<InvestmentTerms> investment =
                 cost.map(money -> Declared.require(InvestmentTerms.plain(money, upkeep, lifeYears)));
         OutlookTerms outlook = Declared.require(OutlookTerms.level(discountRate));

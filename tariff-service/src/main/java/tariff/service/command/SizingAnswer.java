@@ -111,7 +111,7 @@ record SizingAnswer(Billing billing, Estimate basis, Sizing sizing) implements F
     private static String divided(CapacitorBank bank) {
         List<String> parts = new ArrayList<>();
         if (bank.fixedKvar().signum() > 0) {
-            parts.add(plain(bank.fixedKvar()) + " kvar always on");
+            parts.add(plain(bank.fixedKvar()) + (bank.off().isPresent() ? " kvar fixed" : " kvar always on"));
         }
         Map<BigDecimal, Integer> steps = new TreeMap<>();
         bank.stepsKvar().forEach(step -> steps.merge(step, 1, Integer::sum));

@@ -25,10 +25,13 @@ public final class IntervalRequest {
             "fixedKvar",
             "stepsKvar",
             "targetPowerFactor",
+            "switchingDelayMinutes",
+            "operationsPerHour",
             "ratedVolts",
             "serviceVolts",
             "reactorShare",
-            "wattsPerKvar");
+            "wattsPerKvar",
+            "off");
     private static final Set<String> INVESTMENT =
             Set.of("purchase", "installation", "incentives", "yearlyUpkeep", "lifeYears", "residual");
     private static final Set<String> OUTLOOK =

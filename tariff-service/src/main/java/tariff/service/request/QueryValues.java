@@ -9,13 +9,14 @@ import java.util.TreeMap;
 import java.util.stream.Stream;
 import tariff.notice.Finding;
 
-/** The values of a query as a JSON document would hold them: lists, decimals, texts, true and false. */
+/** The values of a query as a JSON document would hold them: lists, decimals, texts, windows, true and false. */
 record QueryValues(List<Finding> findings) {
     private static final Set<String> TEXTS = Set.of("rate", "zone", "stamps", "dates", "gaps", "site");
     private static final Set<String> REPEATED = Set.of("option", "agreed");
     private static final Set<String> FLAGS = Set.of("slidingDemand", "charts", "counter");
     private static final Set<String> EITHER = Set.of("true", "false");
     private static final String STEPS = "stepsKvar";
+    private static final String OFF = "off";
     private static final String NUMBER = "[+-]?(\\d{1,40}(\\.\\d{0,40})?|\\.\\d{1,40})([eE][+-]?\\d{1,3})?";
 
     Map<String, Object> of(Map<String, List<String>> parameters) {
@@ -27,12 +28,20 @@ record QueryValues(List<Finding> findings) {
                 findings.add(Finding.error("repeated", "/" + name, "is given more than once")
                         .found(given.size() + " times")
                         .allowed("once"));
-                values.put(name, value(name, given.get(0)));
+                put(values, name, given.get(0));
             } else {
-                values.put(name, value(name, given.isEmpty() ? "" : given.get(0)));
+                put(values, name, given.isEmpty() ? "" : given.get(0));
             }
         });
         return values;
+    }
+
+    private void put(Map<String, Object> values, String name, String text) {
+        if (name.equals(OFF)) {
+            OffHours.document("/" + name, text, findings::add).ifPresent(window -> values.put(name, window));
+        } else {
+            values.put(name, value(name, text));
+        }
     }
 
     private static Object value(String name, String text) {

@@ -6,9 +6,12 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import tariff.service.http.Examples;
 
@@ -123,6 +126,47 @@ class CommandTest {
                 .allSatisfy(line ->
                         assertThat(line.codePointCount(0, line.length())).isLessThanOrEqualTo(100));
         assertThat(out).contains("screening estimate", "lethal charge");
+    }
+
+    @Test
+    void aProposalSaysWhatItsControllerAndItsTimeSwitchAreTold() {
+        String proposal =
+                Examples.path("examples/foundry/proposal-off-at-night.json").toString();
+        String out = run("assess", RATE, BILLS, "--proposal", proposal).out();
+        assertThat(out).contains("""
+                The proposal: 100 kvar fixed and switched steps of 50, 100, 100 kvar after 5 minutes, at most 12
+                    operations an hour, off Mon to Fri 22:00 to 06:00, cost 30500.00
+                """, """
+                - the year: a month's totals do not show what flows while the time switch keeps the bank off: the
+                    low savings take as much of the kvarh to fall there as can be and the highest kVA and kvar too,
+                    the high as little, the central in proportion to the hours (to remove it: interval data settle
+                    it)
+                - the year: a month's totals do not show how often the load changes: the switching delay and the
+                    limit of operations an hour are not counted (to remove it: interval data settle it)
+                - the year: a time switch keeps the whole bank off Mon to Fri 22:00 to 06:00; in the other hours the
+                    fixed kvar are always on; the steps follow the load and send nothing back but for two thirds of
+                    the smallest step, which the low savings count against the bank
+                """);
+    }
+
+    // options | what is said
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = '|',
+            value = {
+                "--fixed 50 --off 22-6 | --off: is not from one time to another; found 22-6; allowed: two times of day with a hyphen between, such as 22:00-06:00",
+                "--fixed 50 --off 25:00-06:00 | --off/from: is not a time of day; found \"25:00\"; allowed: hours and minutes, 00:00 to 24:00",
+                "--fixed 50 --off 00:00-24:00 | --off: keeps the bank off all the time; found every day all day; allowed: a window that leaves the bank some hours",
+                "--fixed 50 --delay 5 | does not hold together; allowed: \"switchingDelayMinutes\" and \"operationsPerHour\" only beside \"stepsKvar\"",
+                "--steps 50 --delay 61 | /switchingDelayMinutes: is out of range; found 61; allowed: 0 to 60 minutes",
+                "--steps 50 --operations-per-hour 0 | /operationsPerHour: is out of range; found 0; allowed: 1 to 10000 an hour"
+            })
+    void whatNoControllerOrTimeSwitchCanBeToldIsAFinding(String options, String said) {
+        List<String> arguments = new ArrayList<>(List.of("assess", RATE, BILLS));
+        arguments.addAll(List.of(options.split(" ")));
+        Ran ran = Ran.of(arguments.toArray());
+        assertThat(ran.exit()).isEqualTo(Exit.FINDINGS);
+        assertThat(ran.err()).isEqualTo(said + "\n");
     }
 
     @Test

@@ -11,6 +11,8 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -51,6 +53,36 @@ class IntervalCommandTest {
         assertThat(out.lines())
                 .allSatisfy(line ->
                         assertThat(line.codePointCount(0, line.length())).isLessThanOrEqualTo(100));
+    }
+
+    /** What a time switch and a controller are told shows in what the bank did; the figures themselves are checked in the core. */
+    @Test
+    void aTimeSwitchAndAControllerAreHeardOnIntervalData() {
+        int free = leadingCreated(run("assess", "--fixed", "150"));
+        assertThat(leadingCreated(run("assess", "--fixed", "150", "--off", "22:00-06:00")))
+                .isLessThan(free / 2);
+        int quick = operations(run("assess", "--steps", "50,50,100"));
+        assertThat(operations(run("assess", "--steps", "50,50,100", "--delay", "60")))
+                .isLessThan(quick);
+        assertThat(operations(run("assess", "--steps", "50,50,100", "--operations-per-hour", "1")))
+                .isLessThan(quick);
+        // an hour's data tell nothing of ten minutes
+        assertThat(operations(run("assess", "--steps", "50,50,100", "--delay", "10")))
+                .isEqualTo(quick);
+    }
+
+    private static int leadingCreated(String out) {
+        return number(out, "Leading kvarh that the bank creates: (\\d+)");
+    }
+
+    private static int operations(String out) {
+        return number(out, "switched in or out (\\d+) times");
+    }
+
+    private static int number(String out, String pattern) {
+        Matcher found = Pattern.compile(pattern).matcher(out);
+        assertThat(found.find()).isTrue();
+        return Integer.parseInt(found.group(1));
     }
 
     @Test

@@ -53,6 +53,53 @@ class ProposalsTest extends Served {
                 .body("savings.central.settledYear", equalTo(saved));
     }
 
+    /** All that a bank can be told comes back as a request takes it. */
+    @Test
+    void theBestSizeOfATimeSwitchedBankCanBeAssessedAsItStands() {
+        Map<String, Object> sizing = request("sizing");
+        Map<String, Object> choice = new TreeMap<>();
+        choice.put("shapes", List.of("automatic"));
+        choice.put("steps", 4);
+        choice.put(
+                "make",
+                Map.of(
+                        "switchingDelayMinutes",
+                        10,
+                        "operationsPerHour",
+                        6,
+                        "wattsPerKvar",
+                        2,
+                        "off",
+                        Map.of("weekdays", "Mon-Fri", "from", "22:00", "to", "24:00", "months", List.of(11, 12))));
+        sizing.put("choice", choice);
+        Response best = json(Json.text(sizing)).post("/sizings");
+        best.then()
+                .statusCode(200)
+                .body("highestValue.bank.switchingDelayMinutes", equalTo(10))
+                .body("highestValue.bank.operationsPerHour", equalTo(6))
+                .body(
+                        "highestValue.bank.off",
+                        equalTo(Map.of(
+                                "weekdays",
+                                "Mon, Tue, Wed, Thu, Fri",
+                                "from",
+                                "22:00",
+                                "to",
+                                "24:00",
+                                "months",
+                                List.of(11, 12))))
+                .body("assumptions.code", hasItems("off-hours", "switching-not-seen"));
+        Map<String, Object> assessment = new TreeMap<>(sizing);
+        assessment.keySet().retainAll(List.of("rate", "site", "months"));
+        assessment.put("bank", best.path("highestValue.bank"));
+        float saved = best.path("highestValue.gains.central.settledYear");
+        json(Json.text(assessment))
+                .post("/assessments")
+                .then()
+                .statusCode(200)
+                .body("savings.central.settledYear", equalTo(saved));
+    }
+
     /** kvarh at 0.0060 never pay for a connection at 14,000; own arithmetic: no saving above 1,179.79 a year is to be had. */
     @Test
     void noBankIsSaidPlainly() {
@@ -172,6 +219,12 @@ class ProposalsTest extends Served {
                 "/screenings | {\"network\":{\"transformrKva\":1}} | /network/transformrKva: is not a key here; did you mean \"transformerKva\"?",
                 "/screenings | {\"bank\":{\"fixedKvar\":50,\"ratedVolts\":440,\"serviceVolts\":415},\"network\":{\"serviceVolts\":400}} | /network/serviceVolts: is not what /bank/serviceVolts says; found 400; allowed: 415",
                 "/screenings | {\"bank\":{\"stepsKvar\":[0.001]},\"network\":{\"serviceVolts\":400}} | /bank: has a step too small to be screened; allowed: 0.01 kvar or more",
+                "/screenings | {\"bank\":{\"fixedKvar\":9,\"operationsPerHour\":4}} | /bank: does not hold together; allowed: \"switchingDelayMinutes\" and \"operationsPerHour\" only beside \"stepsKvar\"",
+                "/screenings | {\"bank\":{\"stepsKvar\":[9],\"switchingDelayMinutes\":1.5}} | /bank/switchingDelayMinutes: must be a whole number; found 1.5; allowed: a whole number from 0 to 60",
+                "/screenings | {\"bank\":{\"fixedKvar\":9,\"off\":\"at night\"}} | /bank/off: must be a window; found \"at night\"; allowed: an object with any of: weekdays, from, to, months",
+                "/screenings | {\"bank\":{\"fixedKvar\":9,\"off\":{\"from\":\"22\"}}} | /bank/off/from: is not a time of day; found \"22\"; allowed: hours and minutes, 00:00 to 24:00",
+                "/screenings | {\"bank\":{\"fixedKvar\":9,\"off\":{\"holidays\":\"sunday\"}}} | /bank/off/holidays: is not a key here; found holidays; allowed: weekdays, from, to, months",
+                "/screenings | {\"bank\":{\"fixedKvar\":9,\"off\":{}}} | /bank/off: keeps the bank off all the time; found every day all day; allowed: a window that leaves the bank some hours",
                 "/screenings | {\"bank\":{\"fixedKvar\":9,\"duty\":{\"conductorAmps\":0}}} | /bank/duty/conductorAmps: is out of range; found 0; allowed: 0.1 to 100000 A"
             })
     void everythingThatIsWrongIsSaidAtOnce(String path, String body, String finding) {

@@ -256,14 +256,59 @@ class UploadTest extends Served {
         upload(path, day(), all).statusCode(422).body("findings.message", not(hasItem(startsWith("is not a key"))));
     }
 
+    /** Off from 12:00 on nothing is sent back: 12 × 25 and 12 × 10 kvarh are left; own arithmetic. */
+    @Test
+    void aTimeSwitchKeepsTheBankOff() {
+        upload(
+                        "/interval-assessments",
+                        day(),
+                        Map.of("rate", HOURLY, "zone", ZONE, "fixedKvar", "50", "off", "12:00-24:00"))
+                .statusCode(200)
+                .body("inService.leadingKvarhCreated", equalTo(0.0f))
+                .body("inService.months[0].after.laggingKvarh", equalTo(420.0f));
+    }
+
+    /** Of the two steps of 35 one goes in at 00:00, the other at 01:00, one out at 12:00, the other at 13:00; own arithmetic. */
+    @Test
+    void aControllerKeepsToItsLimit() {
+        upload(
+                        "/interval-assessments",
+                        day(),
+                        Map.of(
+                                "rate",
+                                HOURLY,
+                                "zone",
+                                ZONE,
+                                "stepsKvar",
+                                "35,35",
+                                "operationsPerHour",
+                                "1",
+                                "switchingDelayMinutes",
+                                "10"))
+                .statusCode(200)
+                .body("inService.operations", equalTo(4))
+                .body("inService.hoursAtFullOutput", equalTo(11.0f))
+                .body("inService.leadingKvarhCreated", equalTo(25.0f));
+    }
+
     @Test
     void everythingWrongWithTheQueryIsSaidAtOnce() {
         upload(
                         "/interval-assessments",
                         day(),
-                        Map.of("rate", "ilha-verde-hourli", "zone", "Atlantis", "fixedKvar", "much", "gap", "refuse"))
+                        Map.of(
+                                "rate",
+                                "ilha-verde-hourli",
+                                "zone",
+                                "Atlantis",
+                                "fixedKvar",
+                                "much",
+                                "gap",
+                                "refuse",
+                                "off",
+                                "nights"))
                 .statusCode(422)
-                .body("findings.pointer", hasItems("/rate", "/zone", "/fixedKvar", "/gap"))
+                .body("findings.pointer", hasItems("/rate", "/zone", "/fixedKvar", "/gap", "/off"))
                 .body("findings.find { it.pointer == '/zone' }.message", equalTo("is not a time zone"))
                 .body(
                         "findings.find { it.pointer == '/rate' }.message",
