@@ -83,7 +83,7 @@ public record BankMonth(CapacitorBank bank, Map<String, Window> windows, ZoneId 
             ReactiveMonth load =
                     new ReactiveMonth(lagging.get(), hours.all(), highest(known, whole), likely(known, whole));
             BigDecimal left = lagging.get().subtract(removed(load, known, hours, estimate));
-            BigDecimal created = created(load, hours, estimate);
+            BigDecimal created = created(load, known, hours, estimate);
             BigDecimal sent = known.get(LEADING_KVARH).orElse(BigDecimal.ZERO).add(created);
             BigDecimal delivered = created.add(removed(load, known, hours, estimate.opposite()));
             after = after.with(LAGGING_KVARH, left).with(LEADING_KVARH, sent);
@@ -119,14 +119,16 @@ public record BankMonth(CapacitorBank bank, Map<String, Window> windows, ZoneId 
             case LOW ->
                 left.add(targetKvarh(known).min(on.laggingKvarh()))
                         .add(bank.deadBandKvar().multiply(hours.on()));
-            case CENTRAL -> {
-                BigDecimal aim = targetKvarh(known).multiply(hours.on()).divide(hours.all(), Triangle.PRECISION);
-                yield left.max(aim.min(on.laggingKvarh()));
-            }
+            case CENTRAL -> left.max(likely(on, known, hours).laggingKvarh());
             case HIGH -> left;
         };
         BigDecimal withFixedAlone = on.left(bank.effectiveFixedKvar(), estimate);
         return kept.min(withFixedAlone);
+    }
+
+    private LikelySteps likely(ReactiveMonth on, Readings known, Hours hours) {
+        return LikelySteps.of(
+                on, bank, targetKvarh(known).multiply(hours.on()).divide(hours.all(), Triangle.PRECISION));
     }
 
     /** What a controller leaves on purpose at the most: the kvarh of the power factor it aims at. */
@@ -137,13 +139,17 @@ public record BankMonth(CapacitorBank bank, Map<String, Window> windows, ZoneId 
                 .orElse(BigDecimal.ZERO);
     }
 
-    /** Leading kvarh: only the fixed kvar send any back, c × T′ less what they remove; and steps within their dead band, at the worst. */
-    private BigDecimal created(ReactiveMonth load, Hours hours, Estimate estimate) {
+    /** Leading kvarh: what the fixed kvar send back, c × T′ less what they remove, and what steps do that come in whole. */
+    private BigDecimal created(ReactiveMonth load, Readings known, Hours hours, Estimate estimate) {
         BigDecimal fixed = bank.effectiveFixedKvar();
         ReactiveMonth on = load.during(hours.on(), estimate);
         BigDecimal sent = on.left(fixed, estimate).subtract(on.laggingKvarh()).add(fixed.multiply(hours.on()));
-        BigDecimal hunting = estimate == Estimate.LOW ? bank.deadBandKvar().multiply(hours.on()) : BigDecimal.ZERO;
-        return sent.max(BigDecimal.ZERO).add(hunting);
+        BigDecimal bySteps = switch (estimate) {
+            case LOW -> bank.deadBandKvar().multiply(hours.on());
+            case CENTRAL -> bank.isAutomatic() ? likely(on, known, hours).sentBackKvarh() : BigDecimal.ZERO;
+            case HIGH -> BigDecimal.ZERO;
+        };
+        return sent.max(BigDecimal.ZERO).add(bySteps);
     }
 
     /**

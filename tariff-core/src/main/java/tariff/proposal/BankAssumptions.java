@@ -39,7 +39,7 @@ final class BankAssumptions {
                                 .map(off -> "a time switch keeps the whole bank off " + WindowWords.of(off)
                                         + "; in the other hours ")
                                 .orElse("")
-                        + inService(bank),
+                        + inService(bank, exact),
                 bank.off().isPresent() ? "none" : "switch it by time, and say in which hours"));
         all.add(new Assumption(
                 "rated-output",
@@ -62,15 +62,17 @@ final class BankAssumptions {
         return all;
     }
 
-    private static String inService(CapacitorBank bank) {
+    private static String inService(CapacitorBank bank, boolean exact) {
         boolean always = bank.off().isEmpty();
         if (!bank.isAutomatic()) {
             return always ? "the bank is on in every hour of the year" : "it is always on";
         }
         String fixed = always ? "the fixed kvar are on in every hour; " : "the fixed kvar are always on; ";
         return (bank.fixedKvar().signum() > 0 ? fixed : "")
-                + "the steps follow the load and send nothing back but for two thirds of the smallest step, which the low savings"
-                + " count against the bank";
+                + (exact
+                        ? "the steps follow the load interval by interval, as their controller lets them"
+                        : "the steps follow the load as far as whole steps can: the low savings count two thirds of the smallest"
+                                + " step against them in every hour, the central what the load curve tells, the high nothing");
     }
 
     /** What monthly totals do not show of a bank that is switched off or held back. */

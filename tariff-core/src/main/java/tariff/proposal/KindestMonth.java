@@ -31,11 +31,12 @@ import tariff.rate.Rate;
  * A month whose every reading is at least as good as with any bank between two: nothing lags more than with the larger one, nothing leads
  * more than with the smaller one, the controller is as fine as the finer one. No single bank need reach it; its bill is a floor under the
  * bills of all of them. Own derivation: lagging kvarh and kvar fall with all kvar of a bank and rise with its smallest step; leading ones
- * rise with its fixed kvar and smallest step; kVA falls with all kvar and rises with fixed kvar and smallest step. A time switch is the same
- * for all of them: it leaves each the same hours, so the same holds in those.
+ * rise with its fixed kvar and smallest step; kVA falls with all kvar and rises with fixed kvar and smallest step. In the central estimate
+ * coarse steps may happen to fit the load better than fine ones; there nothing lags more than with all kvar always on, and only fixed kvar
+ * lead. A time switch is the same for all of them: it leaves each the same hours, so the same holds in those.
  *
- * <p>A bank's own losses raise kWh and kW, the larger bank's most. Their amounts are those of the smaller bank; in the high estimate, where
- * coarse steps deliver least, those of its fixed kvar alone. More losses might help a power factor or a share of the kWh, so everything
+ * <p>A bank's own losses raise kWh and kW, the larger bank's most. Their amounts are those of the smaller bank; in the central and high
+ * estimates, where coarse steps may deliver less, those of its fixed kvar alone. More losses might help a power factor or a share of the kWh, so everything
  * reactive and the kVA are lowered in the same ratio.
  */
 final class KindestMonth {
@@ -53,12 +54,19 @@ final class KindestMonth {
                 .min(BigDecimal::compareTo)
                 .orElse(larger.isAutomatic() ? TRACE : BigDecimal.ZERO);
         this.withSmaller =
-                month(estimate == Estimate.HIGH ? smaller.withKvar(smaller.fixedKvar(), List.of()) : smaller, rate);
+                month(estimate == Estimate.LOW ? smaller : smaller.withKvar(smaller.fixedKvar(), List.of()), rate);
         this.withLarger = month(larger, rate);
-        this.leastLagging = month(larger.isAutomatic() ? divided(larger, larger.fixedKvar(), step) : larger, rate);
+        this.leastLagging = month(leastLagging(larger, step, estimate), rate);
         this.leastApparent =
                 month(divided(larger, smaller.fixedKvar(), step.max(TRACE)).withLosses(BigDecimal.ZERO), rate);
         this.estimate = estimate;
+    }
+
+    private static CapacitorBank leastLagging(CapacitorBank larger, BigDecimal step, Estimate estimate) {
+        if (estimate == Estimate.CENTRAL) {
+            return larger.withKvar(larger.ratedKvar(), List.of());
+        }
+        return larger.isAutomatic() ? divided(larger, larger.fixedKvar(), step) : larger;
     }
 
     private static BankMonth month(CapacitorBank bank, Rate rate) {

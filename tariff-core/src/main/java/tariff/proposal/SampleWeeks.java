@@ -20,9 +20,9 @@ import tariff.meter.Register;
  * <p>Each week shows the share of its kvarh that the bank takes off; the bills give the kvarh. Shares of n weeks that vary by a coefficient
  * v have a mean within 10 % nine times in ten where 1.645 v ÷ √n is 0.1 (normal distribution). What bills show of v is how the central
  * shares of the months differ. If weeks differ no more than months do, that is v; if they are independent of one another, a month is the
- * mean of 52 ÷ 12 of them and v is √(52 ÷ 12) times as large. Own derivation. On a small steel plant's year (UCI 851)
- * 10, 8, 5, 4 and 3 weeks were needed for fixed banks of 10, 20, 40, 60 and 80 kvar, each between the two answers. Demands need the peak of every month, which no
- * sample has.
+ * mean of 52 ÷ 12 of them and v is √(52 ÷ 12) times as large. Own derivation. On a small steel plant's year (UCI 851) 10, 8,
+ * 5, 4 and 3 weeks were needed for fixed banks of 10, 20, 40, 60 and 80 kvar, each between the two answers. Demands need the peak of every
+ * month, which no sample has.
  *
  * @param fewest 2 to 52
  * @param most at least as many

@@ -70,7 +70,7 @@ class ClaimReviewTest {
                 .containsExactly(
                         "saves 8900.00 a year: holds by the estimate between the bounds, 9000.00 a year; the bills alone promise 7112.16.",
                         "pays back in 1.08 years: holds: by the estimate between the bounds the cost is back in 1.02 years.",
-                        "brings every month to power factor 0.93: holds by the estimate between the bounds, 0.99 in the lowest month.",
+                        "brings every month to power factor 0.93: holds by the estimate between the bounds, 0.989 in the lowest month.",
                         "saves 0.2 % of the kWh: holds: losses before the bank may fall by 0.36 % of the kWh.",
                         "lowers the demand by 1 kW: holds: losses before the bank may fall by 0.36 % of the kW.",
                         "needs no detuning reactor: holds only if measured harmonics and a resonance check agree; 10 % of the load is"
