@@ -97,9 +97,7 @@ final class Registers {
 
     /** A leading register that a meter writes with a minus throughout. */
     private void mirror(long[] leading) {
-        boolean below = Arrays.stream(leading).anyMatch(value -> value != Grid.NONE && value < 0);
-        boolean above = Arrays.stream(leading).anyMatch(value -> value > 0);
-        if (below && !above) {
+        if (firstNegative(leading) >= 0 && Arrays.stream(leading).noneMatch(value -> value > 0)) {
             for (int i = 0; i < leading.length; i++) {
                 leading[i] = leading[i] == Grid.NONE ? Grid.NONE : -leading[i];
             }

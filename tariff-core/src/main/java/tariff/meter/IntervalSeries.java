@@ -8,6 +8,7 @@ import java.time.ZoneId;
 import java.util.BitSet;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.IntStream;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -226,19 +227,25 @@ public final class IntervalSeries {
     private long[] checked(long[] given, int size, String name) {
         require(given.length == size, name + " of " + given.length + " intervals beside kWh of " + size);
         long[] copy = given.clone();
+        absent.stream().filter(each -> each < size).forEach(each -> copy[each] = 0);
+        long anyNegative = 0;
+        long largest = 0;
         long total = 0;
-        for (int i = 0; i < copy.length; i++) {
-            if (absent.get(i)) {
-                copy[i] = 0;
-            }
-            if (copy[i] < 0) {
-                throw new IllegalArgumentException(name + " of the interval from " + startOf(i) + " is below zero");
-            }
-            total += copy[i];
-            if (copy[i] > LARGEST || total > LARGEST_TOTAL) {
-                throw new IllegalArgumentException(name + " add up to more than can be held");
-            }
+        boolean isTooMuch = false;
+        for (long each : copy) {
+            anyNegative |= each;
+            largest = Math.max(largest, each);
+            total += each;
+            isTooMuch |= total > LARGEST_TOTAL;
         }
+        if (anyNegative < 0) {
+            int first = IntStream.range(0, size)
+                    .filter(each -> copy[each] < 0)
+                    .findFirst()
+                    .orElseThrow();
+            throw new IllegalArgumentException(name + " of the interval from " + startOf(first) + " is below zero");
+        }
+        require(largest <= LARGEST && !isTooMuch, name + " add up to more than can be held");
         return copy;
     }
 
