@@ -34,6 +34,7 @@ public final class IntervalSeries {
     private final long[] leadingKvarh;
     private final long @Nullable [] exportedKwh;
     private final BitSet absent;
+    private final boolean isWhole;
 
     /**
      * @param start when the first interval begins, on a whole minute
@@ -67,6 +68,7 @@ public final class IntervalSeries {
         this.zone = zone;
         this.scale = scale;
         this.absent = (BitSet) absent.clone();
+        this.isWhole = absent.isEmpty();
         int size = kwh.length;
         this.kwh = checked(kwh, size, "kWh");
         this.laggingKvarh = checked(laggingKvarh, size, "lagging kvarh");
@@ -111,7 +113,7 @@ public final class IntervalSeries {
     }
 
     public boolean isAbsent(int interval) {
-        return absent.get(interval);
+        return !isWhole && absent.get(interval);
     }
 
     /** The first interval from this one on that was not recorded; {@link #size} if all were. */
