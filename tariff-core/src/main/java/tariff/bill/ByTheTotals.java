@@ -23,7 +23,7 @@ public final class ByTheTotals {
 
     /** Billing by totals; empty for a rate that adds up nothing by parts of a month. */
     public static Optional<Billing> of(Rate rate, Site site) {
-        return rate.source().mentions(EACH)
+        return rate.looksInside()
                 ? rate.source()
                         .rewritten(ByTheTotals::once)
                         .compiled()

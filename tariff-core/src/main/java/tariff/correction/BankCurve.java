@@ -53,6 +53,11 @@ public final class BankCurve {
         this(series, range, interval -> true);
     }
 
+    /** Whether no interval counts. */
+    boolean isEmpty() {
+        return netKvar.length == 0;
+    }
+
     /**
      * The registers after a bank of this size.
      *

@@ -47,12 +47,17 @@ public final class BankWalk {
     /** @param off when a time switch keeps the bank off; an interval goes by its start */
     static IntervalSeries corrected(IntervalSeries series, BigDecimal kvar, Optional<Window> off) {
         TimeSwitch timeSwitch = new TimeSwitch(series, off);
-        long bankKvarh = Math.floorDiv(2 * scaled(series, kvar) + series.perHour(), 2 * series.perHour());
+        long bankKvarh = scaledKvarh(series, kvar);
         Correction correction = new Correction(series);
         for (int i = 0; i < series.size(); i++) {
             correction.set(i, timeSwitch.isOff(i) ? 0 : bankKvarh);
         }
         return correction.series();
+    }
+
+    /** What the bank gives in an interval, in the units of the series, rounded half up. */
+    static long scaledKvarh(IntervalSeries series, BigDecimal kvar) {
+        return Math.floorDiv(2 * scaled(series, kvar) + series.perHour(), 2 * series.perHour());
     }
 
     /** The bank's kvar in the units of the series. */

@@ -3,6 +3,7 @@ package tariff.proposal;
 
 import java.util.Collections;
 import java.util.EnumMap;
+import java.util.IdentityHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
@@ -93,7 +94,7 @@ public record Assessment(
         List<MeteredMonth> past = sorted.subList(0, Math.max(0, sorted.size() - YEAR));
         List<MeteredMonth> year = sorted.subList(past.size(), sorted.size());
         PowerFactorCost today = PowerFactorCost.of(billing, past, year);
-        Map<Estimate, BankSavings> savings = savings(billing, today, past, year, bank);
+        Map<Estimate, BankSavings> savings = savings(billing, today, past, year, bank, exact.isPresent());
         Set<Assumption> assumptions = new LinkedHashSet<>();
         today.months().forEach(month -> assumptions.addAll(month.asItIs().assumptions()));
         assumptions.addAll(MonthOrder.gaps(sorted));
@@ -133,16 +134,22 @@ public record Assessment(
         return savings.getOrDefault(estimate, new BankSavings(List.of(), List.of(), List.of()));
     }
 
+    /** @param exact whether the bank does the same to a month in all three estimates */
     static Map<Estimate, BankSavings> savings(
             Billing billing,
             PowerFactorCost today,
             List<MeteredMonth> past,
             List<MeteredMonth> year,
-            BiFunction<MeteredMonth, Estimate, MeteredMonth> bank) {
+            BiFunction<MeteredMonth, Estimate, MeteredMonth> bank,
+            boolean exact) {
         boolean looksBack = billing.rate().looksBack();
         List<Statement> before = looksBack && past.size() < YEAR ? billing.statements(year, year) : statements(today);
         Map<Estimate, BankSavings> all = new EnumMap<>(Estimate.class);
         for (Estimate estimate : Estimate.values()) {
+            if (exact && !all.isEmpty()) {
+                all.put(estimate, all.values().iterator().next());
+                continue;
+            }
             List<MeteredMonth> after =
                     year.stream().map(month -> bank.apply(month, estimate)).toList();
             List<Statement> settled = looksBack ? billing.statements(after, after) : billing.statements(after);
@@ -158,9 +165,12 @@ public record Assessment(
 
     private static Map<Estimate, Appraisal> appraisals(Map<Estimate, BankSavings> savings, Proposal proposal) {
         Map<Estimate, Appraisal> all = new EnumMap<>(Estimate.class);
+        IdentityHashMap<BankSavings, Appraisal> known = new IdentityHashMap<>();
         savings.forEach((estimate, bank) -> {
             if (bank.before().size() == YEAR) {
-                venture(bank, proposal).ifPresent(venture -> all.put(estimate, Appraisal.of(venture)));
+                venture(bank, proposal)
+                        .ifPresent(venture ->
+                                all.put(estimate, known.computeIfAbsent(bank, same -> Appraisal.of(venture))));
             }
         });
         return all;

@@ -11,9 +11,9 @@ import tariff.bill.Billing;
 import tariff.bill.PowerFactorCost;
 import tariff.bill.Statement;
 import tariff.correction.BankMonth;
-import tariff.correction.BankYear;
 import tariff.correction.CapacitorBank;
 import tariff.correction.Estimate;
+import tariff.correction.ExactMonths;
 import tariff.meter.MeteredMonth;
 import tariff.meter.MonthlySums;
 import tariff.rate.clause.PowerFactorRule;
@@ -27,7 +27,7 @@ final class RepeatedYear {
     private final List<Statement> before;
     private final boolean looksBack;
     private final boolean netsLeading;
-    private final Optional<MonthlySums> exact;
+    private final Optional<ExactMonths> exact;
     private final Map<Asked, BankSavings> known = new HashMap<>();
     private final Map<AskedBetween, Saved> bounds = new HashMap<>();
 
@@ -45,7 +45,7 @@ final class RepeatedYear {
             List<MeteredMonth> year,
             boolean fullPast,
             Optional<MonthlySums> exact) {
-        this.exact = exact;
+        this.exact = exact.map(sums -> new ExactMonths(sums, billing.rate().looksInside()));
         this.billing = billing;
         this.year = year;
         this.looksBack = billing.rate().looksBack();
@@ -59,8 +59,7 @@ final class RepeatedYear {
     /** The months as they would be metered with a bank. */
     List<MeteredMonth> months(CapacitorBank bank, Estimate estimate) {
         if (exact.isPresent()) {
-            BankYear walked = BankYear.of(exact.get(), bank);
-            return year.stream().map(month -> walked.month(month.period())).toList();
+            return year.stream().map(exact.get().behind(bank)).toList();
         }
         BankMonth with =
                 new BankMonth(bank, billing.rate().windows(), billing.rate().zone());

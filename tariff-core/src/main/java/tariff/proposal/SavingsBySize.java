@@ -11,14 +11,15 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.function.BiFunction;
 import java.util.function.Function;
+import java.util.function.UnaryOperator;
 import java.util.stream.Stream;
 import tariff.bill.Billing;
 import tariff.bill.PowerFactorCost;
 import tariff.bill.StatementLine;
 import tariff.correction.BankMonth;
-import tariff.correction.BankYear;
 import tariff.correction.CapacitorBank;
 import tariff.correction.Estimate;
+import tariff.correction.ExactMonths;
 import tariff.meter.Derivable;
 import tariff.meter.MeteredMonth;
 import tariff.meter.MonthOrder;
@@ -73,7 +74,7 @@ public record SavingsBySize(String currency, List<Size> sizes) {
      * @throws Refusal naming every month that lacks what the rate bills
      */
     public static SavingsBySize of(Billing billing, List<MeteredMonth> months, int steps) {
-        return of(billing, months, steps, bank -> {
+        return of(billing, months, steps, false, bank -> {
             BankMonth in =
                     new BankMonth(bank, billing.rate().windows(), billing.rate().zone());
             return in::with;
@@ -82,9 +83,10 @@ public record SavingsBySize(String currency, List<Size> sizes) {
 
     /** The same on interval data, where all three estimates are the same. */
     public static SavingsBySize of(Billing billing, MonthlySums sums, int steps) {
-        return of(billing, sums.months(), steps, bank -> {
-            BankYear in = BankYear.of(sums, bank);
-            return (month, estimate) -> in.month(month.period());
+        ExactMonths months = new ExactMonths(sums, billing.rate().looksInside());
+        return of(billing, sums.months(), steps, true, bank -> {
+            UnaryOperator<MeteredMonth> behind = months.behind(bank);
+            return (month, estimate) -> behind.apply(month);
         });
     }
 
@@ -92,6 +94,7 @@ public record SavingsBySize(String currency, List<Size> sizes) {
             Billing billing,
             List<MeteredMonth> months,
             int steps,
+            boolean exact,
             Function<CapacitorBank, BiFunction<MeteredMonth, Estimate, MeteredMonth>> bank) {
         List<MeteredMonth> sorted = MonthOrder.of(months);
         List<MeteredMonth> past = sorted.subList(0, Math.max(0, sorted.size() - YEAR));
@@ -105,7 +108,8 @@ public record SavingsBySize(String currency, List<Size> sizes) {
         for (int i = 0; i <= steps; i++) {
             BigDecimal kvar = step.multiply(BigDecimal.valueOf(i));
             sizes.add(new Size(
-                    kvar, Assessment.savings(billing, today, past, year, bank.apply(CapacitorBank.fixed(kvar)))));
+                    kvar,
+                    Assessment.savings(billing, today, past, year, bank.apply(CapacitorBank.fixed(kvar)), exact)));
         }
         return new SavingsBySize(billing.rate().currency(), sizes);
     }

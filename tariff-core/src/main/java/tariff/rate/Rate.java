@@ -19,6 +19,7 @@ import tariff.notice.Finding;
 import tariff.notice.Findings;
 import tariff.notice.Refusal;
 import tariff.rate.clause.Clause;
+import tariff.rate.clause.Each;
 import tariff.rate.clause.Earlier;
 import tariff.rate.clause.Line;
 import tariff.rate.clause.Metered;
@@ -120,6 +121,11 @@ public final class Rate {
     /** Whether a month's bill depends on the months before it. */
     public boolean looksBack() {
         return clauses(Earlier.class).findAny().isPresent();
+    }
+
+    /** Whether a month's bill depends on the hours, days or other parts inside it. */
+    public boolean looksInside() {
+        return clauses(Each.class).findAny().isPresent();
     }
 
     /** The registers that a clause counts in this month, through the quantities it names; the past is left out. */

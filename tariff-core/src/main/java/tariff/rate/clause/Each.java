@@ -19,7 +19,7 @@ import tariff.meter.Unit;
  *
  * @param count how many of the highest are averaged; 1 for the highest itself, 0 for the sum
  */
-record Each(Cut cut, int count, Quantity of) implements Quantity {
+public record Each(Cut cut, int count, Quantity of) implements Quantity {
 
     static Quantity read(Written in) {
         Map<String, Cut> cuts = new LinkedHashMap<>();
