@@ -27,7 +27,7 @@ final class Svg {
     }
 
     Svg text(String words, String element, Object... attributes) {
-        line(start(element, attributes) + ">" + escaped(words) + "</" + element + ">");
+        line(start(element, attributes) + ">" + Markup.escaped(words) + "</" + element + ">");
         return this;
     }
 
@@ -39,7 +39,7 @@ final class Svg {
             tag.append(' ')
                     .append(attributes[i])
                     .append("=\"")
-                    .append(escaped(written))
+                    .append(Markup.escaped(written))
                     .append('"');
         }
         return tag.toString();
@@ -47,26 +47,6 @@ final class Svg {
 
     private void line(String text) {
         out.append("  ".repeat(open.size())).append(text).append('\n');
-    }
-
-    /** What XML 1.0 reserves becomes an entity, what it forbids a replacement character. */
-    static String escaped(String words) {
-        StringBuilder safe = new StringBuilder();
-        words.codePoints().forEach(point -> {
-            switch (point) {
-                case '&' -> safe.append("&amp;");
-                case '<' -> safe.append("&lt;");
-                case '>' -> safe.append("&gt;");
-                case '"' -> safe.append("&quot;");
-                case '\t', '\n', '\r' -> safe.append(' ');
-                default -> safe.appendCodePoint(allowed(point) ? point : 0xFFFD);
-            }
-        });
-        return safe.toString();
-    }
-
-    private static boolean allowed(int point) {
-        return point >= 0x20 && point != 0xFFFE && point != 0xFFFF && (point < 0xD800 || point > 0xDFFF);
     }
 
     @Override

@@ -4,6 +4,7 @@ package tariff.report;
 import java.util.ArrayDeque;
 import java.util.Deque;
 import java.util.List;
+import tariff.chart.Markup;
 
 /** Writes HTML elements, one a line, so closed that XML readers follow them too. Words and values of attributes are escaped; attributes come in pairs of name and value. */
 final class Html {
@@ -30,7 +31,7 @@ final class Html {
 
     Html text(String element, String words, String... attributes) {
         out.append(start(element, attributes))
-                .append(escaped(words))
+                .append(Markup.escaped(words))
                 .append("</")
                 .append(element)
                 .append(">\n");
@@ -53,7 +54,7 @@ final class Html {
 
     /** Words that stand beside elements within the one that is open. */
     Html words(String words) {
-        out.append(escaped(words)).append('\n');
+        out.append(Markup.escaped(words)).append('\n');
         return this;
     }
 
@@ -69,34 +70,10 @@ final class Html {
             tag.append(' ')
                     .append(attributes[i])
                     .append("=\"")
-                    .append(escaped(attributes[i + 1]))
+                    .append(Markup.escaped(attributes[i + 1]))
                     .append('"');
         }
         return tag.append('>').toString();
-    }
-
-    /** What HTML reads as markup becomes an entity, what it forbids in a text a replacement character. */
-    static String escaped(String words) {
-        StringBuilder safe = new StringBuilder();
-        words.codePoints().forEach(point -> {
-            switch (point) {
-                case '&' -> safe.append("&amp;");
-                case '<' -> safe.append("&lt;");
-                case '>' -> safe.append("&gt;");
-                case '"' -> safe.append("&quot;");
-                case '\'' -> safe.append("&#39;");
-                case '\t', '\n', '\r' -> safe.append(' ');
-                default -> safe.appendCodePoint(allowed(point) ? point : 0xFFFD);
-            }
-        });
-        return safe.toString();
-    }
-
-    /** Neither a control character, nor half of a pair, nor one that turns the direction of what follows. */
-    private static boolean allowed(int point) {
-        boolean control = Character.isISOControl(point) || Character.getType(point) == Character.SURROGATE;
-        boolean turning = (point >= 0x202A && point <= 0x202E) || (point >= 0x2066 && point <= 0x2069);
-        return !control && !turning && (point & 0xFFFE) != 0xFFFE;
     }
 
     @Override

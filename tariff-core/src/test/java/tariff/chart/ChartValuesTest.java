@@ -45,7 +45,7 @@ class ChartValuesTest {
         String svg = SampleCharts.bill(12, 5).svg();
         assertThat(svg).contains("Energy, &quot;day&quot; &amp; night &lt;all&gt;");
         assertThat(new DrawnSvg(svg).words()).contains("Energy, \"day\" & night <all>");
-        assertThat(Svg.escaped("a\u0000b\tc")).isEqualTo("a\uFFFDb c");
+        assertThat(Markup.escaped("a\u0000b\tc")).isEqualTo("a\uFFFDb c");
     }
 
     @Test

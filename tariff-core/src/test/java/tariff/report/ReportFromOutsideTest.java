@@ -11,6 +11,7 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.MethodSource;
 import tariff.bill.Bills;
+import tariff.chart.Markup;
 import tariff.proposal.Assessment;
 
 /** A report carries nothing in from outside, fetches nothing, and has an end. */
@@ -57,7 +58,7 @@ class ReportFromOutsideTest {
         "\ud800, \ufffd"
     })
     void whatIsMarkupBecomesWords(String given, String written) {
-        assertThat(Html.escaped(given)).isEqualTo(written);
+        assertThat(Markup.escaped(given)).isEqualTo(written);
     }
 
     /** Forty lines under a ratchet that leans on its own past: each month looks at eleven before it, which do the same. */

@@ -54,16 +54,7 @@ public final class IntervalRequest {
                     .allowed(Nearest.list(shelf.rates().keySet())));
             return Optional.empty();
         }
-        Written in = written.at("rate");
-        Optional<Rate> rate = shelf.rate(in.text());
-        if (rate.isEmpty()) {
-            in.wrong(
-                    "unknown-rate",
-                    "is not the id of a rate"
-                            + Nearest.hint(in.text(), shelf.rates().keySet()),
-                    Nearest.list(shelf.rates().keySet()));
-        }
-        return rate;
+        return RateId.read(written.at("rate"), shelf);
     }
 
     /** What the contract says of the site: {@code site}, {@code option} and {@code agreed}. */

@@ -20,7 +20,6 @@ import tariff.proposal.Claim;
 import tariff.proposal.Offer;
 import tariff.proposal.Proposal;
 import tariff.rate.Rate;
-import tariff.rate.clause.Nearest;
 import tariff.rate.clause.Written;
 import tariff.service.shelf.Shelf;
 
@@ -53,15 +52,7 @@ public final class Request {
         if (!in.isText()) {
             return inline();
         }
-        Optional<Rate> rate = shelf.rate(in.text());
-        if (rate.isEmpty()) {
-            in.wrong(
-                    "unknown-rate",
-                    "is not the id of a rate"
-                            + Nearest.hint(in.text(), shelf.rates().keySet()),
-                    Nearest.list(shelf.rates().keySet()));
-        }
-        return rate;
+        return RateId.read(in, shelf);
     }
 
     private Optional<Rate> inline() {

@@ -25,7 +25,7 @@ class BadShelfTest {
     @ParameterizedTest
     @MethodSource("wrongRates")
     void aWrongRateIsRefusedInTheseWords(String name) {
-        Ran ran = Ran.of("check", file(name + ".json"));
+        Printed ran = Printed.by("check", file(name + ".json"));
         assertThat(ran.exit()).isEqualTo(Exit.FINDINGS);
         assertThat(ran.out()).isEmpty();
         assertThat(ran.err()).isEqualTo(Examples.read(file(name + ".findings.txt")));

@@ -24,8 +24,8 @@ class CommandTest {
     @TempDir
     private Path directory;
 
-    private static Ran run(Object... arguments) {
-        return Ran.of(arguments);
+    private static Printed run(Object... arguments) {
+        return Printed.by(arguments);
     }
 
     private String file(String name, String content) throws IOException {
@@ -34,7 +34,7 @@ class CommandTest {
 
     @Test
     void aRateIsReadBackInWords() {
-        Ran ran = run("check", RATE);
+        Printed ran = run("check", RATE);
         assertThat(ran.exit()).isEqualTo(Exit.OK);
         assertThat(ran.err()).isEmpty();
         assertThat(ran.out())
@@ -44,7 +44,7 @@ class CommandTest {
 
     @Test
     void whatIsWrongWithARateIsSaidOneALineWithItsPlace() throws IOException {
-        Ran ran = run(
+        Printed ran = run(
                 "check",
                 file(
                         "wrong.json",
@@ -61,7 +61,7 @@ class CommandTest {
     @Test
     void aFileThatIsNoJsonIsUnusable() throws IOException {
         String name = file("rate.json", "name: A");
-        Ran ran = run("check", name);
+        Printed ran = run("check", name);
         assertThat(ran.exit()).isEqualTo(Exit.UNUSABLE_FILE);
         assertThat(ran.err()).startsWith("rate.json: line 1, column 1: is not valid JSON: ");
     }
@@ -69,7 +69,7 @@ class CommandTest {
     @Test
     void aFileThatIsNotThereIsUnusable() {
         String nowhere = directory.resolve("none.json").toString();
-        Ran ran = run("statement", RATE, nowhere);
+        Printed ran = run("statement", RATE, nowhere);
         assertThat(ran.exit()).isEqualTo(Exit.UNUSABLE_FILE);
         assertThat(ran.err()).isEqualTo(nowhere + ": cannot be read; found no such file\n");
     }
@@ -98,7 +98,8 @@ class CommandTest {
 
     @Test
     void aTableOfASpreadsheetIsBilledAndSaysHowItWasRead() throws IOException {
-        Ran ran = run("statement", RATE, file("bills.csv", "Month;kWh;peak kVA\n2025-01;1000;20\n"), "--format", "csv");
+        Printed ran =
+                run("statement", RATE, file("bills.csv", "Month;kWh;peak kVA\n2025-01;1000;20\n"), "--format", "csv");
         assertThat(ran.out().lines()).contains("2025-01-01,2025-01-31,Energy,98.50,yes,EUR");
         assertThat(ran.err()).contains("Separator: semicolon\n");
     }
@@ -112,7 +113,7 @@ class CommandTest {
     @ParameterizedTest
     @ValueSource(strings = {"text", "json", "csv"})
     void theSameQuestionIsPrintedTheSameWay(String format) {
-        Ran once = run("assess", RATE, BILLS, "--fixed", "300", "--cost", "20000", "--format", format);
+        Printed once = run("assess", RATE, BILLS, "--fixed", "300", "--cost", "20000", "--format", format);
         assertThat(once.exit()).isEqualTo(Exit.OK);
         assertThat(run("assess", RATE, BILLS, "--fixed", "300", "--cost", "20000", "--format", format))
                 .isEqualTo(once);
@@ -165,14 +166,14 @@ class CommandTest {
     void whatNoControllerOrTimeSwitchCanBeToldIsAFinding(String options, String said) {
         List<String> arguments = new ArrayList<>(List.of("assess", RATE, BILLS));
         arguments.addAll(List.of(options.split(" ")));
-        Ran ran = Ran.of(arguments.toArray());
+        Printed ran = Printed.by(arguments.toArray());
         assertThat(ran.exit()).isEqualTo(Exit.FINDINGS);
         assertThat(ran.err()).isEqualTo(said + "\n");
     }
 
     @Test
     void aBankOutOfRangeIsAFinding() {
-        Ran ran = run("assess", RATE, BILLS, "--fixed", "1e999999999");
+        Printed ran = run("assess", RATE, BILLS, "--fixed", "1e999999999");
         assertThat(ran.exit()).isEqualTo(Exit.FINDINGS);
         assertThat(ran.err())
                 .isEqualTo("/fixedKvar: is out of range; found 1E+999999999; allowed: 0 to 1000000 kvar\n");
@@ -180,7 +181,7 @@ class CommandTest {
 
     @Test
     void anUnknownUnitIsAMistakeOnTheCommandLine() {
-        Ran ran = run("statement", RATE, BILLS, "--agreed", "MW=3");
+        Printed ran = run("statement", RATE, BILLS, "--agreed", "MW=3");
         assertThat(ran.exit()).isEqualTo(Exit.USAGE);
         assertThat(ran.err())
                 .startsWith(

@@ -4,8 +4,6 @@ package tariff.service.command;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.io.IOException;
-import java.io.PrintWriter;
-import java.io.StringWriter;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
@@ -14,7 +12,6 @@ import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
-import picocli.CommandLine;
 import tariff.service.http.Examples;
 
 /** Sizes, reviews and screens of the example offers, as they are asked for on the command line. */
@@ -28,20 +25,8 @@ class OfferCommandsTest {
     @TempDir
     private Path directory;
 
-    private record Ran(int exit, String out, String err) {
-        /** The words of a text without its line breaks. */
-        String words() {
-            return out.replaceAll("\\s+", " ");
-        }
-    }
-
-    private static Ran run(String... arguments) {
-        StringWriter out = new StringWriter();
-        StringWriter err = new StringWriter();
-        CommandLine line = Tariff.commandLine();
-        line.setOut(new PrintWriter(out)).setErr(new PrintWriter(err));
-        int exit = line.execute(arguments);
-        return new Ran(exit, out.toString(), err.toString().replace("\r", ""));
+    private static Printed run(Object... arguments) {
+        return Printed.by(arguments);
     }
 
     private static String example(String name) {
@@ -51,7 +36,7 @@ class OfferCommandsTest {
     /** Column 1 of the table of claims: nothing in it holds a comma in quotes before the verdict. */
     private static List<String> verdicts(String rate, String bills, String offer) {
         return run("review", rate, bills, offer, "--format", "csv")
-                .out
+                .out()
                 .lines()
                 .skip(1)
                 .map(row -> row.replaceFirst("^\"(?:[^\"]|\"\")*\",|^[^,]*,", ""))
@@ -99,7 +84,7 @@ class OfferCommandsTest {
     /** Own arithmetic: 14,000 + 40 × 60 = 16,400; nobody earns that back with 1,166.96 a year within 20 years at 8 %. */
     @Test
     void whereNoBankPaysThatIsSaidPlainly() {
-        Ran ran = run(
+        Printed ran = run(
                 "size",
                 example("rates/polder-grid-mv.json"),
                 example("bills/polder-grid-mv.json"),
@@ -107,7 +92,7 @@ class OfferCommandsTest {
                 example("prices/medium-voltage.json"),
                 "--discount",
                 "0.08");
-        assertThat(ran.exit).isEqualTo(Exit.OK);
+        assertThat(ran.exit()).isEqualTo(Exit.OK);
         assertThat(ran.words())
                 .contains("Worth most none ")
                 .contains("Worth most: no bank: even the best size, 40 kvar at 16400.00, saves only 1163.71 a year and"
@@ -117,7 +102,7 @@ class OfferCommandsTest {
 
     @Test
     void aSizingPutsItsAnswersSideBySideAndSaysWhatWouldSettleIt() {
-        Ran ran = run(
+        Printed ran = run(
                 "size",
                 RATE,
                 BILLS,
@@ -131,8 +116,8 @@ class OfferCommandsTest {
                 "30",
                 "--most",
                 "600");
-        assertThat(ran.exit).isEqualTo(Exit.OK);
-        assertThat(ran.out.lines())
+        assertThat(ran.exit()).isEqualTo(Exit.OK);
+        assertThat(ran.out().lines())
                 .anyMatch(line -> line.startsWith("  Paid back soonest "))
                 .anyMatch(line -> line.startsWith("  Smallest without penalty  none"))
                 .anyMatch(line -> line.startsWith("  Worth most, low "))
@@ -145,7 +130,7 @@ class OfferCommandsTest {
 
     @Test
     void aBankIsPutTogetherFromWhatCanBeBought() {
-        Ran ran = run(
+        Printed ran = run(
                 "size",
                 RATE,
                 BILLS,
@@ -161,16 +146,16 @@ class OfferCommandsTest {
                 "4",
                 "--format",
                 "csv");
-        assertThat(ran.out.lines().skip(1).map(row -> row.substring(0, row.indexOf(','))))
+        assertThat(ran.out().lines().skip(1).map(row -> row.substring(0, row.indexOf(','))))
                 .containsExactly("25", "50", "75", "100", "125", "150", "175", "200");
     }
 
     @ParameterizedTest
     @ValueSource(strings = {"text", "json", "csv"})
     void everyScreenIsShownInEachFormat(String format) {
-        Ran ran = run("screen", DRIVES, "--format", format);
-        assertThat(ran.exit).isEqualTo(Exit.OK);
-        assertThat(ran.out)
+        Printed ran = run("screen", DRIVES, "--format", format);
+        assertThat(ran.exit()).isEqualTo(Exit.OK);
+        assertThat(ran.out())
                 .contains(
                         "stored energy", "parallel resonance", "detuning", "generators", "losses", "needs the highest");
     }
@@ -195,9 +180,9 @@ class OfferCommandsTest {
                 "--discount 0 --per-kvar 1 --available 0 | /availableKvar/0: is out of range; found 0; allowed: 0.01 to 1000000 kvar"
             })
     void aSizeThatCannotBeAskedIsAFinding(String options, String finding) {
-        Ran ran = run(("size " + RATE + " " + BILLS + " " + options).split(" "));
-        assertThat(ran.exit).isEqualTo(Exit.FINDINGS);
-        assertThat(ran.err.lines()).contains(finding);
+        Printed ran = run((Object[]) ("size " + RATE + " " + BILLS + " " + options).split(" "));
+        assertThat(ran.exit()).isEqualTo(Exit.FINDINGS);
+        assertThat(ran.err().lines()).contains(finding);
     }
 
     @Test
@@ -205,8 +190,8 @@ class OfferCommandsTest {
         String offer = Files.writeString(
                         directory.resolve("offer.json"), "{\"bank\":{\"fixedKvar\":100},\"claims\":[{\"kvars\":100}]}")
                 .toString();
-        Ran ran = run("review", RATE, BILLS, offer);
-        assertThat(ran.exit).isEqualTo(Exit.FINDINGS);
-        assertThat(ran.err).startsWith("offer.json#/claims/0: makes no claim that is known; did you mean \"kvar\"?");
+        Printed ran = run("review", RATE, BILLS, offer);
+        assertThat(ran.exit()).isEqualTo(Exit.FINDINGS);
+        assertThat(ran.err()).startsWith("offer.json#/claims/0: makes no claim that is known; did you mean \"kvar\"?");
     }
 }

@@ -4,13 +4,10 @@ package tariff.service.command;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.io.IOException;
-import java.io.PrintWriter;
-import java.io.StringWriter;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import picocli.CommandLine;
 import tariff.service.http.Examples;
 
 class ReportCommandTest {
@@ -22,21 +19,14 @@ class ReportCommandTest {
     @TempDir
     private Path directory;
 
-    private record Ran(int exit, String out, String err) {}
-
-    private static Ran run(String... arguments) {
-        StringWriter out = new StringWriter();
-        StringWriter err = new StringWriter();
-        CommandLine line = Tariff.commandLine();
-        line.setOut(new PrintWriter(out)).setErr(new PrintWriter(err));
-        int exit = line.execute(arguments);
-        return new Ran(exit, out.toString(), err.toString().replace("\r", ""));
+    private static Printed run(Object... arguments) {
+        return Printed.by(arguments);
     }
 
     @Test
     void theReportIsWrittenWhereItIsAskedFor() throws IOException {
         Path file = directory.resolve("report.html");
-        Ran ran = run(
+        Printed ran = run(
                 "report",
                 RATE,
                 BILLS,
@@ -48,9 +38,9 @@ class ReportCommandTest {
                 "2026-03-31",
                 "-o",
                 file.toString());
-        assertThat(ran.err).isEmpty();
-        assertThat(ran.exit).isEqualTo(Exit.OK);
-        assertThat(ran.out).isEmpty();
+        assertThat(ran.err()).isEmpty();
+        assertThat(ran.exit()).isEqualTo(Exit.OK);
+        assertThat(ran.out()).isEmpty();
         assertThat(Files.readString(file))
                 .startsWith("<!DOCTYPE html>\n")
                 .contains(
@@ -60,9 +50,9 @@ class ReportCommandTest {
 
     @Test
     void withoutAFileItGoesToTheStandardOutput() {
-        Ran ran = run("report", RATE, BILLS, "--fixed", "100");
-        assertThat(ran.exit).isEqualTo(Exit.OK);
-        assertThat(ran.out)
+        Printed ran = run("report", RATE, BILLS, "--fixed", "100");
+        assertThat(ran.exit()).isEqualTo(Exit.OK);
+        assertThat(ran.out())
                 .startsWith("<!DOCTYPE html>\n")
                 .contains("no price is given")
                 .doesNotContain("dated");
@@ -71,9 +61,9 @@ class ReportCommandTest {
     @Test
     void aPlaceThatCannotBeWrittenIsNamed() {
         Path nowhere = directory.resolve("none").resolve("report.html");
-        Ran ran = run("report", RATE, BILLS, "--fixed", "100", "-o", nowhere.toString());
-        assertThat(ran.exit).isEqualTo(Exit.UNUSABLE_FILE);
-        assertThat(ran.err).isEqualTo(nowhere + ": cannot be written\n");
+        Printed ran = run("report", RATE, BILLS, "--fixed", "100", "-o", nowhere.toString());
+        assertThat(ran.exit()).isEqualTo(Exit.UNUSABLE_FILE);
+        assertThat(ran.err()).isEqualTo(nowhere + ": cannot be written\n");
     }
 
     @Test
@@ -81,10 +71,10 @@ class ReportCommandTest {
         String bills = Examples.path("examples/bills/pak-nam-bay.json").toString();
         String rate = Examples.path("examples/rates/pak-nam-bay.json").toString();
         String offer = Examples.path("examples/offers/pak-nam-drives.json").toString();
-        Ran ran = run("report", rate, bills, "--offer", offer);
-        assertThat(ran.err).isEmpty();
-        assertThat(ran.exit).isEqualTo(Exit.OK);
-        assertThat(ran.out)
+        Printed ran = run("report", rate, bills, "--offer", offer);
+        assertThat(ran.err()).isEmpty();
+        assertThat(ran.exit()).isEqualTo(Exit.OK);
+        assertThat(ran.out())
                 .contains("this site must not get a plain bank")
                 .contains("parallel resonance")
                 .doesNotContain("Nothing was screened");

@@ -50,7 +50,7 @@ class ShelfStatementsTest {
     @ParameterizedTest
     @MethodSource("shelf")
     void everyRateChecks(String id) {
-        Ran ran = Ran.of("check", rate(id));
+        Printed ran = Printed.by("check", rate(id));
         assertThat(ran.exit()).isEqualTo(Exit.OK);
         assertThat(ran.err()).isEqualTo(WARNINGS.getOrDefault(id, ""));
     }
@@ -58,7 +58,7 @@ class ShelfStatementsTest {
     @ParameterizedTest
     @MethodSource("billed")
     void everyRateBillsItsYearAsItsStatementSays(String id) {
-        Ran ran = Ran.of("statement", rate(id), bills(id), "--format", "csv");
+        Printed ran = Printed.by("statement", rate(id), bills(id), "--format", "csv");
         assertThat(ran.exit()).isEqualTo(Exit.OK);
         assertThat(ran.out()).isEqualTo(Examples.read(statement(id)));
     }
