@@ -5,7 +5,6 @@ import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.time.Instant;
 import java.time.ZoneId;
-import java.time.ZoneOffset;
 import java.util.Arrays;
 import java.util.EnumMap;
 import java.util.Map;
@@ -18,6 +17,8 @@ import tariff.notice.Finding;
 final class EspiRows {
     private static final Set<Integer> STEPS = Set.of(5, 10, 15, 30, 60);
     private static final int LARGEST_MULTIPLIER = 12;
+    private static final long EARLIEST = Instant.parse("1900-01-01T00:00:00Z").getEpochSecond();
+    private static final long LATEST = Instant.parse("2200-12-31T00:00:00Z").getEpochSecond();
     private static final BigDecimal LARGEST = BigDecimal.valueOf(1L << 50);
 
     private final EspiFeed feed;
@@ -41,7 +42,9 @@ final class EspiRows {
         notices.refuseIfWrong();
         int step = step();
         long[] starts = starts();
-        Optional<ZoneId> zone = zone();
+        notices.refuseIfWrong();
+        Optional<ZoneId> zone =
+                new EspiClock(feed, notices).zone(options.zone(), Instant.ofEpochSecond(60 * starts[0]));
         notices.refuseIfWrong();
         Map<Role, Layout.Figures> figures = new EnumMap<>(Role.class);
         Map<Role, long[]> columns = new EnumMap<>(Role.class);
@@ -148,13 +151,10 @@ final class EspiRows {
         for (Channel channel : channels.values()) {
             for (int i = 0; i < channel.values().count(); i++) {
                 long start = channel.values().start(i);
-                if (start == EspiValues.NOT_SAID || start % 60 != 0) {
-                    notices.error(
-                            "stamp",
-                            "row " + channel.values().line(i),
-                            start == EspiValues.NOT_SAID
-                                    ? "neither the reading nor its block says when it was"
-                                    : "does not begin on a whole minute");
+                if (start == EspiValues.NOT_SAID) {
+                    stamp(channel, i, "neither the reading nor its block says when it was");
+                } else if (start % 60 != 0 || start < EARLIEST || start > LATEST) {
+                    stamp(channel, i, "does not begin on a whole minute between 1900 and 2200");
                 }
             }
         }
@@ -166,30 +166,8 @@ final class EspiRows {
                 .toArray();
     }
 
-    private Optional<ZoneId> zone() {
-        Optional<Integer> winter = feed.winterOffset();
-        if (options.zone().isPresent()) {
-            ZoneId zone = options.zone().get();
-            Instant first = Instant.ofEpochSecond(
-                    channels.values().iterator().next().values().start(0));
-            int standard = zone.getRules().getStandardOffset(first).getTotalSeconds();
-            if (winter.isPresent() && winter.get() != standard) {
-                notices.warning(
-                        "zone-differs",
-                        "",
-                        "the feed's clock is " + ZoneOffset.ofTotalSeconds(winter.get()) + " in winter, that of " + zone
-                                + " " + ZoneOffset.ofTotalSeconds(standard));
-            }
-            return options.zone();
-        }
-        if (winter.isPresent() && !feed.hasSummerTime()) {
-            return winter.map(ZoneOffset::ofTotalSeconds);
-        }
-        notices.add(Finding.error("zone", "", "the time zone of the bill is not known")
-                .found(winter.map(seconds -> ZoneOffset.ofTotalSeconds(seconds) + " with summer time")
-                        .orElse("nothing"))
-                .allowed("name one, such as Europe/Berlin, or a fixed offset such as +01:00"));
-        return Optional.empty();
+    private void stamp(Channel channel, int i, String message) {
+        notices.error("stamp", "row " + channel.values().line(i), message);
     }
 
     private long[] column(Channel channel, long[] starts, int[] lines) {

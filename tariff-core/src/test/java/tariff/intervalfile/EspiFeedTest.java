@@ -13,6 +13,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Random;
 import java.util.stream.IntStream;
 import java.util.stream.LongStream;
 import org.junit.jupiter.api.Test;
@@ -209,6 +210,20 @@ class EspiFeedTest {
                 .containsExactly("the feed's clock is +01:00 in winter, that of America/Chicago -06:00");
     }
 
+    @ParameterizedTest
+    @ValueSource(longs = {Long.MIN_VALUE, 30, 999_999_999_999_999L, -999_999_999_999_999L})
+    void aReadingThatIsNotInTimeIsRefused(long start) {
+        String reading = start == Long.MIN_VALUE ? untimed(1) : reading(start, 900, 1);
+        String text = withReactive(new InventedFeed().block("1", 0, 900, List.of(reading)))
+                .text()
+                .replaceFirst("<start>0</start>", "");
+        assertThat(refusal(text, UTC))
+                .containsExactly(
+                        start == Long.MIN_VALUE
+                                ? "row 3: neither the reading nor its block says when it was"
+                                : "row 3: does not begin on a whole minute between 1900 and 2200");
+    }
+
     @Test
     void gapsAreFoundAsInATable() throws IOException {
         InventedFeed feed = withReactive(new InventedFeed()
@@ -292,6 +307,41 @@ class EspiFeedTest {
                         List.of(reading(0, 900, 1), "<IntervalReading><value>many</value></IntervalReading>"));
         assertThat(refusal(feed.text(), UTC))
                 .containsExactly("row 6: has a code that is no whole number", "row 8: \"many\" is not a value");
+    }
+
+    /** Pieces lost, doubled, swapped for other pieces or figures: read or refused, never anything else. */
+    @Test
+    void whateverHappensToAFeedItIsReadOrRefused() throws IOException {
+        String whole = withReactive(new InventedFeed()
+                        .clock(3_600, 3_600)
+                        .block("1", 0, 3_600, List.of(reading(0, 900, 5), reading(900, 900, 6), estimated(1_800, 8))))
+                .text();
+        String[] pieces = whole.split("(?=<)|(?<=>)");
+        Random random = new Random(1);
+        String[] strange = {
+            "", "-1", "99999999999999999999", "1e9", "<", ">", "&amp;", "<value>", "0", "\u0000", "2147483648"
+        };
+        int read = 0;
+        for (int i = 0; i < 4_000; i++) {
+            String[] changed = pieces.clone();
+            for (int change = random.nextInt(3); change >= 0; change--) {
+                int at = random.nextInt(changed.length);
+                changed[at] = random.nextBoolean()
+                        ? strange[random.nextInt(strange.length)]
+                        : pieces[random.nextInt(pieces.length)];
+            }
+            try {
+                read += InventedFeed.read(String.join("", changed), UTC.gaps(GapRule.LEAVE_OUT))
+                                        .series()
+                                        .size()
+                                > 0
+                        ? 1
+                        : 0;
+            } catch (Refusal refused) {
+                assertThat(refused.findings()).isNotEmpty();
+            }
+        }
+        assertThat(read).as("some are still feeds").isGreaterThan(100);
     }
 
     @Test
