@@ -3,14 +3,21 @@ package tariff.service.command;
 
 import java.io.PrintWriter;
 import java.time.ZoneId;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Model.OptionSpec;
 import picocli.CommandLine.Option;
+import picocli.CommandLine.ParseResult;
+import picocli.CommandLine.Spec;
 import tariff.csv.DateOrder;
 import tariff.intervalfile.GapRule;
 import tariff.intervalfile.IntervalFileOptions;
 import tariff.intervalfile.Role;
 import tariff.intervalfile.StampAt;
+import tariff.notice.Finding;
+import tariff.notice.Refusal;
 import tariff.service.request.Declared;
 import tariff.service.request.IntervalTerms;
 
@@ -62,6 +69,22 @@ final class IntervalOptions {
                     "the day of the month on which a billing period begins, 1 to 28 (${DEFAULT-VALUE} unless said)",
             defaultValue = "1")
     private int readOn;
+
+    @Spec
+    private CommandSpec options;
+
+    /** Bills leave nothing of this open. */
+    void refuseBesideBills(ParseResult given) {
+        List<Finding> findings = options.options().stream()
+                .map(OptionSpec::longestName)
+                .filter(given::hasMatchedOption)
+                .map(name -> Finding.error(
+                        "interval-option", "", name + " is said of interval data, and the file holds bills"))
+                .toList();
+        if (!findings.isEmpty()) {
+            throw new Refusal(findings);
+        }
+    }
 
     /** @param dates the order of dates, which bills may need too */
     IntervalTerms terms(Optional<DateOrder> dates, PrintWriter notes) {

@@ -11,8 +11,10 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.TreeSet;
 import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
+import picocli.CommandLine.Spec;
 import tariff.csv.BillsFile;
 import tariff.csv.BillsRead;
 import tariff.csv.DateOrder;
@@ -71,10 +73,16 @@ final class MeterFile {
     @Mixin
     private IntervalOptions said;
 
+    @Spec(Spec.Target.MIXEE)
+    private CommandSpec command;
+
     /** Reads the files; how they were understood is told on {@code notes}. */
     Metered read(PrintWriter notes) {
         if (intervals.isPresent() == bills.isPresent()) {
             throw new Refusal(Finding.error("no-meter-file", "", "give either BILLS or --intervals"));
+        }
+        if (bills.isPresent()) {
+            said.refuseBesideBills(command.commandLine().getParseResult());
         }
         Rate under = Files.rate(rate);
         Metered read = intervals.isPresent()

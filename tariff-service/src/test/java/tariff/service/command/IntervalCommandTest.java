@@ -142,6 +142,21 @@ class IntervalCommandTest {
     }
 
     @Test
+    void whatIsSaidOfIntervalsIsNotPassedOverInSilenceBesideBills() {
+        Printed printed = Printed.by(
+                "statement",
+                Examples.path("examples/rates/harbourside-large-service.json"),
+                Examples.path("examples/foundry/bills.json"),
+                "--zone=UTC",
+                "--sliding");
+        assertThat(printed.exit()).isEqualTo(Exit.FINDINGS);
+        assertThat(printed.err().lines())
+                .containsExactlyInAnyOrder(
+                        "--zone is said of interval data, and the file holds bills",
+                        "--sliding is said of interval data, and the file holds bills");
+    }
+
+    @Test
     void theReactiveDemandIsDrawnWithTheBankInIt() throws IOException {
         Path file = directory.resolve("curve.svg");
         run("assess", "--fixed", "150", "--duration-chart", file.toString());
