@@ -13,8 +13,13 @@ import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
+import tariff.meter.DemandInterval;
+import tariff.meter.IntervalSeries;
+import tariff.meter.MonthlySums;
+import tariff.meter.ReadingDay;
 import tariff.meter.Register;
 import tariff.meter.Window;
+import tariff.meter.WindowCalendar;
 import tariff.notice.Finding;
 import tariff.notice.Findings;
 import tariff.notice.Refusal;
@@ -163,6 +168,21 @@ public final class Rate {
         return clauses(Metered.class).anyMatch(each -> each.register() == register)
                 || definition.powerFactors().values().stream()
                         .anyMatch(rule -> rule.registers().contains(register));
+    }
+
+    /** Calendar months of a series as this rate reads them, with demands over one of its intervals. */
+    public MonthlySums sums(IntervalSeries series) {
+        return sums(series, DemandInterval.block(series.stepMinutes()), ReadingDay.FIRST_OF_MONTH);
+    }
+
+    /**
+     * The billing periods of a series as this rate reads them: its windows, and kVAh only if it asks for any.
+     *
+     * @throws IllegalArgumentException if the series cannot give such a demand
+     */
+    public MonthlySums sums(IntervalSeries series, DemandInterval demand, ReadingDay readOn) {
+        return new MonthlySums(
+                series, new WindowCalendar(series, windows()), demand, readOn, reads(Register.APPARENT_KVAH));
     }
 
     /** The name of the season that a day lies in; the rate must define seasons. */

@@ -23,8 +23,6 @@ import tariff.meter.DemandInterval;
 import tariff.meter.IntervalSeries;
 import tariff.meter.MonthlySums;
 import tariff.meter.ReadingDay;
-import tariff.meter.Register;
-import tariff.meter.WindowCalendar;
 import tariff.notice.Finding;
 import tariff.notice.Refusal;
 import tariff.rate.Rate;
@@ -126,12 +124,10 @@ public record IntervalTerms(
      */
     public MonthlySums sums(IntervalSeries series, Rate rate) {
         try {
-            return new MonthlySums(
+            return rate.sums(
                     series,
-                    new WindowCalendar(series, rate.windows()),
                     new DemandInterval(demandMinutes.orElse(series.stepMinutes()), slidingDemand),
-                    new ReadingDay(readOn),
-                    rate.reads(Register.APPARENT_KVAH));
+                    new ReadingDay(readOn));
         } catch (IllegalArgumentException step) {
             throw new Refusal(Finding.error(
                             "demand", "/demandMinutes", "is not a time that peaks of these data can be averaged over")
