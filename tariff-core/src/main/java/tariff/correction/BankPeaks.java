@@ -12,8 +12,8 @@ import tariff.meter.Readings;
 import tariff.meter.Triangle;
 
 /**
- * The highest demands of a period after a bank. A controller leaves what its aim allows, at the most at the highest kW, and two thirds of
- * its smallest step; the low estimate counts both, the central the aim, the high neither. The bank's own kW are added to the highest kW
+ * The highest demands of a period after a bank. A controller leaves what its aim allows, at the most at the highest kW, and what its dead
+ * band does; the low estimate counts both, the central the aim, the high neither. The bank's own kW are added to the highest kW
  * and, which is at least as much as they can add, to the highest kVA. Own derivation.
  *
  * @param bank the bank

@@ -158,9 +158,27 @@ public record CapacitorBank(
                 .orElse(BigDecimal.ZERO);
     }
 
-    /** A controller does not answer within two thirds of its smallest step. Common practice, no source. */
+    /**
+     * No two outputs next to each other that the switched steps can give lie farther apart, at the service voltage; 0 for a fixed bank. Taken
+     * by size, a step larger than all before it together leaves a gap of the difference; no other gap is larger than those there were.
+     * Own derivation.
+     */
+    BigDecimal widestGapKvar() {
+        BigDecimal gap = BigDecimal.ZERO;
+        BigDecimal before = BigDecimal.ZERO;
+        for (BigDecimal step : stepsKvar.stream().sorted().toList()) {
+            gap = gap.max(step.subtract(before));
+            before = before.add(step);
+        }
+        return effective(gap);
+    }
+
+    /**
+     * How far a controller may leave its steps from what is wanted: two thirds of the smallest, within which it does not answer (common
+     * practice, no source), or half of the widest gap between two outputs.
+     */
     BigDecimal deadBandKvar() {
-        return smallestStepKvar().multiply(DEAD_BAND);
+        return smallestStepKvar().multiply(DEAD_BAND).max(widestGapKvar().divide(BigDecimal.valueOf(2)));
     }
 
     /** What the bank burns: kW for kvar that it gives, kWh for kvarh. */

@@ -23,7 +23,7 @@ record LikelySteps(BigDecimal laggingKvarh, BigDecimal sentBackKvarh) {
     static LikelySteps of(ReactiveMonth on, CapacitorBank bank, BigDecimal aimKvarh) {
         LoadCurve curve = on.curve();
         double fixed = bank.effectiveFixedKvar().doubleValue();
-        double step = bank.smallestStepKvar().doubleValue();
+        double step = bank.widestGapKvar().doubleValue();
         double rest = curve.left(fixed);
         double aim = Math.min(aimKvarh.doubleValue(), rest);
         double share = rest > 0 ? 1 - aim / rest : 0;

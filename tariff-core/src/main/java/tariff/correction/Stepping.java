@@ -21,7 +21,7 @@ record Stepping(double unsupplied, double oversupplied) {
     /**
      * @param left L, kvarh of the load above so many kvar
      * @param switchedKvar all steps together, above zero
-     * @param stepKvar the smallest step, above zero; steps of several sizes are as fine as their smallest
+     * @param stepKvar how far apart what the steps can give lies, above zero
      */
     static Stepping of(DoubleUnaryOperator left, double switchedKvar, double stepKvar) {
         long exact = Math.max(1, Math.round(switchedKvar / stepKvar));

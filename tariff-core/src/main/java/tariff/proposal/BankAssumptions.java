@@ -72,7 +72,8 @@ final class BankAssumptions {
                 + (exact
                         ? "the steps follow the load interval by interval, as their controller lets them"
                         : "the steps follow the load as far as whole steps can: the low savings count two thirds of the smallest"
-                                + " step against them in every hour, the central what the load curve tells, the high nothing");
+                                + " step, or half of a wider gap between two outputs, against them in every hour, the central"
+                                + " what the load curve tells, the high nothing");
     }
 
     /** What monthly totals do not show of a bank that is switched off or held back. */

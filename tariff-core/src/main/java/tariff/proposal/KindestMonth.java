@@ -12,6 +12,7 @@ import static tariff.meter.Register.PEAK_LEADING_KVAR;
 import static tariff.meter.Register.POWER_FACTOR;
 
 import java.math.BigDecimal;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
@@ -131,11 +132,16 @@ final class KindestMonth {
         return most.signum() > 0 ? least.divide(most, Triangle.PRECISION) : BigDecimal.ONE;
     }
 
-    /** All kvar of a bank with so many of them fixed, the others in steps of which the smallest is given. */
+    /** All kvar of a bank with so many of them fixed, the others in steps each twice as large as the one before, which leave no wider gap. */
     private static CapacitorBank divided(CapacitorBank bank, BigDecimal fixed, BigDecimal smallest) {
-        BigDecimal rest = bank.ratedKvar().subtract(fixed).subtract(smallest);
-        return bank.withKvar(fixed, rest.signum() > 0 ? List.of(smallest, rest) : List.of(smallest))
-                .withController(bank.isAutomatic() ? bank.controller() : Controller.quick());
+        List<BigDecimal> steps = new ArrayList<>();
+        BigDecimal rest = bank.ratedKvar().subtract(fixed);
+        for (BigDecimal step = smallest; step.compareTo(rest) < 0; step = step.add(step)) {
+            steps.add(step);
+            rest = rest.subtract(step);
+        }
+        steps.add(rest.signum() > 0 ? rest : smallest);
+        return bank.withKvar(fixed, steps).withController(bank.isAutomatic() ? bank.controller() : Controller.quick());
     }
 
     private static Readings window(MeteredMonth month, String name) {

@@ -114,7 +114,7 @@ class BankMonthBoundsTest {
         return readings.get(register).orElse(BigDecimal.ZERO);
     }
 
-    /** Fixed, switched in equal steps, and both; with losses. */
+    /** Fixed, switched in equal and unequal steps, and both; with losses. */
     private static List<CapacitorBank> banks(Random random) {
         String kvar = String.valueOf(5 + random.nextInt(200));
         BigDecimal watts = new BigDecimal(random.nextInt(60)).movePointLeft(1);
@@ -123,6 +123,7 @@ class BankMonthBoundsTest {
                         CapacitorBank.fixed(kvar),
                         CapacitorBank.automatic(kvar, kvar),
                         CapacitorBank.automatic(kvar, kvar, kvar).withController(aims),
+                        CapacitorBank.automatic("5", kvar, String.valueOf(10 + random.nextInt(400))),
                         CapacitorBank.plain(new BigDecimal(kvar), List.of(new BigDecimal(kvar)))
                                 .withController(aims))
                 .map(bank -> bank.withLosses(watts))

@@ -146,8 +146,8 @@ class CommandTest {
                     limit of operations an hour are not counted (to remove it: interval data settle it)
                 - the year: a time switch keeps the whole bank off Mon to Fri 22:00 to 06:00; in the other hours the
                     fixed kvar are always on; the steps follow the load as far as whole steps can: the low savings
-                    count two thirds of the smallest step against them in every hour, the central what the load
-                    curve tells, the high nothing
+                    count two thirds of the smallest step, or half of a wider gap between two outputs, against them
+                    in every hour, the central what the load curve tells, the high nothing
                 """);
     }
 
