@@ -43,6 +43,9 @@ public record BankMonth(CapacitorBank bank, Map<String, Window> windows, ZoneId 
         }
     }
 
+    /** kvarh taken from the lagging register, and added to the leading. */
+    private record Moved(BigDecimal removed, BigDecimal created) {}
+
     /** The month with the bank in service. */
     public MeteredMonth with(MeteredMonth month, Estimate estimate) {
         if (bank.ratedKvar().signum() == 0) {
@@ -78,18 +81,18 @@ public record BankMonth(CapacitorBank bank, Map<String, Window> windows, ZoneId 
         }
         Readings known = completed(before);
         Readings after = known;
+        BigDecimal slack = estimate == Estimate.LOW ? bank.deadBandKvar() : BigDecimal.ZERO;
         Optional<BigDecimal> lagging = known.get(LAGGING_KVARH);
         if (lagging.isPresent()) {
             ReactiveMonth load =
                     new ReactiveMonth(lagging.get(), hours.all(), highest(known, whole), likely(known, whole));
-            BigDecimal left = lagging.get().subtract(removed(load, known, hours, estimate));
-            BigDecimal created = created(load, known, hours, estimate);
-            BigDecimal sent = known.get(LEADING_KVARH).orElse(BigDecimal.ZERO).add(created);
-            BigDecimal delivered = created.add(removed(load, known, hours, estimate.opposite()));
+            Moved moved = moved(load, known, hours, estimate, slack);
+            BigDecimal left = lagging.get().subtract(moved.removed());
+            BigDecimal sent = known.get(LEADING_KVARH).orElse(BigDecimal.ZERO).add(moved.created());
             after = after.with(LAGGING_KVARH, left).with(LEADING_KVARH, sent);
-            after = energies(known, after, ownLosses(delivered, hours.on()), left, sent);
+            after = energies(known, after, ownLosses(load, known, hours, estimate, moved), left, sent);
         }
-        return new BankPeaks(bank, hours.isInterrupted(), estimate).in(known, after);
+        return new BankPeaks(bank, slack, hours.isInterrupted(), estimate).in(known, after);
     }
 
     /** Fills in what the correction needs and the bill leaves out. */
@@ -104,31 +107,32 @@ public record BankMonth(CapacitorBank bank, Map<String, Window> windows, ZoneId 
         return known;
     }
 
-    /** Lagging kvarh that the bank takes from the meter. */
-    private BigDecimal removed(ReactiveMonth load, Readings known, Hours hours, Estimate estimate) {
+    /**
+     * What the bank takes from the lagging kvarh and adds to the leading. The fixed kvar send back c × T′ less what they remove; what steps
+     * leave and send back besides is bounded by their dead band, and likely by the load curve.
+     */
+    private Moved moved(ReactiveMonth load, Readings known, Hours hours, Estimate estimate, BigDecimal slack) {
         ReactiveMonth on = load.during(hours.on(), estimate);
-        return on.laggingKvarh().subtract(laggingLeft(on, known, hours, estimate));
-    }
-
-    private BigDecimal laggingLeft(ReactiveMonth on, Readings known, Hours hours, Estimate estimate) {
-        BigDecimal left = on.left(bank.effectiveKvar(), estimate);
-        if (!bank.isAutomatic()) {
-            return left;
+        BigDecimal fixed = bank.effectiveFixedKvar();
+        BigDecimal byFixed = on.left(fixed, estimate);
+        BigDecimal created = byFixed.subtract(on.laggingKvarh())
+                .add(fixed.multiply(hours.on()))
+                .max(BigDecimal.ZERO);
+        BigDecimal left = byFixed;
+        if (bank.isAutomatic()) {
+            left = on.left(bank.effectiveKvar(), estimate);
+            if (estimate == Estimate.LOW) {
+                BigDecimal deadBand = slack.multiply(hours.on());
+                left = left.add(targetKvarh(known).min(on.laggingKvarh())).add(deadBand);
+                created = created.add(deadBand);
+            } else if (estimate == Estimate.CENTRAL) {
+                BigDecimal aim = targetKvarh(known).multiply(hours.on()).divide(hours.all(), Triangle.PRECISION);
+                LikelySteps steps = LikelySteps.of(on, bank, aim);
+                left = left.max(steps.laggingKvarh());
+                created = created.add(steps.sentBackKvarh());
+            }
         }
-        BigDecimal kept = switch (estimate) {
-            case LOW ->
-                left.add(targetKvarh(known).min(on.laggingKvarh()))
-                        .add(bank.deadBandKvar().multiply(hours.on()));
-            case CENTRAL -> left.max(likely(on, known, hours).laggingKvarh());
-            case HIGH -> left;
-        };
-        BigDecimal withFixedAlone = on.left(bank.effectiveFixedKvar(), estimate);
-        return kept.min(withFixedAlone);
-    }
-
-    private LikelySteps likely(ReactiveMonth on, Readings known, Hours hours) {
-        return LikelySteps.of(
-                on, bank, targetKvarh(known).multiply(hours.on()).divide(hours.all(), Triangle.PRECISION));
+        return new Moved(on.laggingKvarh().subtract(left.min(byFixed)), created);
     }
 
     /** What a controller leaves on purpose at the most: the kvarh of the power factor it aims at. */
@@ -139,26 +143,20 @@ public record BankMonth(CapacitorBank bank, Map<String, Window> windows, ZoneId 
                 .orElse(BigDecimal.ZERO);
     }
 
-    /** Leading kvarh: what the fixed kvar send back, c × T′ less what they remove, and what steps do that come in whole. */
-    private BigDecimal created(ReactiveMonth load, Readings known, Hours hours, Estimate estimate) {
-        BigDecimal fixed = bank.effectiveFixedKvar();
-        ReactiveMonth on = load.during(hours.on(), estimate);
-        BigDecimal sent = on.left(fixed, estimate).subtract(on.laggingKvarh()).add(fixed.multiply(hours.on()));
-        BigDecimal bySteps = switch (estimate) {
-            case LOW -> bank.deadBandKvar().multiply(hours.on());
-            case CENTRAL -> bank.isAutomatic() ? likely(on, known, hours).sentBackKvarh() : BigDecimal.ZERO;
-            case HIGH -> BigDecimal.ZERO;
-        };
-        return sent.max(BigDecimal.ZERO).add(bySteps);
-    }
-
     /**
      * kWh of the bank itself. What it delivers is what lags less and what leads more; that is dearest where the steps work most, so the
      * least goes with the high estimate and the most with the low. The fixed kvar deliver while they are on, whatever the load.
      */
-    private BigDecimal ownLosses(BigDecimal delivered, BigDecimal hours) {
-        BigDecimal least = bank.effectiveFixedKvar().multiply(hours);
-        BigDecimal most = bank.effectiveKvar().multiply(hours);
+    private BigDecimal ownLosses(ReactiveMonth load, Readings known, Hours hours, Estimate estimate, Moved moved) {
+        if (bank.wattsPerKvar().signum() == 0) {
+            return BigDecimal.ZERO;
+        }
+        Estimate opposite = estimate.opposite();
+        BigDecimal slack = opposite == Estimate.LOW ? bank.deadBandKvar() : BigDecimal.ZERO;
+        BigDecimal delivered =
+                moved.created().add(moved(load, known, hours, opposite, slack).removed());
+        BigDecimal least = bank.effectiveFixedKvar().multiply(hours.on());
+        BigDecimal most = bank.effectiveKvar().multiply(hours.on());
         return bank.ownKilowatts(delivered.max(least).min(most));
     }
 

@@ -17,11 +17,12 @@ import tariff.meter.Triangle;
  * and, which is at least as much as they can add, to the highest kVA. Own derivation.
  *
  * @param bank the bank
+ * @param slack kvar by which a controller may be off in the low estimate, 0 in the others
  * @param interrupted whether a time switch keeps it off for a part of the period, in which the peaks may have fallen: the low estimate then
  *     leaves kVA and lagging kvar no lower than they were
  * @param estimate which side of what is not known
  */
-record BankPeaks(CapacitorBank bank, boolean interrupted, Estimate estimate) {
+record BankPeaks(CapacitorBank bank, BigDecimal slack, boolean interrupted, Estimate estimate) {
 
     /** @param after the readings after the bank, to which the peaks are added */
     Readings in(Readings before, Readings after) {
@@ -40,7 +41,7 @@ record BankPeaks(CapacitorBank bank, boolean interrupted, Estimate estimate) {
             result = result.with(PEAK_LAGGING_KVAR, lagging(kvar.get(), kw));
         }
         BigDecimal more = estimate == Estimate.HIGH ? BigDecimal.ZERO : bank.effectiveFixedKvar();
-        return result.with(PEAK_LEADING_KVAR, sent.add(more).max(slack()));
+        return result.with(PEAK_LEADING_KVAR, sent.add(more).max(slack));
     }
 
     private BigDecimal apparent(BigDecimal kw, BigDecimal kva, BigDecimal sent) {
@@ -55,14 +56,14 @@ record BankPeaks(CapacitorBank bank, boolean interrupted, Estimate estimate) {
                         .map(pf -> kw.divide(pf, Triangle.PRECISION))
                         .orElse(kw)
                 : kw;
-        BigDecimal reached = capped(least.max(aimed).add(slack()), kw, kva);
+        BigDecimal reached = capped(least.max(aimed).add(slack), kw, kva);
         return (asBefore() ? reached.max(kva) : reached).add(ownKw());
     }
 
     /** Steps alone follow the load and make no kVA higher, but for what they may lead within their dead band. */
     private BigDecimal capped(BigDecimal reached, BigDecimal kw, BigDecimal kva) {
         return bank.isAutomatic() && bank.fixedKvar().signum() == 0
-                ? reached.min(kva.max(Triangle.apparent(kw, slack())))
+                ? reached.min(kva.max(Triangle.apparent(kw, slack)))
                 : reached;
     }
 
@@ -71,7 +72,7 @@ record BankPeaks(CapacitorBank bank, boolean interrupted, Estimate estimate) {
             return kvar;
         }
         BigDecimal left = kvar.subtract(bank.effectiveKvar()).max(BigDecimal.ZERO);
-        return left.max(aimedKvar(kvar, kw)).add(slack()).min(kvar);
+        return left.max(aimedKvar(kvar, kw)).add(slack).min(kvar);
     }
 
     /** Lagging kvar that the controller leaves on purpose at the most; all of them where no highest kW tells. */
@@ -83,10 +84,6 @@ record BankPeaks(CapacitorBank bank, boolean interrupted, Estimate estimate) {
                 .targetPowerFactor()
                 .map(pf -> kw.map(peak -> peak.multiply(Triangle.tangent(pf))).orElse(kvar))
                 .orElse(BigDecimal.ZERO);
-    }
-
-    private BigDecimal slack() {
-        return estimate == Estimate.LOW ? bank.deadBandKvar() : BigDecimal.ZERO;
     }
 
     private boolean asBefore() {
