@@ -374,6 +374,22 @@ class UploadTest extends Served {
         }
     }
 
+    /** The end of what may be sent is met by the XML parser, inside of which a stream that breaks off would look like broken XML. */
+    @Test
+    void aFeedThatGoesOnBeyondTheLimitIsTooLarge() throws IOException {
+        Service small = Service.build(
+                        Shelf.read(Examples.path("examples/rates")),
+                        0,
+                        feedOfTheDay().length() / 2)
+                .start(0);
+        String pieces = Integer.toHexString(feedOfTheDay().length()) + "\r\n" + feedOfTheDay() + "\r\n0\r\n\r\n";
+        String head = head("/interval-statements?rate=" + HOURLY + "&zone=" + ZONE)
+                .replace("text/csv", "application/atom+xml");
+        assertThat(sent(small.port(), head + "Connection: close\r\nTransfer-Encoding: chunked\r\n\r\n" + pieces))
+                .startsWith("HTTP/1.1 413");
+        small.stop();
+    }
+
     @Test
     void whoComesWhileEveryPlaceIsTakenIsToldToTryAgain() throws Exception {
         String path = "/interval-statements?rate=" + HOURLY + "&zone=" + ZONE;
