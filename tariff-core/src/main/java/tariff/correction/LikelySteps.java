@@ -3,12 +3,20 @@ package tariff.correction;
 
 import java.math.BigDecimal;
 import java.math.RoundingMode;
+import java.util.List;
+import java.util.function.DoubleUnaryOperator;
 
 /**
- * What switched steps make of the load curve that the central case assumes. The controller leaves the aim A of the lagging kvarh Q that
- * fixed kvar leave; the rest, taken to run in step with the whole, is what the steps work on: its kvarh above x kvar are
- * ρ L(f + x ÷ ρ), with ρ = 1 − A ÷ Q, L the curve and f the fixed kvar. What the steps give beyond it eats into the aim first. Own
- * derivation.
+ * What switched steps make of the load curve that the central case assumes: the mean of two worlds, for bills do not tell which is the
+ * site's. The controller leaves the aim A of the lagging kvarh Q that fixed kvar f leave; with L the curve, the steps work on kvarh above x
+ * kvar of
+ *
+ * <ul>
+ *   <li>ρ L(f + x ÷ ρ), ρ = 1 − A ÷ Q, if kW rise and fall in step with kvar, so that the aim is always the same share;
+ *   <li>L(f + A ÷ T + x), if kW are even over the T hours, so that the aim is always the same kvar.
+ * </ul>
+ *
+ * <p>What the steps give beyond it eats into the aim first. Own derivation.
  *
  * @param laggingKvarh what stays lagging
  * @param sentBackKvarh what the steps send back
@@ -23,19 +31,22 @@ record LikelySteps(BigDecimal laggingKvarh, BigDecimal sentBackKvarh) {
     static LikelySteps of(ReactiveMonth on, CapacitorBank bank, BigDecimal aimKvarh) {
         LoadCurve curve = on.curve();
         double fixed = bank.effectiveFixedKvar().doubleValue();
-        double step = bank.widestGapKvar().doubleValue();
+        double switched = bank.effectiveSwitchedKvar().doubleValue();
+        double gap = bank.widestGapKvar().doubleValue();
         double rest = curve.left(fixed);
         double aim = Math.min(aimKvarh.doubleValue(), rest);
+        double meanAim = aim / on.hours().doubleValue();
         double share = rest > 0 ? 1 - aim / rest : 0;
-        if (share <= 0) {
-            return new LikelySteps(kvarh(rest), BigDecimal.ZERO);
+        DoubleUnaryOperator inStep = kvar -> share > 0 ? share * curve.left(fixed + kvar / share) : 0;
+        DoubleUnaryOperator even = kvar -> curve.left(fixed + meanAim + kvar);
+        double lagging = 0;
+        double sentBack = 0;
+        for (DoubleUnaryOperator wanted : List.of(inStep, even)) {
+            Stepping steps = Stepping.of(wanted, switched, gap);
+            double back = steps.sentBack(meanAim, gap);
+            lagging += (rest - wanted.applyAsDouble(0) + steps.unsupplied() - (steps.oversupplied() - back)) / 2;
+            sentBack += back / 2;
         }
-        Stepping steps = Stepping.of(
-                kvar -> share * curve.left(fixed + kvar / share),
-                bank.effectiveSwitchedKvar().doubleValue(),
-                step);
-        double sentBack = steps.sentBack(aim / on.hours().doubleValue(), step);
-        double lagging = aim + steps.unsupplied() - (steps.oversupplied() - sentBack);
         return new LikelySteps(kvarh(lagging), kvarh(sentBack));
     }
 
