@@ -9,6 +9,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Objects;
 import java.util.TreeMap;
+import java.util.function.IntPredicate;
 import tariff.meter.IntervalRange;
 import tariff.meter.IntervalSeries;
 import tariff.meter.MeteredMonth;
@@ -87,16 +88,15 @@ public final class BankSizes {
     }
 
     private Stretch stretch(IntervalRange range, long window) {
+        IntPredicate chosen = i -> (sums.calendar().mask(i) & window) == window;
         List<DemandFront.Interval> intervals = new ArrayList<>();
         for (int i = range.from(); i < range.to(); i++) {
-            if (!series.isAbsent(i) && (sums.calendar().mask(i) & window) == window) {
+            if (!series.isAbsent(i) && chosen.test(i)) {
                 long lag = series.scaledLaggingKvarh(i);
                 long lead = series.scaledLeadingKvarh(i);
                 intervals.add(new DemandFront.Interval(series.scaledKwh(i), lag - lead, Math.min(lag, lead)));
             }
         }
-        return new Stretch(
-                new BankCurve(series, range, i -> (sums.calendar().mask(i) & window) == window),
-                new DemandFront(intervals));
+        return new Stretch(new BankCurve(series, range, chosen), new DemandFront(intervals));
     }
 }

@@ -12,8 +12,6 @@ import tariff.meter.Apparent;
  * highest. What is left is a handful.
  */
 final class DemandFront {
-    /** Below this the squares of two numbers add up within a long. */
-    private static final long SQUARES_FIT = 1L << 31;
     /** Below any net energy, with room for a bank. */
     private static final long NONE = Long.MIN_VALUE / 2;
 
@@ -31,7 +29,7 @@ final class DemandFront {
      */
     record Interval(long active, long net, long swing) {
         boolean isSmall() {
-            return active < SQUARES_FIT && Math.abs(net) < SQUARES_FIT;
+            return Apparent.squaresFit(active, net);
         }
 
         long squared() {

@@ -16,7 +16,7 @@ import java.util.function.DoubleUnaryOperator;
  *   <li>L(f + A ÷ T + x), if kW are even over the T hours, so that the aim is always the same kvar.
  * </ul>
  *
- * <p>What the steps give beyond it eats into the aim first. Own derivation.
+ * <p>Without an aim they are one. What the steps give beyond it eats into the aim first. Own derivation.
  *
  * @param laggingKvarh what stays lagging
  * @param sentBackKvarh what the steps send back
@@ -41,11 +41,13 @@ record LikelySteps(BigDecimal laggingKvarh, BigDecimal sentBackKvarh) {
         DoubleUnaryOperator even = kvar -> curve.left(fixed + meanAim + kvar);
         double lagging = 0;
         double sentBack = 0;
-        for (DoubleUnaryOperator wanted : List.of(inStep, even)) {
+        List<DoubleUnaryOperator> worlds = aim > 0 ? List.of(inStep, even) : List.of(even);
+        for (DoubleUnaryOperator wanted : worlds) {
             Stepping steps = Stepping.of(wanted, switched, gap);
             double back = steps.sentBack(meanAim, gap);
-            lagging += (rest - wanted.applyAsDouble(0) + steps.unsupplied() - (steps.oversupplied() - back)) / 2;
-            sentBack += back / 2;
+            lagging += (rest - wanted.applyAsDouble(0) + steps.unsupplied() - (steps.oversupplied() - back))
+                    / worlds.size();
+            sentBack += back / worlds.size();
         }
         return new LikelySteps(kvarh(lagging), kvarh(sentBack));
     }

@@ -14,9 +14,6 @@ import tariff.meter.RunningDemand;
  * so many kvar is a whole number at any step, so that nothing rounds until the end.
  */
 final class ReactiveTally {
-    /** Below this the squares of two numbers add up within a long. */
-    private static final long SQUARES_FIT = 1L << 31;
-
     private final IntervalSeries series;
     private final RunningDemand demand;
     private long before;
@@ -68,7 +65,7 @@ final class ReactiveTally {
             mostLagging = Math.max(mostLagging, newLag);
             mostLeading = Math.max(mostLeading, newLead);
             long kw = series.scaledKwh(i) * perHour;
-            if (kw >= SQUARES_FIT || net >= SQUARES_FIT || net <= -SQUARES_FIT) {
+            if (!Apparent.squaresFit(kw, net)) {
                 peakKva = Math.max(peakKva, Apparent.of(kw, net));
             } else if (kw * kw + net * net > mostSquared) {
                 mostSquared = kw * kw + net * net;
@@ -113,7 +110,7 @@ final class ReactiveTally {
 
     /** A root is drawn only where the squares are the highest so far. */
     private void apparent(long kw, long kvar) {
-        if (kw < SQUARES_FIT && Math.abs(kvar) < SQUARES_FIT) {
+        if (Apparent.squaresFit(kw, kvar)) {
             long squared = kw * kw + kvar * kvar;
             if (squared <= peakSquared) {
                 return;

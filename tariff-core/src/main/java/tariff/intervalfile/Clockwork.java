@@ -5,11 +5,11 @@ import java.time.ZoneId;
 import java.time.ZoneOffset;
 import java.util.NavigableSet;
 import java.util.Optional;
+import tariff.meter.IntervalSeries;
 import tariff.notice.Finding;
 
 /** From stamps to the timeline: the step, which end is stamped, the day's last row, daylight saving. */
 final class Clockwork {
-    private static final int[] STEPS = {5, 10, 15, 30, 60};
     private static final int HOUR = 60;
     private static final int DAY = 24 * HOUR;
 
@@ -80,10 +80,8 @@ final class Clockwork {
         for (int minutes = 1; minutes <= 60; minutes++) {
             best = counts[minutes] > counts[best] ? minutes : best;
         }
-        for (int allowed : STEPS) {
-            if (allowed == best && counts[best] > 0) {
-                return best;
-            }
+        if (IntervalSeries.isStep(best) && counts[best] > 0) {
+            return best;
         }
         notices.add(Finding.error("step", "", "rows do not follow one another at the step of a meter")
                 .found(counts[best] == 0 ? "no two rows within an hour" : best + " minutes")

@@ -2,6 +2,7 @@
 package tariff.intervalfile;
 
 import java.util.Optional;
+import tariff.csv.DateOrder;
 import tariff.notice.Finding;
 
 /** Settles whether day or month comes first, and with it what the stamps say. */

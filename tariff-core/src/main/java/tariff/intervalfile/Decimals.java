@@ -10,7 +10,9 @@ import java.util.stream.LongStream;
 final class Decimals {
     static final long EMPTY = Long.MIN_VALUE;
     static final long UNREADABLE = Long.MIN_VALUE + 1;
-    private static final long LARGEST = 1L << 50;
+    /** Beyond any figure of a meter. */
+    static final long LARGEST = 1L << 50;
+
     private static final long[] POWERS =
             LongStream.iterate(1, power -> 10 * power).limit(19).toArray();
     /** The most that may still be multiplied by each of the powers. */

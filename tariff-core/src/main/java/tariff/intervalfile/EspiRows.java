@@ -9,17 +9,16 @@ import java.util.Arrays;
 import java.util.EnumMap;
 import java.util.Map;
 import java.util.Optional;
-import java.util.Set;
 import java.util.stream.LongStream;
+import tariff.meter.IntervalSeries;
 import tariff.notice.Finding;
 
 /** Lays the channels of a feed side by side: one row for each interval that any of them has. */
 final class EspiRows {
-    private static final Set<Integer> STEPS = Set.of(5, 10, 15, 30, 60);
     private static final int LARGEST_MULTIPLIER = 12;
     private static final long EARLIEST = Instant.parse("1900-01-01T00:00:00Z").getEpochSecond();
     private static final long LATEST = Instant.parse("2200-12-31T00:00:00Z").getEpochSecond();
-    private static final BigDecimal LARGEST = BigDecimal.valueOf(1L << 50);
+    private static final BigDecimal LARGEST = BigDecimal.valueOf(Decimals.LARGEST);
 
     private final EspiFeed feed;
     private final IntervalFileOptions options;
@@ -138,7 +137,7 @@ final class EspiRows {
                 }
             }
         }
-        if (step % 60 != 0 || !STEPS.contains(step / 60)) {
+        if (step % 60 != 0 || !IntervalSeries.isStep(step / 60)) {
             notices.add(Finding.error("step", "", "readings are not at the step of a meter")
                     .found(step + " seconds")
                     .allowed("5, 10, 15, 30 or 60 minutes"));

@@ -5,6 +5,7 @@ import java.time.ZoneId;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.LongConsumer;
+import tariff.csv.DateOrder;
 
 /**
  * What the reader of a file is told; what it is not told it recognises from the data, or asks for in a finding.

@@ -5,6 +5,7 @@ import java.time.DateTimeException;
 import java.time.LocalDate;
 import java.time.LocalDateTime;
 import java.time.ZoneOffset;
+import tariff.csv.DateOrder;
 
 /**
  * A stamp as it is written, packed into a long before it is known whether day or month comes first. Read by hand, for a file

@@ -3,7 +3,15 @@ package tariff.meter;
 
 /** Apparent from active and reactive, in whole units. */
 public final class Apparent {
+    /** Below this the squares of two numbers add up within a long. */
+    private static final long SQUARES_FIT = 1L << 31;
+
     private Apparent() {}
+
+    /** Whether P² + Q² fits a long. */
+    public static boolean squaresFit(long active, long reactive) {
+        return active < SQUARES_FIT && Math.abs(reactive) < SQUARES_FIT;
+    }
 
     /**
      * S = √(P² + Q²), rounded half up to a whole unit; exact to that rounding.

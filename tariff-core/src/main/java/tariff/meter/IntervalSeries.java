@@ -19,7 +19,7 @@ import org.jspecify.annotations.Nullable;
  * export is a register of its own. An interval belongs to the day, the window and the period in which it starts.
  */
 public final class IntervalSeries {
-    private static final Set<Integer> STEPS = Set.of(5, 10, 15, 30, 60);
+    private static final Set<Long> STEPS = Set.of(5L, 10L, 15L, 30L, 60L);
     /** So large a total still fits a long after it is multiplied by the twelve five-minute intervals of an hour. */
     private static final long LARGEST_TOTAL = 1L << 59;
     /** So large a figure stays in the range of {@link Apparent} as the power of a five-minute interval. */
@@ -59,7 +59,7 @@ public final class IntervalSeries {
             long[] leadingKvarh,
             Optional<long[]> exportedKwh,
             BitSet absent) {
-        require(STEPS.contains(stepMinutes), "an interval of " + stepMinutes + " minutes; allowed: 5, 10, 15, 30, 60");
+        require(isStep(stepMinutes), "an interval of " + stepMinutes + " minutes; allowed: 5, 10, 15, 30, 60");
         require(start.getEpochSecond() % 60 == 0 && start.getNano() == 0, "a series cannot start at " + start);
         require(scale >= 0 && scale <= 9, "a scale of " + scale + "; allowed: 0 to 9");
         require(kwh.length > 0, "a series needs an interval");
@@ -75,6 +75,11 @@ public final class IntervalSeries {
         this.leadingKvarh = checked(leadingKvarh, size, "leading kvarh");
         this.exportedKwh = exportedKwh.isPresent() ? checked(exportedKwh.get(), size, "exported kWh") : null;
         require(absent.length() <= kwh.length, "interval " + (absent.length() - 1) + " is absent from " + kwh.length);
+    }
+
+    /** Whether meters give intervals of so many minutes: 5, 10, 15, 30 or 60. */
+    public static boolean isStep(long minutes) {
+        return STEPS.contains(minutes);
     }
 
     public Instant start() {

@@ -7,9 +7,6 @@ import java.util.Map;
 
 /** Counts the registers of a stretch of intervals, in scaled whole numbers. */
 final class Tally {
-    /** Below this the squares of two numbers add up within a long. */
-    private static final long SQUARES_FIT = 1L << 31;
-
     private final MonthlySums sums;
     private final IntervalSeries series;
     private final long window;
@@ -79,7 +76,7 @@ final class Tally {
         mostLagging = Math.max(mostLagging, lagging);
         mostLeading = Math.max(mostLeading, leading);
         long reactive = lagging - leading;
-        if (active < SQUARES_FIT && Math.abs(reactive) < SQUARES_FIT) {
+        if (Apparent.squaresFit(active, reactive)) {
             long squared = active * active + reactive * reactive;
             if (squared > mostSquared) {
                 mostSquared = squared;

@@ -16,6 +16,7 @@ import java.util.Map;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import tariff.csv.DateOrder;
 import tariff.meter.IntervalSeries;
 import tariff.meter.InventedYear;
 import tariff.notice.Assumption;

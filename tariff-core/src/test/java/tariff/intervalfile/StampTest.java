@@ -9,6 +9,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
+import tariff.csv.DateOrder;
 
 class StampTest {
     // ISO 8601 for the first rows; the others are common practice, no source

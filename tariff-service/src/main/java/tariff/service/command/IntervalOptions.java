@@ -108,9 +108,6 @@ final class IntervalOptions {
         if (stamps.isPresent()) {
             choices = choices.stampAt(stamps.get());
         }
-        return dates.isPresent()
-                ? choices.dateOrder(
-                        tariff.intervalfile.DateOrder.valueOf(dates.get().name()))
-                : choices;
+        return dates.isPresent() ? choices.dateOrder(dates.get()) : choices;
     }
 }

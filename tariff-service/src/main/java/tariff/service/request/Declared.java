@@ -8,6 +8,7 @@ import jakarta.validation.Validator;
 import java.math.BigDecimal;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 import java.util.stream.Stream;
 import org.hibernate.validator.messageinterpolation.ParameterMessageInterpolator;
 import tariff.notice.Finding;
@@ -34,6 +35,13 @@ public final class Declared {
             throw new Refusal(findings);
         }
         return terms;
+    }
+
+    /** The terms, unless they leave a range; what they leave is added to the findings. */
+    static <T> Optional<T> sound(T terms, String pointer, List<Finding> findings) {
+        List<Finding> found = check(terms, pointer);
+        findings.addAll(found);
+        return found.isEmpty() ? Optional.of(terms) : Optional.empty();
     }
 
     static <T> List<Finding> check(T terms, String pointer) {

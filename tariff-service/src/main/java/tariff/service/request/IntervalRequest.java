@@ -69,17 +69,17 @@ public final class IntervalRequest {
 
     /** The next few kvar, and whether charts are wanted. */
     public Optional<ClauseTerms> clauses() {
-        return declared(ClauseTerms.read(part(CLAUSES)));
+        return Declared.sound(ClauseTerms.read(part(CLAUSES)), "", findings);
     }
 
     /** Bank, price and outlook; empty if the bank cannot be read. */
     public Optional<Proposal> proposal() {
-        Optional<BankTerms> bank = declared(BankTerms.read(part(BANK)));
+        Optional<BankTerms> bank = Declared.sound(BankTerms.read(part(BANK)), "", findings);
         Written price = part(INVESTMENT);
         Optional<Investment> investment = price.keys().isEmpty()
                 ? Optional.empty()
-                : declared(InvestmentTerms.read(price)).map(InvestmentTerms::investment);
-        Outlook outlook = declared(OutlookTerms.read(part(OUTLOOK)))
+                : Declared.sound(InvestmentTerms.read(price), "", findings).map(InvestmentTerms::investment);
+        Outlook outlook = Declared.sound(OutlookTerms.read(part(OUTLOOK)), "", findings)
                 .orElseGet(OutlookTerms::level)
                 .outlook();
         return bank.map(terms -> new Proposal(terms.bank(), investment, outlook));
@@ -91,12 +91,6 @@ public final class IntervalRequest {
         Map<String, Object> part = new TreeMap<>(query);
         part.keySet().retainAll(names);
         return new Written(part, "", findings::add);
-    }
-
-    private <T> Optional<T> declared(T terms) {
-        List<Finding> found = Declared.check(terms, "");
-        findings.addAll(found);
-        return found.isEmpty() ? Optional.of(terms) : Optional.empty();
     }
 
     /**

@@ -14,7 +14,7 @@ import java.util.Set;
 import java.util.TreeSet;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
-import tariff.intervalfile.DateOrder;
+import tariff.csv.DateOrder;
 import tariff.intervalfile.GapRule;
 import tariff.intervalfile.IntervalFileOptions;
 import tariff.intervalfile.Role;
@@ -49,7 +49,7 @@ public record IntervalTerms(
     private static final String DAY = "1 to 28, a day that every month has";
     private static final Map<String, StampAt> STAMPS = Map.of("start", StampAt.START, "end", StampAt.END);
     private static final Map<String, DateOrder> DATES =
-            Map.of("day-first", DateOrder.DAY_FIRST, "month-first", DateOrder.MONTH_FIRST);
+            Stream.of(DateOrder.values()).collect(Collectors.toMap(DateOrder::word, order -> order));
     private static final Map<String, GapRule> GAPS =
             Stream.of(GapRule.values()).collect(Collectors.toMap(GapRule::word, rule -> rule));
     private static final String COLUMN = "Column";

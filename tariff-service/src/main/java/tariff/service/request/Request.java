@@ -81,20 +81,21 @@ public final class Request {
                     .allowed("an object with \"fixedKvar\", \"stepsKvar\" or both"));
             return Optional.empty();
         }
-        return declared(BankTerms.read(written.at("bank")), "/bank");
+        return Declared.sound(BankTerms.read(written.at("bank")), "/bank", findings);
     }
 
     /** What the bank costs, under {@code "investment"}; empty if nothing is said of it. */
     private Optional<InvestmentTerms> investment() {
         return written.has("investment")
-                ? declared(InvestmentTerms.read(written.at("investment")), "/investment")
+                ? Declared.sound(InvestmentTerms.read(written.at("investment")), "/investment", findings)
                 : Optional.empty();
     }
 
     /** What is expected of the years ahead, under {@code "outlook"}. */
     private OutlookTerms outlook() {
         return written.has("outlook")
-                ? declared(OutlookTerms.read(written.at("outlook")), "/outlook").orElseGet(OutlookTerms::level)
+                ? Declared.sound(OutlookTerms.read(written.at("outlook")), "/outlook", findings)
+                        .orElseGet(OutlookTerms::level)
                 : OutlookTerms.level();
     }
 
@@ -173,7 +174,7 @@ public final class Request {
 
     /** A document that is a list of prices. */
     public Optional<PriceTerms> prices() {
-        return declared(PriceTerms.read(written), "");
+        return Declared.sound(PriceTerms.read(written), "", findings);
     }
 
     /** Under {@code "prices"}, {@code "outlook"}, {@code "choice"} and {@code "basis"}: what a sizing is asked with. */
@@ -183,10 +184,12 @@ public final class Request {
             findings.add(Finding.error("missing-key", "", "\"prices\" is missing")
                     .allowed("an object with \"perKvar\": there are no prices but your own"));
         }
-        Optional<PriceTerms> prices =
-                written.has("prices") ? declared(PriceTerms.read(written.at("prices")), "/prices") : Optional.empty();
+        Optional<PriceTerms> prices = written.has("prices")
+                ? Declared.sound(PriceTerms.read(written.at("prices")), "/prices", findings)
+                : Optional.empty();
         ChoiceTerms choice = written.has("choice")
-                ? declared(ChoiceTerms.read(written.at("choice")), "/choice").orElseGet(ChoiceTerms::usual)
+                ? Declared.sound(ChoiceTerms.read(written.at("choice")), "/choice", findings)
+                        .orElseGet(ChoiceTerms::usual)
                 : ChoiceTerms.usual();
         findings.addAll(Declared.check(choice.make(), "/choice/make"));
         OutlookTerms outlook = outlook();
@@ -202,18 +205,12 @@ public final class Request {
 
     /** The next few kvar under {@code "kvar"}, and whether {@code "charts"} are wanted. */
     public Optional<ClauseTerms> clauses() {
-        return declared(ClauseTerms.read(written), "");
+        return Declared.sound(ClauseTerms.read(written), "", findings);
     }
 
     /** The day under {@code "date"}, if there is one. */
     public Optional<LocalDate> date() {
         return PeriodJson.day(written, "date");
-    }
-
-    private <T> Optional<T> declared(T terms, String pointer) {
-        List<Finding> found = Declared.check(terms, pointer);
-        findings.addAll(found);
-        return found.isEmpty() ? Optional.of(terms) : Optional.empty();
     }
 
     /**
