@@ -2,8 +2,11 @@
 package tariff.intervalfile;
 
 import static org.assertj.core.api.Assertions.assertThat;
-import static org.assertj.core.api.Assertions.catchThrowableOfType;
+import static tariff.intervalfile.InventedFeed.estimated;
 import static tariff.intervalfile.InventedFeed.reading;
+import static tariff.intervalfile.InventedFeed.refusal;
+import static tariff.intervalfile.InventedFeed.untimed;
+import static tariff.intervalfile.InventedFeed.withReactive;
 
 import java.io.ByteArrayInputStream;
 import java.io.IOException;
@@ -13,7 +16,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.Random;
 import java.util.stream.IntStream;
 import java.util.stream.LongStream;
 import org.junit.jupiter.api.Test;
@@ -23,7 +25,6 @@ import org.junit.jupiter.params.provider.ValueSource;
 import tariff.meter.IntervalSeries;
 import tariff.meter.InventedYear;
 import tariff.notice.Finding;
-import tariff.notice.Refusal;
 
 /**
  * Feeds as NAESB REQ.21 (ESPI) lays them out. Codes: schema espi.xsd, version 4.0 of 2023-12-13. Samples: those published with the
@@ -256,36 +257,6 @@ class EspiFeedTest {
     }
 
     @ParameterizedTest
-    @ValueSource(
-            strings = {
-                "<!DOCTYPE feed [<!ENTITY a \"aaaaaaaaaa\"><!ENTITY b \"&a;&a;&a;&a;&a;&a;&a;&a;&a;&a;\">]><feed>&b;</feed>",
-                "<!DOCTYPE feed [<!ENTITY a SYSTEM \"file:///etc/hostname\">]><feed><entry><title>&a;</title></entry></feed>",
-                "<!DOCTYPE feed SYSTEM \"http://127.0.0.1:9/x.dtd\"><feed/>",
-                "<feed><entry></feed>",
-                "<feed>",
-                "<",
-                "<feed>&undeclared;</feed>",
-                "<?xml version=\"1.0\" encoding=\"no-such\"?><feed/>",
-            })
-    void documentTypesEntitiesAndBrokenXmlAreRefusedInOneSentence(String text) {
-        assertThat(refusal(text, UTC)).containsExactly("row 1: is not XML as a feed of meter data has it");
-    }
-
-    @Test
-    void textWithoutEndAndDeepNestingAreNotHeld() {
-        String nested = "<a>".repeat(100_000) + "</a>".repeat(100_000);
-        assertThat(refusal("<feed>" + nested + "</feed>", UTC))
-                .as("newer parsers refuse the depth, older ones pass it over")
-                .allMatch(each -> each.contains("is missing from the feed")
-                        || each.contains("is not XML as a feed of meter data has it"));
-        String longText = "<feed><entry><content><ReadingType><uom>" + "7".repeat(5_000_000);
-        assertThat(refusal(longText, UTC))
-                .singleElement()
-                .asString()
-                .contains("is not XML as a feed of meter data has it");
-    }
-
-    @ParameterizedTest
     @ValueSource(ints = {13, 2147483647, -2147483648})
     void aMultiplierBeyondAnyMeterIsRefused(int multiplier) {
         InventedFeed feed = withReactive(new InventedFeed()
@@ -310,96 +281,13 @@ class EspiFeedTest {
                 .containsExactly("row 6: has a code that is no whole number", "row 8: \"many\" is not a value");
     }
 
-    /** Pieces lost, doubled, swapped for other pieces or figures: read or refused, never anything else. */
-    @Test
-    void whateverHappensToAFeedItIsReadOrRefused() throws IOException {
-        String whole = withReactive(new InventedFeed()
-                        .clock(3_600, 3_600)
-                        .block("1", 0, 3_600, List.of(reading(0, 900, 5), reading(900, 900, 6), estimated(1_800, 8))))
-                .text();
-        String[] pieces = whole.split("(?=<)|(?<=>)");
-        Random random = new Random(1);
-        String[] strange = {
-            "", "-1", "99999999999999999999", "1e9", "<", ">", "&amp;", "<value>", "0", "\u0000", "2147483648"
-        };
-        int read = 0;
-        for (int i = 0; i < 4_000; i++) {
-            String[] changed = pieces.clone();
-            for (int change = random.nextInt(3); change >= 0; change--) {
-                int at = random.nextInt(changed.length);
-                changed[at] = random.nextBoolean()
-                        ? strange[random.nextInt(strange.length)]
-                        : pieces[random.nextInt(pieces.length)];
-            }
-            try {
-                read += InventedFeed.read(String.join("", changed), UTC.gaps(GapRule.LEAVE_OUT))
-                                        .series()
-                                        .size()
-                                > 0
-                        ? 1
-                        : 0;
-            } catch (Refusal refused) {
-                assertThat(refused.findings()).isNotEmpty();
-            }
-        }
-        assertThat(read).as("some are still feeds").isGreaterThan(100);
-    }
-
-    @Test
-    void aBrokenConnectionIsNotTakenForABrokenFeed() {
-        InputStream broken = new InputStream() {
-            private int at;
-
-            @Override
-            public int read() throws IOException {
-                String text = "<feed><entry>";
-                if (at == text.length()) {
-                    throw new IOException("broken off");
-                }
-                return text.charAt(at++);
-            }
-        };
-        assertThat(catchThrowableOfType(IOException.class, () -> IntervalFile.read(broken, UTC)))
-                .hasMessage("broken off");
-    }
-
-    private static InventedFeed withReactive(InventedFeed feed) {
-        return feed.channel("1", "uom=72", "flowDirection=1")
-                .channel("2", "uom=73", "flowDirection=4")
-                .block(
-                        "2",
-                        0,
-                        3_600,
-                        IntStream.range(0, 4)
-                                .mapToObj(i -> reading(900L * i, 900, 1))
-                                .toList());
-    }
-
     private static List<String> hours(long start, int count) {
         return IntStream.range(0, count)
                 .mapToObj(i -> reading(start + 3_600L * i, 3_600, 3_081))
                 .toList();
     }
 
-    private static String untimed(long value) {
-        return "<IntervalReading><value>" + value + "</value></IntervalReading>";
-    }
-
-    private static String estimated(long start, int quality) {
-        return reading(start, 900, 1)
-                .replace("<cost>7</cost>", "<ReadingQuality><quality>" + quality + "</quality></ReadingQuality>");
-    }
-
     private static InputStream bytes(String text) {
         return new ByteArrayInputStream(text.getBytes(StandardCharsets.UTF_8));
-    }
-
-    private static List<String> refusal(String text, IntervalFileOptions options) {
-        Refusal refusal = catchThrowableOfType(Refusal.class, () -> InventedFeed.read(text, options));
-        assertThat(refusal).as("refused").isNotNull();
-        return refusal.findings().stream()
-                .filter(Finding::isError)
-                .map(Finding::toString)
-                .toList();
     }
 }

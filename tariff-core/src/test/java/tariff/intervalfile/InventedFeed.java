@@ -1,6 +1,9 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.intervalfile;
 
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.catchThrowableOfType;
+
 import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
@@ -8,6 +11,8 @@ import java.util.List;
 import java.util.function.IntToLongFunction;
 import java.util.stream.IntStream;
 import tariff.meter.IntervalSeries;
+import tariff.notice.Finding;
+import tariff.notice.Refusal;
 
 /** Writes feeds of meter data as NAESB REQ.21 lays them out: entries tied by their links. */
 final class InventedFeed {
@@ -116,5 +121,37 @@ final class InventedFeed {
 
     static IntervalReading read(String text, IntervalFileOptions options) throws IOException {
         return IntervalFile.read(new ByteArrayInputStream(text.getBytes(StandardCharsets.UTF_8)), options);
+    }
+
+    /** With a channel of kWh, and one of a VArh in each quarter of an hour. */
+    static InventedFeed withReactive(InventedFeed feed) {
+        return feed.channel("1", "uom=72", "flowDirection=1")
+                .channel("2", "uom=73", "flowDirection=4")
+                .block(
+                        "2",
+                        0,
+                        3_600,
+                        IntStream.range(0, 4)
+                                .mapToObj(i -> reading(900L * i, 900, 1))
+                                .toList());
+    }
+
+    static String untimed(long value) {
+        return "<IntervalReading><value>" + value + "</value></IntervalReading>";
+    }
+
+    static String estimated(long start, int quality) {
+        return reading(start, 900, 1)
+                .replace("<cost>7</cost>", "<ReadingQuality><quality>" + quality + "</quality></ReadingQuality>");
+    }
+
+    /** The errors for which a feed is refused. */
+    static List<String> refusal(String text, IntervalFileOptions options) {
+        Refusal refusal = catchThrowableOfType(Refusal.class, () -> read(text, options));
+        assertThat(refusal).as("refused").isNotNull();
+        return refusal.findings().stream()
+                .filter(Finding::isError)
+                .map(Finding::toString)
+                .toList();
     }
 }

@@ -2,7 +2,10 @@
 package tariff.service.http;
 
 import io.restassured.RestAssured;
+import io.restassured.response.ValidatableResponse;
 import io.restassured.specification.RequestSpecification;
+import java.nio.charset.StandardCharsets;
+import java.util.Map;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
 import tariff.service.shelf.Shelf;
@@ -34,7 +37,14 @@ abstract class Served {
     }
 
     static RequestSpecification json(String body) {
-        return given().header("Content-Type", "application/json")
-                .body(body.getBytes(java.nio.charset.StandardCharsets.UTF_8));
+        return given().header("Content-Type", "application/json").body(body.getBytes(StandardCharsets.UTF_8));
+    }
+
+    static ValidatableResponse upload(String path, String csv, Map<String, ?> query) {
+        return given().header("Content-Type", "text/csv; charset=utf-8")
+                .queryParams(query)
+                .body(csv.getBytes(StandardCharsets.UTF_8))
+                .post(path)
+                .then();
     }
 }

@@ -1,7 +1,6 @@
 // SPDX-License-Identifier: Apache-2.0
 package tariff.service.http;
 
-import static org.assertj.core.api.Assertions.assertThat;
 import static org.hamcrest.Matchers.containsInAnyOrder;
 import static org.hamcrest.Matchers.equalTo;
 import static org.hamcrest.Matchers.hasItem;
@@ -10,15 +9,11 @@ import static org.hamcrest.Matchers.hasSize;
 import static org.hamcrest.Matchers.not;
 import static org.hamcrest.Matchers.nullValue;
 import static org.hamcrest.Matchers.startsWith;
+import static tariff.service.http.UploadedDay.HOURLY;
+import static tariff.service.http.UploadedDay.ZONE;
 
-import io.restassured.RestAssured;
-import io.restassured.response.ValidatableResponse;
-import java.io.IOException;
-import java.net.Socket;
 import java.nio.charset.StandardCharsets;
 import java.time.LocalDateTime;
-import java.time.ZonedDateTime;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
@@ -26,23 +21,9 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
-import tariff.service.shelf.Shelf;
 
 /** Interval data in the body, everything else in the query. */
 class UploadTest extends Served {
-    private static final String HOURLY = "ilha-verde-hourly";
-    private static final String ZONE = "America/Sao_Paulo";
-
-    /** A day of hours: the first twelve at 100 kWh and 75 kvarh, PF 0.80; the others at 100 kWh and 10 kvarh. */
-    private static String day() {
-        StringBuilder rows = new StringBuilder("start,kWh,lagging kvarh\n");
-        for (int hour = 0; hour < 24; hour++) {
-            rows.append("2026-03-02 ").append(hour < 10 ? "0" : "").append(hour).append(":00,100,");
-            rows.append(hour < 12 ? "75\n" : "10\n");
-        }
-        return rows.toString();
-    }
-
     /** A day of quarter-hours of 10 kWh but for 40 and 50 from 00:15, which alone have kvarh: 30 each. */
     private static String quarterHours() {
         StringBuilder rows = new StringBuilder("start,kWh,lagging kvarh\n");
@@ -53,18 +34,10 @@ class UploadTest extends Served {
         return rows.toString();
     }
 
-    private static ValidatableResponse upload(String path, String csv, Map<String, ?> query) {
-        return given().header("Content-Type", "text/csv; charset=utf-8")
-                .queryParams(query)
-                .body(csv.getBytes(StandardCharsets.UTF_8))
-                .post(path)
-                .then();
-    }
-
     /** Each of twelve hours is charged 100 × (0.92 ÷ 0.8 − 1) = 15 kWh: 180 × 0.2756 = 49.608; own arithmetic. */
     @Test
     void hoursAreBilledOneByOne() {
-        upload("/interval-statements", day(), Map.of("rate", HOURLY, "zone", ZONE))
+        upload("/interval-statements", UploadedDay.csv(), Map.of("rate", HOURLY, "zone", ZONE))
                 .statusCode(200)
                 .body("statements[0].from", equalTo("2026-03-02"))
                 .body("statements[0].lines[2].amount", equalTo(49.61f))
@@ -78,7 +51,7 @@ class UploadTest extends Served {
     void aFeedOfTheStandardIsBilledLikeTheTable(String type) {
         given().header("Content-Type", type)
                 .queryParams(Map.of("rate", HOURLY, "zone", ZONE))
-                .body(feedOfTheDay().getBytes(StandardCharsets.UTF_8))
+                .body(UploadedDay.feed().getBytes(StandardCharsets.UTF_8))
                 .post("/interval-statements")
                 .then()
                 .statusCode(200)
@@ -86,34 +59,10 @@ class UploadTest extends Served {
                 .body("warnings", hasSize(0));
     }
 
-    private static String feedOfTheDay() {
-        long midnight = ZonedDateTime.parse("2026-03-02T00:00-03:00").toEpochSecond();
-        StringBuilder feed = new StringBuilder("<feed xmlns=\"http://www.w3.org/2005/Atom\">");
-        feed.append(channel("1", 72, 1)).append(channel("2", 73, 2));
-        for (int hour = 0; hour < 24; hour++) {
-            feed.append(block("1", midnight + 3600L * hour, 100_000));
-            feed.append(block("2", midnight + 3600L * hour, hour < 12 ? 75_000 : 10_000));
-        }
-        return feed.append("</feed>").toString();
-    }
-
-    private static String channel(String number, int unit, int flow) {
-        return "<entry><link rel='self' href='MeterReading/%1$s'/><link rel='related' href='ReadingType/%1$s'/><content><MeterReading/></content></entry>"
-                        .formatted(number)
-                + "<entry><link rel='self' href='ReadingType/%s'/><content><ReadingType><flowDirection>%d</flowDirection><uom>%d</uom></ReadingType></content></entry>"
-                        .formatted(number, flow, unit);
-    }
-
-    private static String block(String number, long start, long value) {
-        return ("<entry><link rel='up' href='MeterReading/%s'/><content><IntervalBlock><IntervalReading><timePeriod>"
-                        + "<duration>3600</duration><start>%d</start></timePeriod><value>%d</value></IntervalReading></IntervalBlock></content></entry>")
-                .formatted(number, start, value);
-    }
-
     /** 50 kvar always on: 25 kvarh are left in twelve hours and 40 sent back in twelve; 12 × 40 = 480; own arithmetic. */
     @Test
     void aFixedBankIsWalkedThroughTheHours() {
-        upload("/interval-assessments", day(), Map.of("rate", HOURLY, "zone", ZONE, "fixedKvar", "50"))
+        upload("/interval-assessments", UploadedDay.csv(), Map.of("rate", HOURLY, "zone", ZONE, "fixedKvar", "50"))
                 .statusCode(200)
                 .body("inService.leadingKvarhCreated", equalTo(480.0f))
                 .body("inService.months[0].before.laggingKvarh", equalTo(1020.0f))
@@ -125,7 +74,7 @@ class UploadTest extends Served {
     /** Steps of 30 and 40: both in while 75 are wanted, both out at 10, where 30 would send 20 back; own arithmetic. */
     @Test
     void stepsAreCountedAsTheySwitch() {
-        upload("/interval-assessments", day(), Map.of("rate", HOURLY, "zone", ZONE, "stepsKvar", "30,40"))
+        upload("/interval-assessments", UploadedDay.csv(), Map.of("rate", HOURLY, "zone", ZONE, "stepsKvar", "30,40"))
                 .statusCode(200)
                 .body("inService.stepOperations", equalTo(List.of(2, 2)))
                 .body("inService.operations", equalTo(4))
@@ -175,10 +124,11 @@ class UploadTest extends Served {
     /** Own arithmetic: 24 hours of 100 kWh × 0.4120 = 988.80 on the day before the meter is read and on that day. */
     @Test
     void periodsBeginOnTheDayTheMeterIsRead() {
-        String second = day().substring(day().indexOf('\n') + 1).replace("03-02", "03-14");
+        String second =
+                UploadedDay.csv().substring(UploadedDay.csv().indexOf('\n') + 1).replace("03-02", "03-14");
         upload(
                         "/interval-statements",
-                        day().replace("03-02", "03-13") + second,
+                        UploadedDay.csv().replace("03-02", "03-13") + second,
                         Map.of("rate", HOURLY, "zone", ZONE, "readOn", "14"))
                 .statusCode(200)
                 .body("statements.from", equalTo(List.of("2026-03-13", "2026-03-14")))
@@ -193,7 +143,7 @@ class UploadTest extends Served {
      */
     @Test
     void theClausesOfUploadedHoursAreTold() {
-        upload("/interval-clause-effects", day(), Map.of("rate", HOURLY, "zone", ZONE, "kvar", "25"))
+        upload("/interval-clause-effects", UploadedDay.csv(), Map.of("rate", HOURLY, "zone", ZONE, "kvar", "25"))
                 .statusCode(200)
                 .body("kvar", equalTo(25))
                 .body("lines[2].name", equalTo("Reactive excess"))
@@ -206,7 +156,7 @@ class UploadTest extends Served {
 
     @Test
     void chartsOfClausesAreDrawnWhereTheyAreAskedFor() {
-        upload("/interval-clause-effects", day(), Map.of("rate", HOURLY, "zone", ZONE, "charts", "true"))
+        upload("/interval-clause-effects", UploadedDay.csv(), Map.of("rate", HOURLY, "zone", ZONE, "charts", "true"))
                 .statusCode(200)
                 .body("kvar", equalTo(50))
                 .body("charts.bill", startsWith("<svg"))
@@ -217,7 +167,7 @@ class UploadTest extends Served {
     void whatCannotBeAskedOfClausesIsSaidAtOnce() {
         upload(
                         "/interval-clause-effects",
-                        day(),
+                        UploadedDay.csv(),
                         Map.of("rate", HOURLY, "kvar", "0", "charts", "yes", "readOn", "29", "fixedKvar", "50"))
                 .statusCode(422)
                 .body("findings.pointer", containsInAnyOrder("/readOn", "/charts", "/kvar", "/fixedKvar"))
@@ -242,7 +192,7 @@ class UploadTest extends Served {
 
     @Test
     void aSlidingDemandNeedsItsMinutes() {
-        upload("/interval-statements", day(), Map.of("rate", HOURLY, "zone", ZONE, "slidingDemand", "true"))
+        upload("/interval-statements", UploadedDay.csv(), Map.of("rate", HOURLY, "zone", ZONE, "slidingDemand", "true"))
                 .statusCode(422)
                 .body("findings[0].message", equalTo("does not hold together"))
                 .body("findings[0].allowed", equalTo("a sliding demand with the minutes that it is averaged over"));
@@ -253,7 +203,9 @@ class UploadTest extends Served {
     void everyDocumentedParameterIsKnown(String path) {
         Map<String, String> all = new TreeMap<>();
         CONTRACT.parameters(path).forEach(name -> all.put(name, "%3F"));
-        upload(path, day(), all).statusCode(422).body("findings.message", not(hasItem(startsWith("is not a key"))));
+        upload(path, UploadedDay.csv(), all)
+                .statusCode(422)
+                .body("findings.message", not(hasItem(startsWith("is not a key"))));
     }
 
     /** Off from 12:00 on nothing is sent back: 12 × 25 and 12 × 10 kvarh are left; own arithmetic. */
@@ -261,7 +213,7 @@ class UploadTest extends Served {
     void aTimeSwitchKeepsTheBankOff() {
         upload(
                         "/interval-assessments",
-                        day(),
+                        UploadedDay.csv(),
                         Map.of("rate", HOURLY, "zone", ZONE, "fixedKvar", "50", "off", "12:00-24:00"))
                 .statusCode(200)
                 .body("inService.leadingKvarhCreated", equalTo(0.0f))
@@ -273,7 +225,7 @@ class UploadTest extends Served {
     void aControllerKeepsToItsLimit() {
         upload(
                         "/interval-assessments",
-                        day(),
+                        UploadedDay.csv(),
                         Map.of(
                                 "rate",
                                 HOURLY,
@@ -295,7 +247,7 @@ class UploadTest extends Served {
     void everythingWrongWithTheQueryIsSaidAtOnce() {
         upload(
                         "/interval-assessments",
-                        day(),
+                        UploadedDay.csv(),
                         Map.of(
                                 "rate",
                                 "ilha-verde-hourli",
@@ -317,7 +269,7 @@ class UploadTest extends Served {
 
     @Test
     void whatIsWrongWithTheDataIsSaidWithItsRow() {
-        String csv = day().replace("2026-03-02 05:00,100,75", "2026-03-02 05:00,100,7x5");
+        String csv = UploadedDay.csv().replace("2026-03-02 05:00,100,75", "2026-03-02 05:00,100,7x5");
         upload("/interval-statements", csv, Map.of("rate", HOURLY, "zone", ZONE))
                 .statusCode(422)
                 .body("detail", equalTo("The interval data cannot be used; see findings."))
@@ -327,109 +279,8 @@ class UploadTest extends Served {
 
     @Test
     void aPeakNeedsMinutesThatDivideAnHour() {
-        upload("/interval-statements", day(), Map.of("rate", HOURLY, "zone", ZONE, "demandMinutes", "45"))
+        upload("/interval-statements", UploadedDay.csv(), Map.of("rate", HOURLY, "zone", ZONE, "demandMinutes", "45"))
                 .statusCode(422)
                 .body("findings[0].pointer", equalTo("/demandMinutes"));
-    }
-
-    @ParameterizedTest
-    @CsvSource({"application/json", "text/plain", "multipart/form-data"})
-    void anotherMediaTypeIsNotSupported(String type) {
-        given().header("Content-Type", type)
-                .body(day().getBytes(StandardCharsets.UTF_8))
-                .post("/interval-statements?rate=" + HOURLY)
-                .then()
-                .statusCode(415)
-                .body(
-                        "detail",
-                        equalTo("The body must be text/csv, or application/atom+xml for a feed of NAESB REQ.21."));
-    }
-
-    @ParameterizedTest
-    @CsvSource({"/interval-statements, ''", "/interval-assessments, &fixedKvar=50", "/interval-clause-effects, &kvar=50"
-    })
-    void dataAreTakenUpToTheLimitWhetherTheirLengthIsSaidOrNot(String asked, String more) throws IOException {
-        byte[] csv = day().getBytes(StandardCharsets.UTF_8);
-        for (int spare : new int[] {0, -1}) {
-            Service small = Service.build(Shelf.read(Examples.path("examples/rates")), 0, csv.length + spare)
-                    .start(0);
-            int expected = spare == 0 ? 200 : 413;
-            String path = asked + "?rate=" + HOURLY + "&zone=" + ZONE + more;
-            RestAssured.given()
-                    .port(small.port())
-                    .filter(CONTRACT)
-                    .urlEncodingEnabled(false)
-                    .header("Content-Type", "text/csv")
-                    .body(csv)
-                    .post(path)
-                    .then()
-                    .statusCode(expected);
-            String pieces = Integer.toHexString(csv.length) + "\r\n" + day() + "\r\n0\r\n\r\n";
-            assertThat(sent(
-                            small.port(),
-                            head(path) + "Connection: close\r\nTransfer-Encoding: chunked\r\n\r\n" + pieces))
-                    .startsWith("HTTP/1.1 " + expected)
-                    .contains(expected == 413 ? "larger than " + (csv.length - 1) + " bytes" : "Reactive excess");
-            small.stop();
-        }
-    }
-
-    /** The end of what may be sent is met by the XML parser, inside of which a stream that breaks off would look like broken XML. */
-    @Test
-    void aFeedThatGoesOnBeyondTheLimitIsTooLarge() throws IOException {
-        Service small = Service.build(
-                        Shelf.read(Examples.path("examples/rates")),
-                        0,
-                        feedOfTheDay().length() / 2)
-                .start(0);
-        String pieces = Integer.toHexString(feedOfTheDay().length()) + "\r\n" + feedOfTheDay() + "\r\n0\r\n\r\n";
-        String head = head("/interval-statements?rate=" + HOURLY + "&zone=" + ZONE)
-                .replace("text/csv", "application/atom+xml");
-        assertThat(sent(small.port(), head + "Connection: close\r\nTransfer-Encoding: chunked\r\n\r\n" + pieces))
-                .startsWith("HTTP/1.1 413");
-        small.stop();
-    }
-
-    @Test
-    void whoComesWhileEveryPlaceIsTakenIsToldToTryAgain() throws Exception {
-        String path = "/interval-statements?rate=" + HOURLY + "&zone=" + ZONE;
-        List<Socket> stalled = new ArrayList<>();
-        for (int i = 0; i < Uploads.AT_ONCE; i++) {
-            Socket socket = new Socket("localhost", port());
-            socket.getOutputStream()
-                    .write((head(path) + "Content-Length: 100000\r\n\r\n").getBytes(StandardCharsets.US_ASCII));
-            socket.getOutputStream().flush();
-            stalled.add(socket);
-        }
-        int status = 200;
-        for (int tries = 0; status == 200 && tries < 200; tries++) {
-            status = upload("/interval-statements", day(), Map.of("rate", HOURLY, "zone", ZONE))
-                    .extract()
-                    .statusCode();
-        }
-        assertThat(status).isEqualTo(503);
-        for (Socket each : stalled) {
-            each.close();
-        }
-        for (int tries = 0; status == 503 && tries < 200; tries++) {
-            Thread.sleep(20);
-            status = upload("/interval-statements", day(), Map.of("rate", HOURLY, "zone", ZONE))
-                    .extract()
-                    .statusCode();
-        }
-        assertThat(status).isEqualTo(200);
-    }
-
-    private static String head(String path) {
-        return "POST " + path + " HTTP/1.1\r\nHost: x\r\nContent-Type: text/csv\r\n";
-    }
-
-    private static String sent(int port, String request) throws IOException {
-        try (Socket socket = new Socket("localhost", port)) {
-            socket.setSoTimeout(10_000);
-            socket.getOutputStream().write(request.getBytes(StandardCharsets.US_ASCII));
-            socket.getOutputStream().flush();
-            return new String(socket.getInputStream().readAllBytes(), StandardCharsets.UTF_8);
-        }
     }
 }
